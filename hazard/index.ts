@@ -1,0 +1,3 @@
+export * from './enumerations';
+export type * from './content';
+export type * from './types';
