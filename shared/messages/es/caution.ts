@@ -1,0 +1,4 @@
+import type { caution as en } from '../en/caution';
+import type { Words } from '../words';
+
+export const caution: Words<typeof en> = {};

@@ -1,0 +1,4 @@
+import type { findings as en } from '../en/findings';
+import type { Words } from '../words';
+
+export const findings: Words<typeof en> = {};

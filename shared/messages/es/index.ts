@@ -1,0 +1,50 @@
+import type { en } from '../en/index';
+import type { Words } from '../words';
+import { account } from './account';
+import { archive } from './archive';
+import { board } from './board';
+import { caution } from './caution';
+import { common } from './common';
+import { enumerations } from './enumerations';
+import { fields } from './fields';
+import { findings } from './findings';
+import { helper } from './helper';
+import { home } from './home';
+import { insights } from './insights';
+import { items } from './items';
+import { mail } from './mail';
+import { pdf } from './pdf';
+import { permit } from './permit';
+import { problems } from './problems';
+import { proof } from './proof';
+import { register } from './register';
+import { signing } from './signing';
+import { topics } from './topics';
+import { verify } from './verify';
+import { worksheet } from './worksheet';
+
+/** Every word that people read, in the Spanish of a Mexican electrician. */
+export const es: Words<typeof en> = {
+  account,
+  archive,
+  board,
+  caution,
+  common,
+  enumerations,
+  fields,
+  findings,
+  helper,
+  home,
+  insights,
+  items,
+  mail,
+  pdf,
+  permit,
+  problems,
+  proof,
+  register,
+  signing,
+  topics,
+  verify,
+  worksheet,
+};
