@@ -7,6 +7,7 @@ import { enumerations } from './enumerations';
 import { fields } from './fields';
 import { findings } from './findings';
 import { helper } from './helper';
+import { hints } from './hints';
 import { home } from './home';
 import { insights } from './insights';
 import { items } from './items';
@@ -18,6 +19,7 @@ import { proof } from './proof';
 import { register } from './register';
 import { signing } from './signing';
 import { topics } from './topics';
+import { ui } from './ui';
 import { verify } from './verify';
 import { worksheet } from './worksheet';
 
@@ -32,6 +34,7 @@ export const en = {
   fields,
   findings,
   helper,
+  hints,
   home,
   insights,
   items,
@@ -43,6 +46,7 @@ export const en = {
   register,
   signing,
   topics,
+  ui,
   verify,
   worksheet,
 };

@@ -9,6 +9,7 @@ import { enumerations } from './enumerations';
 import { fields } from './fields';
 import { findings } from './findings';
 import { helper } from './helper';
+import { hints } from './hints';
 import { home } from './home';
 import { insights } from './insights';
 import { items } from './items';
@@ -20,6 +21,7 @@ import { proof } from './proof';
 import { register } from './register';
 import { signing } from './signing';
 import { topics } from './topics';
+import { ui } from './ui';
 import { verify } from './verify';
 import { worksheet } from './worksheet';
 
@@ -34,6 +36,7 @@ export const es: Words<typeof en> = {
   fields,
   findings,
   helper,
+  hints,
   home,
   insights,
   items,
@@ -45,6 +48,7 @@ export const es: Words<typeof en> = {
   register,
   signing,
   topics,
+  ui,
   verify,
   worksheet,
 };
