@@ -1,0 +1,38 @@
+import { createServer } from 'node:http';
+import type { AddressInfo } from 'node:net';
+import { buildApp } from './app';
+import { closeDatabase } from './db';
+import { env } from './env';
+import { logger } from './log';
+
+export interface RunningServer {
+  port: number;
+  /** Requests in flight finish, then every connection closes. */
+  stop(): Promise<void>;
+}
+
+/** Listens on HOST and PORT; with PORT 0 on a free one. */
+export async function startServer(): Promise<RunningServer> {
+  const server = createServer(buildApp());
+  await new Promise<void>((resolve, reject) => {
+    server.once('error', reject);
+    server.listen(env.PORT, env.HOST, () => {
+      server.off('error', reject);
+      resolve();
+    });
+  });
+  const { port } = server.address() as AddressInfo;
+  return {
+    port,
+    async stop() {
+      const closed = new Promise<void>((resolve) => server.close(() => resolve()));
+      server.closeIdleConnections();
+      // Keep-alive connections would hold the server open long after their last answer.
+      const sweep = setInterval(() => server.closeIdleConnections(), 100);
+      await closed;
+      clearInterval(sweep);
+      await closeDatabase();
+      logger.info('stopped');
+    },
+  };
+}
