@@ -1,10 +1,6 @@
 import { DataTypes, Model } from 'sequelize';
-import type {
-  CreationOptional,
-  InferAttributes,
-  InferCreationAttributes,
-  Sequelize,
-} from 'sequelize';
+import type { CreationOptional, InferAttributes, InferCreationAttributes } from 'sequelize';
+import { sequelize } from '../db';
 
 /** What an event is about: each subject has a chain of its own. */
 export type SubjectType = 'worksheet' | 'user' | 'site' | 'rubber-goods' | 'device';
@@ -24,21 +20,19 @@ export class Event extends Model<InferAttributes<Event>, InferCreationAttributes
   declare previousHash: string | null;
 }
 
-export function initEvent(sequelize: Sequelize): void {
-  Event.init(
-    {
-      seq: { type: DataTypes.BIGINT, primaryKey: true, autoIncrement: true },
-      subjectType: { type: DataTypes.TEXT, allowNull: false },
-      subjectId: { type: DataTypes.UUID, allowNull: false },
-      revision: DataTypes.INTEGER,
-      type: { type: DataTypes.TEXT, allowNull: false },
-      actorId: DataTypes.UUID,
-      enteredById: DataTypes.UUID,
-      at: { type: DataTypes.DATE, allowNull: false },
-      payload: { type: DataTypes.JSONB, allowNull: false },
-      hash: { type: DataTypes.TEXT, allowNull: false },
-      previousHash: DataTypes.TEXT,
-    },
-    { sequelize, tableName: 'events', underscored: true, timestamps: false },
-  );
-}
+Event.init(
+  {
+    seq: { type: DataTypes.BIGINT, primaryKey: true, autoIncrement: true },
+    subjectType: { type: DataTypes.TEXT, allowNull: false },
+    subjectId: { type: DataTypes.UUID, allowNull: false },
+    revision: DataTypes.INTEGER,
+    type: { type: DataTypes.TEXT, allowNull: false },
+    actorId: DataTypes.UUID,
+    enteredById: DataTypes.UUID,
+    at: { type: DataTypes.DATE, allowNull: false },
+    payload: { type: DataTypes.JSONB, allowNull: false },
+    hash: { type: DataTypes.TEXT, allowNull: false },
+    previousHash: DataTypes.TEXT,
+  },
+  { sequelize, tableName: 'events', underscored: true, timestamps: false },
+);
