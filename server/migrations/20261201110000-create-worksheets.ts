@@ -134,8 +134,9 @@ export async function up({ context: { sequelize, runtimeRole } }: Migration): Pr
     );
     CREATE INDEX attachments_by_worksheet ON attachments (worksheet_id, id);
 
-    GRANT SELECT, INSERT, UPDATE ON worksheets, worksheet_revisions, worksheet_numbers, questions TO ${runtimeRole};
-    GRANT SELECT, INSERT, DELETE ON attachments TO ${runtimeRole};
+    -- The default of this schema gives every right on rows: taken back where it is too much.
+    REVOKE DELETE ON worksheets, worksheet_revisions, worksheet_numbers, questions FROM ${runtimeRole};
+    REVOKE UPDATE ON attachments FROM ${runtimeRole};
   `);
 }
 

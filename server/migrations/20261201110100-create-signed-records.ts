@@ -57,7 +57,7 @@ export async function up({ context: { sequelize, runtimeRole } }: Migration): Pr
       FOREIGN KEY (worksheet_id, revision) REFERENCES worksheet_revisions (worksheet_id, revision) ON DELETE RESTRICT
     );
 
-    GRANT SELECT, INSERT ON signatures, proofs, close_outs TO ${runtimeRole};
+    REVOKE UPDATE, DELETE ON signatures, proofs, close_outs FROM ${runtimeRole};
   `);
 }
 

@@ -33,8 +33,7 @@ export async function up({ context: { sequelize, runtimeRole } }: Migration): Pr
       UNIQUE NULLS NOT DISTINCT (previous_hash)
     );
 
-    GRANT SELECT, INSERT ON events, seals TO ${runtimeRole};
-    GRANT USAGE ON SEQUENCE events_seq_seq, seals_id_seq TO ${runtimeRole};
+    REVOKE UPDATE, DELETE ON events, seals FROM ${runtimeRole};
   `);
 }
 
