@@ -1,3 +1,29 @@
+import { JOB_TASKS } from './enumerations';
+import type { JobTask } from './enumerations';
+
 export * from './enumerations';
 export type * from './content';
 export type * from './types';
+
+export { arcFlashLikelihood } from './likelihood';
+export { assessArcFlash } from './arcFlash';
+export { ARC_STUDY_REASONS } from './arcFlashFindings';
+export { citation } from './citations';
+export type { CitationId } from './citations';
+export { boltedFaultAmperes, loadAmperes, touchMilliamperes } from './currents';
+export { EDITIONS } from './editions';
+export type { Edition } from './editions/types';
+export { gloveStatus, selectGloveClass } from './gloves';
+export { identifySystem } from './identifySystem';
+export { meterIsAdequate } from './meter';
+export {
+  SHOCK_VOLTS_REASONS,
+  circuitVoltsOf,
+  lookupShockBoundaries,
+  phaseToPhaseVoltsOf,
+  shockTableVolts,
+} from './shock';
+export { barricadeDistance, minimumStepladder } from './surroundings';
+
+/** The tasks of a job, in the order of the task table. */
+export const TASKS: readonly JobTask[] = JOB_TASKS;

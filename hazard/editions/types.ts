@@ -122,13 +122,12 @@ export interface PpeCategoryRow {
 
 /** Rows that all hold at once: the narrowest limits and the strictest figures of them count. */
 export interface PpeRowChoice {
-  readonly aboveVolts: number;
+  /** The top of the voltage band; the choices with the lowest top that is high enough apply. */
   readonly upToVolts: number;
   readonly rows: readonly [PpeRowNumber, ...PpeRowNumber[]];
 }
 
 export interface PpeCategoryTable {
-  readonly upToVolts: number;
   readonly rows: Readonly<Record<PpeRowNumber, PpeCategoryRow>>;
   /** The choices that may apply to a kind of equipment, from the mildest on. */
   readonly choices: Readonly<Record<ArcFlashEquipment, readonly PpeRowChoice[]>>;

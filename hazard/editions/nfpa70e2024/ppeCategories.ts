@@ -6,8 +6,8 @@ import type { PpeCategoryTable, PpeRowChoice } from '../types';
  * either row 2 or row 6 could apply, so both must hold.
  */
 const otherEquipment: readonly PpeRowChoice[] = [
-  { aboveVolts: 0, upToVolts: 240, rows: [1] },
-  { aboveVolts: 240, upToVolts: 600, rows: [2, 6] },
+  { upToVolts: 240, rows: [1] },
+  { upToVolts: 600, rows: [2, 6] },
 ];
 
 /**
@@ -17,7 +17,6 @@ const otherEquipment: readonly PpeRowChoice[] = [
  * with 24 in of working distance: the stricter governs.
  */
 export const ppeCategories: PpeCategoryTable = {
-  upToVolts: 600,
   rows: {
     1: {
       faultKiloamperes: 25,
@@ -70,14 +69,14 @@ export const ppeCategories: PpeCategoryTable = {
   },
   choices: {
     panelboard: [
-      { aboveVolts: 0, upToVolts: 240, rows: [1] },
-      { aboveVolts: 240, upToVolts: 600, rows: [2] },
+      { upToVolts: 240, rows: [1] },
+      { upToVolts: 600, rows: [2] },
     ],
     'motor control center': [
-      { aboveVolts: 0, upToVolts: 600, rows: [3] },
-      { aboveVolts: 0, upToVolts: 600, rows: [4] },
+      { upToVolts: 600, rows: [3] },
+      { upToVolts: 600, rows: [4] },
     ],
-    switchboard: [{ aboveVolts: 0, upToVolts: 600, rows: [5] }],
+    switchboard: [{ upToVolts: 600, rows: [5] }],
     luminaire: otherEquipment,
     'junction box': otherEquipment,
     disconnect: otherEquipment,
