@@ -1,0 +1,12 @@
+import { useMessages } from '../i18n/useMessages';
+import { Text } from './Text';
+
+/** What every screen says: the tool gives no permission, a qualified person decides. */
+export function CautionFoot({ full = false }: { full?: boolean }) {
+  const { caution } = useMessages();
+  return (
+    <Text variant="label" weight="400" color="ink2" role="note">
+      {full ? caution.full : caution.short}
+    </Text>
+  );
+}

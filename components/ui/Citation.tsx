@@ -1,0 +1,51 @@
+import { Fragment } from 'react';
+import type { Citation as CitationData } from '@/hazard/types';
+import { useMessages } from '../i18n/useMessages';
+import { Text } from './Text';
+
+/** 0.13 em between `)` and `(`: Barlow's parentheses touch where they meet. */
+function spaced(text: string) {
+  const parts = text.split(/\)(?=\()/);
+  return parts.map((part, index) => (
+    <Fragment key={index}>
+      {part}
+      {index < parts.length - 1 && (
+        <Text variant="cite" color="ink2" style={{ letterSpacing: 14 * 0.13 }}>
+          {')'}
+        </Text>
+      )}
+    </Fragment>
+  ));
+}
+
+interface Props {
+  /** Several that rest on the same words are shown once. */
+  citation: CitationData | readonly CitationData[];
+  /** Whether how far the figure was checked is said after it. */
+  confidence?: boolean;
+  /** A sentence before it. */
+  lead?: string;
+}
+
+function where({ standard, edition, table }: CitationData): string {
+  const name = edition === '' ? standard : `${standard}-${edition}`;
+  return [name, table].filter((part) => part !== '').join(' ');
+}
+
+/** Where a figure or a rule comes from, and in words how it was checked. */
+export function Citation({ citation, confidence = true, lead }: Props) {
+  const { ui } = useMessages();
+  const all = 'standard' in citation ? [citation] : citation;
+  const lines = all.map((each) => {
+    const place = where(each);
+    const word = ui.confidence[each.confidence];
+    return confidence && place !== word ? `${place}. ${word}` : place;
+  });
+  const text = [...new Set(lines)].join('. ');
+  return (
+    <Text variant="cite" color="ink2">
+      {lead !== undefined && `${lead} `}
+      {spaced(text)}
+    </Text>
+  );
+}

@@ -1,0 +1,2 @@
+/** A phone app has no tab to name. */
+export function useDocumentTitle(_title: string): void {}
