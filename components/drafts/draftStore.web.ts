@@ -1,7 +1,5 @@
 import { openDB, type DBSchema, type IDBPDatabase } from 'idb';
-import type { DraftStore, KeptDraft } from './draftStore';
-
-export type { DraftStore, KeptDraft } from './draftStore';
+import type { DraftStore, KeptDraft } from './draftTypes';
 
 interface Schema extends DBSchema {
   drafts: { key: [string, string]; value: KeptDraft & { userId: string } };

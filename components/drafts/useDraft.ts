@@ -1,5 +1,6 @@
 import { useCallback, useEffect, useRef, useState } from 'react';
-import { draftStore, type KeptDraft } from './draftStore';
+import { draftStore } from './draftStore';
+import type { KeptDraft } from './draftTypes';
 
 /** How a save ended, told by whoever sends it. */
 export type SendOutcome =
@@ -121,10 +122,11 @@ export function useDraft({ userId, worksheetId, version, send }: Options) {
   }, [userId, worksheetId]);
 
   useEffect(() => {
+    // Only the browser tells when the network is back; elsewhere the next try finds out.
     const again = () => void flush();
-    window.addEventListener('online', again);
+    globalThis.addEventListener?.('online', again);
     return () => {
-      window.removeEventListener('online', again);
+      globalThis.removeEventListener?.('online', again);
       clearTimeout(timer.current);
       void flush();
     };

@@ -1,0 +1,42 @@
+import { StyleSheet, View } from 'react-native';
+import type { Finding } from '@/hazard';
+import { findingWords } from '@/shared/messages/findingWords';
+import { useLocale } from '../../i18n/preferences';
+import { space } from '../../theme/tokens';
+import { CautionPanel, Citation, StateMark, StopPanel, Text } from '../../ui';
+
+/** What the rules say: a stop and a caution as panels, an open point as a line. */
+export function FindingPanels({ findings }: { findings: readonly Finding[] }) {
+  return (
+    <>
+      {findings.map((finding) => (
+        <FindingPanel
+          key={`${finding.code} ${finding.path} ${JSON.stringify(finding.params)}`}
+          finding={finding}
+        />
+      ))}
+    </>
+  );
+}
+
+function FindingPanel({ finding }: { finding: Finding }) {
+  const locale = useLocale();
+  const { title, text } = findingWords(locale, finding);
+  const citation = <Citation citation={finding.citation} />;
+  if (finding.severity === 'stop')
+    return <StopPanel title={title} body={text} citation={citation} />;
+  if (finding.severity === 'caution') {
+    return <CautionPanel title={title} body={text} citation={citation} />;
+  }
+  // An empty required field is marked as such; a line that only repeats its label says nothing.
+  if (finding.code.endsWith('.unanswered')) return null;
+  return (
+    <View role="note" style={styles.open}>
+      <StateMark state="open" word={title} />
+      {text !== '' && <Text variant="label">{text}</Text>}
+      {citation}
+    </View>
+  );
+}
+
+const styles = StyleSheet.create({ open: { gap: 2, paddingLeft: space.sm } });
