@@ -67,13 +67,13 @@ export function evaluateArcFlash(
 
 /** Whether there is a label has not been said. */
 function unanswered({ workingDistanceInches }: ArcFlashQuestion, edition: Edition) {
-  const findings = [arcFinding('open', LABEL_PATH, { reason: 'label-not-answered' }, edition)];
+  const findings = [arcFinding('open', LABEL_PATH, { limit: 'label-not-answered' }, edition)];
   if (workingDistanceInches === undefined) {
     findings.push(
       arcFinding(
         'open',
         '/arcFlash/workingDistanceInches',
-        { reason: 'not-answered', field: 'workingDistanceInches' },
+        { limit: 'not-answered', field: 'workingDistanceInches' },
         edition,
       ),
     );

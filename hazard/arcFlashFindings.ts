@@ -4,7 +4,7 @@ import type { Edition } from './editions/types';
 import type { ArcFlashAssessment, Citation, Finding, Severity } from './types';
 
 /** What an `arc.study-needed` finding is about; the words are in `shared/messages`. */
-export const ARC_STUDY_REASONS = [
+export const ARC_STUDY_LIMITS = [
   'label-not-answered',
   'not-answered',
   'limits-not-known',
@@ -17,12 +17,13 @@ export const ARC_STUDY_REASONS = [
   'label-review',
   'transformer-near-limit',
 ] as const;
-export type ArcStudyReason = (typeof ARC_STUDY_REASONS)[number];
+export type ArcStudyLimit = (typeof ARC_STUDY_LIMITS)[number];
 
 export const LABEL_PATH = '/arcFlash/label';
 
 export interface ArcStudyParams extends Record<string, string | number> {
-  reason: ArcStudyReason;
+  /** Which limit or field it is about. */
+  limit: ArcStudyLimit;
 }
 
 export interface ArcFlashFigures {

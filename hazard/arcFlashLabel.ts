@@ -29,7 +29,7 @@ export function labelAboveForty(label: EquipmentLabel, edition: Edition): Findin
         code: 'arc.above-forty',
         severity: 'stop',
         path: `${LABEL_PATH}/${name}`,
-        params: { value, limit: OWN_LIMIT_CAL_PER_CM2 },
+        params: { energy: value, allowed: OWN_LIMIT_CAL_PER_CM2 },
         citation: citation('own.aboveForty', edition),
       },
     ];
@@ -41,7 +41,7 @@ function reviewFindings({ reviewedOn }: EquipmentLabel, day: string | undefined,
     arcFinding(
       'caution',
       `${LABEL_PATH}/reviewedOn`,
-      { reason: 'label-review', years: edition.labelReviewMonths / 12 },
+      { limit: 'label-review', years: edition.labelReviewMonths / 12 },
       edition,
       'nfpa70e.labelReview',
     );
@@ -56,19 +56,19 @@ function voltageFindings(label: EquipmentLabel, volts: number | undefined, editi
   const value = figure(label.systemVolts);
   if (value === undefined) {
     return [
-      arcFinding('open', path, { reason: 'not-answered', field: 'label.systemVolts' }, edition),
+      arcFinding('open', path, { limit: 'not-answered', field: 'label.systemVolts' }, edition),
     ];
   }
   if (volts === undefined || value === volts) return [];
   return [
-    arcFinding('stop', path, { reason: 'label-voltage-differs', value, limit: volts }, edition),
+    arcFinding('stop', path, { limit: 'label-voltage-differs', value, allowed: volts }, edition),
   ];
 }
 
 function distanceFindings(label: EquipmentLabel, question: ArcFlashQuestion, edition: Edition) {
   const findings: Finding[] = [];
   const notAnswered = (path: string, field: string) =>
-    findings.push(arcFinding('open', path, { reason: 'not-answered', field }, edition));
+    findings.push(arcFinding('open', path, { limit: 'not-answered', field }, edition));
   const path = '/arcFlash/workingDistanceInches';
   const planned = question.workingDistanceInches;
   const printed = figure(label.workingDistanceInches);
@@ -82,7 +82,7 @@ function distanceFindings(label: EquipmentLabel, question: ArcFlashQuestion, edi
       arcFinding(
         'stop',
         path,
-        { reason: 'label-working-distance', value: planned, limit: printed },
+        { limit: 'label-working-distance', value: planned, allowed: printed },
         edition,
       ),
     );
@@ -108,11 +108,11 @@ export function evaluateLabel(
   const { minimumArcRatingCalPerCm2, minimumArcRatingCitation } = edition.ppeCategories;
 
   if (energy === undefined && rating === undefined && category === undefined) {
-    const params = { reason: 'not-answered', field: 'label.incidentEnergyCalPerCm2' } as const;
+    const params = { limit: 'not-answered', field: 'label.incidentEnergyCalPerCm2' } as const;
     findings.push(arcFinding('open', LABEL_PATH, params, edition));
   }
   if (boundaryInches === undefined) {
-    const params = { reason: 'not-answered', field: 'label.arcFlashBoundaryInches' } as const;
+    const params = { limit: 'not-answered', field: 'label.arcFlashBoundaryInches' } as const;
     findings.push(arcFinding('open', `${LABEL_PATH}/arcFlashBoundaryInches`, params, edition));
   }
   findings.push(

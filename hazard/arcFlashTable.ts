@@ -1,17 +1,19 @@
 import type { ArcFlashQuestion } from './arcFlashEvaluation';
 import { arcFinding } from './arcFlashFindings';
-import type { ArcFlashPart, ArcStudyReason } from './arcFlashFindings';
+import type { ArcFlashPart, ArcStudyLimit } from './arcFlashFindings';
 import { citation } from './citations';
 import type { Edition, PpeCategoryRow, PpeRowChoice } from './editions/types';
 import type { Finding } from './types';
 
 /** An estimate this near to a limit is pointed out: the impedance of a nameplate has a tolerance. */
 const NEAR_LIMIT = 0.1;
+/** So that an estimate on the very edge counts as near, whatever binary fractions make of it. */
+const ROUNDING = 1e-9;
 
 interface Limit {
   path: string;
   field: 'availableFaultKiloamperes' | 'clearingSeconds' | 'workingDistanceInches';
-  reason: ArcStudyReason;
+  code: ArcStudyLimit;
   value: number | undefined;
   limitOf: (row: PpeCategoryRow) => number;
   isInside: (value: number, limit: number) => boolean;
@@ -27,7 +29,7 @@ function limitsOf(question: ArcFlashQuestion): Limit[] {
     {
       path: estimateCounts ? '/arcFlash/transformer' : '/arcFlash/availableFaultKiloamperes',
       field: 'availableFaultKiloamperes',
-      reason: 'fault-current-exceeded',
+      code: 'fault-current-exceeded',
       value: estimateCounts ? estimate : given,
       limitOf: (row) => row.faultKiloamperes,
       isInside: isAtMost,
@@ -35,7 +37,7 @@ function limitsOf(question: ArcFlashQuestion): Limit[] {
     {
       path: '/arcFlash/clearingSeconds',
       field: 'clearingSeconds',
-      reason: 'clearing-time-exceeded',
+      code: 'clearing-time-exceeded',
       value: question.clearingSeconds,
       limitOf: (row) => row.clearingSeconds,
       isInside: isAtMost,
@@ -43,7 +45,7 @@ function limitsOf(question: ArcFlashQuestion): Limit[] {
     {
       path: '/arcFlash/workingDistanceInches',
       field: 'workingDistanceInches',
-      reason: 'working-distance-short',
+      code: 'working-distance-short',
       value: question.workingDistanceInches,
       limitOf: (row) => row.workingDistanceInches,
       isInside: (value, limit) => value >= limit,
@@ -83,14 +85,14 @@ function unansweredFindings(
       const isSaid = question.limitsNotKnown === true && field !== 'workingDistanceInches';
       return value === undefined && !isSaid;
     })
-    .map(({ path, field }) => arcFinding('open', path, { reason: 'not-answered', field }, edition));
+    .map(({ path, field }) => arcFinding('open', path, { limit: 'not-answered', field }, edition));
 }
 
 function exceededFindings(limits: readonly Limit[], row: PpeCategoryRow, edition: Edition) {
-  return limits.flatMap(({ path, reason, value, limitOf, isInside }) => {
+  return limits.flatMap(({ path, code, value, limitOf, isInside }) => {
     const limit = limitOf(row);
     if (value === undefined || isInside(value, limit)) return [];
-    return [arcFinding('stop', path, { reason, value, limit }, edition)];
+    return [arcFinding('stop', path, { limit: code, value, allowed: limit }, edition)];
   });
 }
 
@@ -102,12 +104,12 @@ function nearLimitFindings(
   if (estimate === undefined) return [];
   const limits = [...new Set(rows.map(({ faultKiloamperes }) => faultKiloamperes))];
   return limits
-    .filter((limit) => Math.abs(estimate - limit) <= NEAR_LIMIT * limit)
+    .filter((limit) => Math.abs(estimate - limit) <= NEAR_LIMIT * limit + ROUNDING)
     .map((limit) =>
       arcFinding(
         'caution',
         '/arcFlash/transformer',
-        { reason: 'transformer-near-limit', value: estimate, limit },
+        { limit: 'transformer-near-limit', estimate, limitKiloamperes: limit },
         edition,
       ),
     );
@@ -122,7 +124,7 @@ export function evaluateTable(question: ArcFlashQuestion, edition: Edition): Arc
   const unanswered = unansweredFindings(limits, question, edition);
   const notKnown =
     limitsNotKnown === true
-      ? [arcFinding('stop', '/arcFlash/limitsNotKnown', { reason: 'limits-not-known' }, edition)]
+      ? [arcFinding('stop', '/arcFlash/limitsNotKnown', { limit: 'limits-not-known' }, edition)]
       : [];
   if (equipment === undefined || volts === undefined) {
     return { findings: [...notKnown, ...unanswered], figures: null };
@@ -137,7 +139,7 @@ export function evaluateTable(question: ArcFlashQuestion, edition: Edition): Arc
   const best = [...candidates].sort((a, b) => a.exceeded.length - b.exceeded.length)[0];
   if (best === undefined) {
     const limit = Math.max(...choices[equipment].map(({ upToVolts }) => upToVolts));
-    const params = { reason: 'voltage-outside-table', value: volts, limit } as const;
+    const params = { limit: 'voltage-outside-table', value: volts, allowed: limit } as const;
     const outside = arcFinding('stop', '/supply/system', params, edition);
     return { findings: [outside, ...notKnown, ...unanswered], figures: null };
   }

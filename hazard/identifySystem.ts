@@ -4,6 +4,9 @@ import type { Edition, IdentificationRow, VoltageWindow } from './editions/types
 import { SYSTEMS } from './enumerations';
 import type { SystemCode } from './enumerations';
 
+/** A quotient on the very edge is inside, whatever binary fractions make of it. */
+const ROUNDING = 1e-9;
+
 const isIn = ({ fromVolts, upToVolts }: VoltageWindow, volts: number) =>
   volts >= fromVolts && volts <= upToVolts;
 
@@ -52,6 +55,6 @@ export function identifySystem(
     }
     if (!hasBoth || row.quotient === null) return true;
     const quotient = meanOf(phaseToPhase) / meanOf(phaseToNeutral);
-    return Math.abs(quotient / row.quotient - 1) <= quotientTolerance;
+    return Math.abs(quotient / row.quotient - 1) <= quotientTolerance + ROUNDING;
   });
 }

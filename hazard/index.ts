@@ -7,7 +7,7 @@ export type * from './types';
 
 export { arcFlashLikelihood } from './likelihood';
 export { assessArcFlash } from './arcFlash';
-export { ARC_STUDY_REASONS } from './arcFlashFindings';
+export { ARC_STUDY_LIMITS } from './arcFlashFindings';
 export { citation } from './citations';
 export type { CitationId } from './citations';
 export { boltedFaultAmperes, loadAmperes, touchMilliamperes } from './currents';
