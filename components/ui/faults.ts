@@ -6,7 +6,8 @@ export function describeFault(error: unknown, { ui, problems }: Messages): strin
   if (!(error instanceof ApiProblem)) return ui.problem.network;
   if (error.problem === 'malformed-request') return ui.problem.update;
   if (error.problem === 'unexpected') return ui.problem.unexpected;
-  return problems[error.problem];
+  const { title, todo } = problems[error.problem];
+  return `${title} ${todo}`;
 }
 
 /** The number to read out when something went wrong on the server. */

@@ -209,8 +209,8 @@ export const enumerations = {
   },
   ceiling: { 'no suspect material': 'No suspect material', suspected: 'Suspected' },
   overheadLines: {
-    'none within 10 ft': 'None within 10\u00a0ft',
-    'nearer than 10 ft': 'Nearer than 10\u00a0ft',
+    'none within 10 ft': 'None within 10 ft',
+    'nearer than 10 ft': 'Nearer than 10 ft',
   },
   closest: {
     'outside all boundaries': 'Outside all boundaries',
@@ -230,7 +230,7 @@ export const enumerations = {
     'not discharged': 'Not discharged',
   },
   conductor: { A: 'Phase A', B: 'Phase B', C: 'Phase C', N: 'Neutral', G: 'Ground' },
-  current: { ac: 'AC', dc: 'DC' },
+  current: { ac: 'AC', dc: 'DC', 'ac and dc': 'AC and DC' },
   state: {
     draft: 'Draft',
     briefing: 'Waits for the crew',

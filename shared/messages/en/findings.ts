@@ -1,1 +1,410 @@
-export const findings = {};
+/**
+ * The words of every finding of `assess`, by its code. One sentence a severity:
+ * what is so, then what to do. `{name}` is filled from the finding; a part in
+ * square brackets is left out where its figure is not known.
+ */
+export const findings = {
+  'job.outside-scope': {
+    title: 'Outside what this sheet covers',
+    stop: '[{special}: ]this sheet does not cover it. Do not plan this work here; take it to the people and the procedure that do.',
+    open: 'Not said whether anything outside this sheet is present. Look for it and answer in section 1.',
+  },
+  'supply.voltage-not-of-system': {
+    title: 'Circuit voltage does not fit the system',
+    stop: '[{volts} ]is no circuit voltage of this system[ ({system})]. Correct the system or the voltage; 120 V beside 480Y/277 V comes from a transformer and is a system of its own.',
+    open: 'System and circuit voltage cannot be compared yet. Read both off the panel and answer in section 2.',
+  },
+  'supply.readings-do-not-fit': {
+    title: 'Readings do not fit the system',
+    stop: 'The voltages read do not fit the declared system[ ({system})][. They fit {fits}]. Find out which supply this is, then correct section 2.',
+    open: 'Voltages were read, but no system is named. Name the system in section 2.',
+  },
+  'supply.high-leg': {
+    title: 'High leg present',
+    caution:
+      'One phase of this supply reads about 208 V to neutral. Find the orange conductor, keep lighting circuits off it, and test every phase.',
+  },
+  'supply.colors-do-not-fit': {
+    title: 'Conductor color of another system',
+    caution:
+      '[{color} ]is the custom of another system than the one declared. Read the voltage; color proves nothing.',
+  },
+  'supply.tripped': {
+    title: 'Breaker tripped',
+    stop: 'The breaker tripped and the cause is not found. Do not reclose it; find and repair the fault first.',
+    open: 'Not said whether the breaker has tripped. Look at it and ask, then answer in section 2.',
+    caution:
+      'The breaker tripped and the cause is not found. Look for the fault with the circuit open; do not reclose to try.',
+  },
+  'sources.none': {
+    title: 'No way it can be live is listed',
+    open: 'No way it can be live is listed. Add each one in section 3, the normal branch circuit first.',
+  },
+  'sources.egress-unknown': {
+    title: 'Emergency egress supply not known',
+    stop: 'Nobody knows where the emergency egress supply comes from. Find it before anything is opened: charge lamps, emergency panels, the building’s drawings.',
+    open: 'Where the emergency egress supply comes from is not answered, or two answers exclude each other. Look for charge lamps and emergency panels, then answer in section 3.',
+  },
+  'sources.egress-not-listed': {
+    title: 'Emergency supply is not listed',
+    stop: 'The emergency supply[ ({supply})] reaches this equipment and is not listed. Add it in section 3, with where it is opened.',
+    open: 'The emergency supply[ ({supply})] reaches this equipment and the list of ways is not complete. Add it, and name the kind of each way, in section 3.',
+  },
+  'sources.switch-only': {
+    title: 'A switch or control is not an opening',
+    stop: '{way} is opened only at a switch or control device[ ({openedAt})]. Taped or not it never counts as open. Open the breaker or a disconnect, and lock it.',
+  },
+  'sources.not-opened': {
+    title: 'A way stays closed',
+    stop: '{way} is not opened. Open it at a breaker, disconnect, fuse or plug, then mark it in section 3.',
+    open: '{way}: where it is opened is not answered. Choose it in section 3.',
+  },
+  'sources.not-locked': {
+    title: 'Opening not locked as required',
+    stop: '{way} is not held open as it must be[ (now: {held})]. Hang a lock and a tag. A tag alone needs a second measure; a lock alone serves one device within one shift; holding it in hand serves a plug or battery connector only.',
+    open: '{way}: how it is held open, or its lock number, is not answered. Enter both in section 3.',
+  },
+  'sources.battery-connected': {
+    title: 'Battery unit still connected',
+    stop: '{way} is still connected. Its output may be at line voltage with every breaker off. Part the connector in the luminaire, then mark it here; if it cannot be parted, this sheet cannot go on.',
+    open: '{way}: not marked as parted, or the battery unit to be replaced is not listed. List it and part its connector, then mark it in section 3.',
+  },
+  'sources.by-unqualified': {
+    title: 'Locking or testing by someone not qualified',
+    stop: '{who} locks or tests and is not a qualified person of this crew. Give it to one who is.',
+    open: 'Not said who locks[ {way}] or who tests, or whether they are qualified. Name a qualified person of this crew.',
+  },
+  'sources.traveler-unlisted': {
+    title: 'Traveler not listed',
+    open: 'Switches in two or more places, or switching not answered, and no traveler is listed. Walk to each switch, then add the traveler or answer the switching in section 2.',
+  },
+  'sources.shared-neutral': {
+    title: 'Shared neutral',
+    stop: '{way}: not every phase that shares the neutral is opened. Open and lock all of them; a parted neutral can stand at line voltage.',
+    open: 'The neutral is shared, and its phases are not all listed and marked as opened. Add the shared neutral in section 3 and answer whether all its phases are open.',
+  },
+  'sources.opened-before-transfer': {
+    title: 'Opened ahead of the transfer switch',
+    stop: '{way} is opened ahead of the transfer switch: the standby supply makes the circuit live again within seconds. Open the branch breaker on the load side.',
+    open: '{way}: not said on which side of the transfer switch it is opened. Trace it, then answer in section 3.',
+  },
+  'sources.transfer-starts': {
+    title: 'Standby supply will start',
+    caution:
+      'Opening the normal supply makes the standby supply start. Lights still on after the breaker is off are expected, and no sign of a wrong breaker.',
+  },
+  'sources.neutral-not-checked': {
+    title: 'Current in the neutral',
+    stop: '[{amperes} ]flows in the neutral: another circuit shares it. Do not part it; find and open the other circuit, then clamp again.',
+    open: 'The neutral is or may be shared and no clamp reading is entered. Clamp it before it is parted, and enter the amperes.',
+  },
+  'sources.live-neighbor': {
+    title: 'Live parts beside the work',
+    stop: 'The same box or panel keeps live parts that are not guarded. Cover them with rated insulation or open them too.',
+    open: 'Not said whether the same box or panel keeps live parts. Look; with only the panel’s own main open, its line lugs are live. Then answer with the proof.',
+  },
+  'sources.control-unlisted': {
+    title: 'Control wiring not listed',
+    open: 'The switching is automatic or not known, and no control wiring is listed. Find what feeds the sensor, relay or dimming pair, and add it in section 3.',
+  },
+  'sources.stored-energy': {
+    title: 'Stored energy',
+    open: 'Stored energy is not answered or not discharged. Wait, discharge and measure the driver, ballast or battery output, then enter it with the proof.',
+  },
+  'sources.not-everyone-locked': {
+    title: 'Not everyone has a lock on it',
+    open: '{way}: not everyone who works on the circuit has a lock on it[ (missing: {who})]. Each hangs their own, on the device or the group lock box.',
+  },
+  'decision.unjustified': {
+    title: 'Energized without an admitted reason',
+    stop: 'Energized work is planned and no admitted reason is given[ for this task ({task})]. Switch it off, or give a reason that the regulation admits.',
+  },
+  'decision.explanation-missing': {
+    title: 'Explanation missing',
+    open: 'Why it stays energized is not explained. Write it in section 4, in your own words.',
+  },
+  'decision.below-fifty-not-so': {
+    title: 'Not everything is below 50 V',
+    stop: '50 V or more is worked on or exposed[ ({volts})]. Below 50 V is then no reason; switch it off.',
+    open: 'Below 50 V is the reason, and the voltages are not all answered. Enter the highest voltage worked on, and whether anything higher is exposed.',
+  },
+  'decision.testing-is-not-repair': {
+    title: 'Testing is no reason to repair live',
+    stop: 'Testing admits no repair[ ({task})]. Test, then switch off for the repair.',
+  },
+  'decision.infeasible-not-admitted': {
+    title: 'Ground not admitted',
+    stop: 'This ground does not make it infeasible to switch off. Convenience, tenants, lost sales and overtime are not admitted. Plan the outage.',
+    open: 'Why it cannot be done with the power off is not answered. Choose it in section 4.',
+    caution:
+      'A continuous industrial process is given as the ground. A building’s lighting is hardly ever part of one. Have the supervisor look at it.',
+  },
+  'decision.alternative-possible': {
+    title: 'Another way is possible',
+    stop: 'Temporary light is possible, so darkness is no reason. Set up the light and switch off.',
+    open: 'The other ways are not all asked for: who refused the outage, which hazard, whether temporary light is possible. Answer them in section 4.',
+  },
+  'permit.missing': {
+    title: 'Energized work permit',
+    stop: 'The permit ends before the work, or its signer is on the crew. Get one that lasts, signed by someone who is not.',
+    open: 'An energized work permit is required. Enter its number, who signed it, and until when it holds.',
+  },
+  'absence.source-not-opened': {
+    title: 'Opening not confirmed',
+    stop: '{way} is not confirmed as opened, held and tried. Go to it, try it, then confirm it before the test.',
+    open: 'Which ways were opened, held and tried is not answered. Confirm each one before the test.',
+  },
+  'absence.proximity-tester': {
+    title: 'Proximity tester',
+    stop: 'A proximity tester never proves absence of voltage. Use a contact tester.',
+    open: 'The instrument is not chosen. Choose the contact tester in section 5.',
+  },
+  'absence.meter-category': {
+    title: 'Meter not rated for this',
+    stop: 'The tester[ ({category}, {ratedVolts})] is not rated for this place[: {requiredCategory}, {requiredVolts} or more]. Use one that is, leads included.',
+    open: 'Category or rated voltage of the tester is not answered. Read both off the meter and the leads, and enter the lowest.',
+  },
+  'absence.not-proved': {
+    title: 'Tester not proved before and after',
+    open: 'The tester is not proved on a known live source before and after the test. Prove it, then mark both.',
+  },
+  'absence.pairs-missing': {
+    title: 'Readings missing',
+    open: '{point}: readings are missing[ ({pairs})]. Test every pair at every point of work, and enter each reading.',
+  },
+  'absence.voltage-present': {
+    title: 'Voltage present',
+    stop: '{point}: {reading} is present[, {pair}]. It is live. Step back, stop the work, and find the way that is missing.',
+  },
+  'absence.stray-voltage': {
+    title: 'Stray voltage',
+    stop: '{point}: {reading} remains[, {pair}]. Find where it comes from, or test again with a low-impedance meter.',
+  },
+  'absence.controls-not-operated': {
+    title: 'Controls not operated',
+    stop: 'Not every control was put ON for the test. 0 V behind an open switch proves nothing. Put each one ON, each three-way in both positions, and test again.',
+    open: 'Not said whether every control was put ON. Operate each one, each three-way in both positions, before and during the test.',
+  },
+  'absence.source-not-tested': {
+    title: 'A way was not tested',
+    open: '{way}: its conductors are not read[ at {points}]. Read each to ground and to each phase at every point that it reaches.',
+  },
+  'absence.dc-not-tested': {
+    title: 'DC not tested',
+    open: '{way}: no DC reading[ at {points}]. An AC range does not see a battery or a driver output. Switch to DC and read them.',
+  },
+  'absence.leads-not-inspected': {
+    title: 'Leads not inspected',
+    open: 'Instrument, leads and probes are not marked as inspected. Look them over and check the category on the leads, then mark it.',
+  },
+  'shock.unqualified-inside': {
+    title: 'Someone not qualified comes too close',
+    stop: '{who} is not qualified and comes inside a shock boundary[ ({closest})]. Keep them outside the limited boundary, or give them a qualified escort where limited admits one.',
+    open: '{who} comes inside a shock boundary, and whether they are qualified is not answered. Answer it in section 10.',
+  },
+  'shock.gloves-missing': {
+    title: 'Rubber gloves missing',
+    stop: '{who} enters the restricted boundary and has no rubber gloves. Pick a pair from the register for them.',
+    open: '{who} enters the restricted boundary, and no gloves are answered. Pick a pair in section 8.',
+  },
+  'shock.gloves-class': {
+    title: 'Glove class too low',
+    stop: 'The gloves of {who}[, class {gloveClass},] are not enough[ for {volts}]. Take class {requiredClass} or better.',
+    open: 'The class of the gloves of {who} is not answered. Read it off the cuff.',
+  },
+  'shock.gloves-overdue': {
+    title: 'Gloves out of test',
+    stop: 'The gloves of {who} are out of test[ since {dueOn}]. Leave them and take a pair that is in test.',
+    open: 'When the gloves of {who} were last tested is not answered. Read the stamp and enter the date.',
+  },
+  'shock.gloves-not-air-tested': {
+    title: 'Gloves not air-tested',
+    open: 'The gloves of {who} are not air-tested and inspected today. Roll the cuff, look and listen, then mark it.',
+  },
+  'shock.gloves-no-protectors': {
+    title: 'Leather protectors missing',
+    stop: 'No leather protectors over the gloves of {who}. Put them on; without them the rubber is not worn.',
+    open: 'Not said whether {who} wears leather protectors. Answer it in section 8.',
+  },
+  'shock.grounded-surface': {
+    title: 'Grounded metal in reach',
+    stop: '[{kind}: ]grounded metal is in reach and neither covered nor kept clear as this work asks. Cover it with a rubber blanket; on a lift use an insulating one.',
+    open: 'Grounded metal in reach is not answered. Look for the ceiling grid, duct, strut and conduit, then answer in section 9.',
+  },
+  'shock.conductive-articles': {
+    title: 'Metal on the body',
+    stop: 'Rings, watch, chains or metal frames are still worn. Take them off.',
+    open: 'Not said whether rings, watch, chains and metal frames are off. Look at each other, then answer in section 9.',
+  },
+  'shock.escort-is-working': {
+    title: 'Nobody free to escort',
+    stop: '{who} needs an escort, and every qualified person has hands in the work. Keep them outside the limited boundary, or bring one more qualified person.',
+    caution:
+      '{who} needs an escort, and every qualified person is at the test. Keep them outside the limited boundary until it is proved dead.',
+  },
+  'arc.study-needed': {
+    title: 'Engineering study needed',
+    stop: 'No arc flash method holds here[: {limit}]. Get an engineering study or a label of this equipment, or switch it off from where no arc flash is likely.',
+    open: 'The arc flash method cannot be chosen yet[: {limit}]. Read the label, or enter that there is none, the fault current, the clearing time and the working distance.',
+    caution:
+      'Arc flash: [{limit}. ]Check the date of the label, and how near the transformer estimate is to the limit[ ({estimate} of {limitKiloamperes})].',
+  },
+  'arc.above-forty': {
+    title: 'More than 40 cal/cm²',
+    stop: 'The label says more than 40 cal/cm²[ ({energy})]. No clothing answers the blast. Do not open it energized; open the supply upstream.',
+  },
+  'arc.rating-low': {
+    title: 'Arc rating too low',
+    stop: 'The clothing[, {rating},] is rated below what is required[, {requiredRating}]. Everyone inside the arc flash boundary changes, or stays out.',
+    open: 'The arc rating worn is not answered[; {requiredRating} is required]. Read the lowest one off the garments.',
+  },
+  'arc.task-does-not-fit': {
+    title: 'Arc flash task does not fit the job',
+    open: 'The arc flash task chosen[ ({arcFlashTask})] is milder than the job[ ({floor})]. Choose the one that fits; until then the stricter counts.',
+  },
+  'arc.bystander-inside': {
+    title: 'Inside the arc flash boundary unprotected',
+    stop: '{who} is inside the arc flash boundary[ ({boundary})] without arc-rated clothing. Dress them for it, or keep them outside.',
+  },
+  'equipment.not-at-hand': {
+    title: 'Equipment not at hand',
+    open: '{item}: not marked as at hand. Bring it and look it over, then mark it in section 8.',
+  },
+  'equipment.damaged': {
+    title: 'Equipment damaged',
+    stop: 'The equipment is damaged. It is not worked on energized; open the next device upstream.',
+    open: 'Not said whether anything is damaged. Look for scorched, cracked, corroded, loose, wet or bare parts, then answer in section 2.',
+    caution:
+      'The equipment is damaged, so its condition is abnormal. Open the next device upstream.',
+  },
+  'surroundings.ladder-conductive': {
+    title: 'Conductive ladder',
+    stop: 'The ladder conducts[ ({material})]. Take a fiberglass one.',
+    open: 'What the ladder is made of is not answered. Look at the rails, then answer in section 9.',
+  },
+  'surroundings.ladder-top': {
+    title: 'Standing too high on the ladder',
+    stop: 'The step stood on[, {standing},] is too high on this ladder[; highest {highest}]. Stand lower, or take a taller ladder.',
+    open: 'Ladder size or the step stood on is not answered. Enter both in section 9.',
+  },
+  'surroundings.ladder-short': {
+    title: 'Ladder too short or not placed',
+    stop: 'The ladder is too short for this ceiling[; {required} needed], or not locked open, level and kept from doors and traffic. Take a taller one, a platform or a lift, and set it right.',
+    open: 'Ladder size, ceiling height or how the ladder stands is not answered. Enter them in section 9.',
+  },
+  'surroundings.dark': {
+    title: 'Not enough light',
+    stop: 'With the circuit off there is not enough light. Set up battery or temporary lights before anyone reaches in.',
+    open: 'Not said whether there is enough light with the circuit off. Judge it that way, then answer in section 9.',
+  },
+  'surroundings.wet': {
+    title: 'Wet',
+    stop: 'Something is wet. Stop until equipment, stand, hands and clothing are dry; on the off path write what is done about it.',
+    open: 'Not said whether anything is wet. Look at the equipment, the floor and the ladder, then answer in section 9.',
+    caution:
+      'Something is wet, and measures are written. Keep to them: dry stand, dry gloves, GFCI on every cord.',
+  },
+  'surroundings.barricade': {
+    title: 'Barricade',
+    stop: 'The barricade[, at {barricade},] is nearer than it must be[: {required}]. Move it out, attendant or not.',
+    open: 'People may approach, and no barricade far enough out[ ({required})] nor attendant keeps them off. Set one and enter it in section 9.',
+  },
+  'surroundings.egress-dark': {
+    title: 'Emergency lighting out of service',
+    open: 'Emergency lighting goes out while people are in the building. Tell whoever runs it and set up what stands in; enter both in section 3.',
+    caution:
+      'Emergency lighting is out of service until it is restored and tested. Keep what stands in for it running until then.',
+  },
+  'surroundings.lift-unsafe': {
+    title: 'Lift not in order',
+    stop: 'On the lift someone is not tied off, or its operator is not trained. Put that right before it rises.',
+    open: 'Fall protection or the training of the lift’s operator is not answered. Answer both in section 9.',
+  },
+  'surroundings.overhead-line': {
+    title: 'Overhead line near',
+    stop: 'An overhead line is nearer than 10 ft. Stay 10 ft away with everything at its longest, or have the utility deal with the line.',
+    open: 'Outdoors or not, and how near overhead lines are, is not answered. Look up, then answer in section 9.',
+  },
+  'surroundings.ceiling-content': {
+    title: 'Asbestos or PCBs',
+    stop: 'Asbestos or PCBs are suspected. Do not disturb the ceiling or the ballast; have it tested first.',
+    open: 'Whether the ceiling or ballast may hold asbestos or PCBs is not answered. Ask whoever runs the building, then answer in section 9.',
+  },
+  'crew.lead-unqualified': {
+    title: 'Lead is not qualified',
+    stop: 'The lead[, {who},] is not a qualified person. Name one who is.',
+    open: 'Not exactly one person leads, or whether the lead is qualified is not answered. Name one qualified lead in section 10.',
+  },
+  'crew.training-lapsed': {
+    title: 'Training lapsed',
+    stop: 'The training of {who} has lapsed[ ({through})]. They count as not qualified until it is renewed.',
+    open: 'Until when {who} is qualified is not answered. Enter the date in section 10.',
+  },
+  'crew.alone': {
+    title: 'One person alone',
+    stop: 'One person alone may not do energized work. Bring a second.',
+    caution:
+      'One person is alone. Let somebody know where and until when, and have them call at set times.',
+  },
+  'crew.briefing-open': {
+    title: 'Briefing topic left',
+    open: 'Not yet covered in the briefing: {topic}. Talk it through with everyone, then mark it.',
+  },
+  'crew.emergency-plan': {
+    title: 'Emergency plan',
+    open: '{field}: not named. Fill it in in section 10.',
+  },
+  'crew.rescue-untrained': {
+    title: 'Nobody trained in rescue',
+    open: 'Nobody who stays free to help is trained in release from contact, CPR and AED. Bring someone who is, or mark who is.',
+  },
+  'window.too-long': {
+    title: 'More than 12 hours',
+    stop: 'The work is planned for more than 12 hours[ ({hours})]. Split it into worksheets of 12 hours or less.',
+  },
+  'window.reversed': {
+    title: 'Ends before it starts',
+    stop: 'The planned end is not after the start. Correct the times in section 1.',
+  },
+  'window.over': {
+    title: 'Planned end has passed',
+    stop: 'The planned end has passed. Close it or plan a new time.',
+  },
+  'window.shift-change': {
+    title: 'Shift change',
+    open: 'Whether the work runs into another shift, or who then takes over the locks and tests again, is not answered. Answer both in section 1.',
+  },
+  'lamp.line-voltage-lampholder': {
+    title: 'Lampholder at line voltage',
+    caution:
+      'Lampholders of double-ended tubes may be at line voltage or several hundred volts, and a wrong tube may shock or burst. Read the marking; power off for lamps too.',
+  },
+  'closeout.not-cleared': {
+    title: 'Not clear to restore',
+    stop: '{field} No. Clear the tools, warn everybody, see that everybody is clear, in this order, before any power returns.',
+    open: '{field} Not answered. Check it and answer before any power returns.',
+  },
+  'closeout.locks-left': {
+    title: 'Locks left',
+    open: 'Restored or left locked, and whether each lock is off, is not answered. Each lock comes off by its owner; then mark it.',
+    caution: 'It stays locked. Write in the notes who holds the locks.',
+  },
+  'closeout.covers-off': {
+    title: 'Covers off',
+    stop: 'Covers are off with the circuit energized. Put them on first; aiming or proving with covers off is energized work and needs a sheet of that kind.',
+    open: 'Whether all covers are back on is not answered. Look at each one, then answer.',
+  },
+  'closeout.egress-untested': {
+    title: 'Emergency lighting not tested',
+    open: 'The emergency lights are not tested after the work. Run them on battery for at least 30 s, or see them lit on their branch, and enter it.',
+  },
+  'job.construction': {
+    title: 'Construction rules apply',
+    caution:
+      'New and renovation work is construction: tag the deenergized circuit at every point where it can be energized. State plans and local codes may ask more.',
+  },
+  unanswered: {
+    title: 'Not answered',
+    open: '[{where}: ]“{field}” is not answered. Answer it in section {section}.',
+  },
+};

@@ -2,7 +2,9 @@ import { account } from './account';
 import { archive } from './archive';
 import { board } from './board';
 import { caution } from './caution';
+import { citations } from './citations';
 import { common } from './common';
+import { drawing } from './drawing';
 import { enumerations } from './enumerations';
 import { fields } from './fields';
 import { findings } from './findings';
@@ -29,7 +31,9 @@ export const en = {
   archive,
   board,
   caution,
+  citations,
   common,
+  drawing,
   enumerations,
   fields,
   findings,

@@ -1,1 +1,27 @@
-export const items = {};
+/** The name of every piece of required equipment; `{name}` comes from its params. */
+export const items = {
+  'rubber-insulating-gloves': 'Rubber insulating gloves[, class {class} or better]',
+  'leather-protectors': 'Leather protectors over the gloves',
+  'insulated-tools': 'Insulated tools',
+  'insulated-probes': 'Insulated test probes',
+  'safety-glasses': 'Glasses for eye protection',
+  'nonconductive-hard-hat': 'Nonconductive hard hat',
+  'nonmelting-clothing': 'Clothing that does not melt, underwear included',
+  'arc-rated-shirt-and-trousers':
+    'Arc-rated shirt and trousers, or coverall[, {rating:cal} or more]',
+  'hearing-protection': 'Hearing protection, ear canal inserts',
+  'leather-footwear': 'Leather footwear',
+  'arc-rated-face-shield-or-hood': 'Arc-rated face shield or suit hood[, {rating:cal} or more]',
+  'arc-rated-balaclava-or-hood': 'Arc-rated balaclava, or suit hood[, {rating:cal} or more]',
+  'arc-flash-suit-hood': 'Arc flash suit with hood[, {rating:cal} or more]',
+  'arc-rated-gloves': 'Arc-rated gloves, or rubber gloves with protectors[, {rating:cal} or more]',
+  'contact-tester': 'Contact tester with leads[, {category}][, {volts:V} or more][, {current}]',
+  'known-source': 'Known live source to prove the tester[, {current}]',
+  'clamp-ammeter': 'Clamp ammeter for the neutral',
+  'lock-and-tag': 'Lock and tag, one of each for everyone who works',
+  'written-lockout-procedure': 'Written lockout procedure, at hand',
+  'insulating-covers': 'Rubber blanket or cover for grounded metal',
+  'nonconductive-ladder': 'Nonconductive ladder',
+  'barricade-and-signs': 'Barricade and signs',
+  'work-light': 'Battery work light',
+};

@@ -215,8 +215,8 @@ export const enumerations: Words<typeof en> = {
     suspected: 'Hay sospecha',
   },
   overheadLines: {
-    'none within 10 ft': 'Ninguna a menos de 10\u00a0ft',
-    'nearer than 10 ft': 'A menos de 10\u00a0ft',
+    'none within 10 ft': 'Ninguna a menos de 10 ft',
+    'nearer than 10 ft': 'A menos de 10 ft',
   },
   closest: {
     'outside all boundaries': 'Fuera de todos los límites',
@@ -236,7 +236,7 @@ export const enumerations: Words<typeof en> = {
     'not discharged': 'Sin descargar',
   },
   conductor: { A: 'Fase A', B: 'Fase B', C: 'Fase C', N: 'Neutro', G: 'Tierra' },
-  current: { ac: 'CA', dc: 'CD' },
+  current: { ac: 'CA', dc: 'CD', 'ac and dc': 'CA y CD' },
   state: {
     draft: 'Borrador',
     briefing: 'Espera a la cuadrilla',

@@ -37,10 +37,10 @@ export const hints: Words<typeof en> = {
   'absenceTest.instrument': 'Un probador sin contacto nunca comprueba la ausencia de tensión.',
   'absenceTest.category': 'La menor entre medidor, cables y puntas.',
   'absenceTest.ratedVolts': 'La menor entre medidor, cables y puntas.',
-  'arcFlash.workingDistanceInches': 'Sobre la cabeza rara vez hay 18\u00a0in. Mídala.',
+  'arcFlash.workingDistanceInches': 'Sobre la cabeza rara vez hay 18 in. Mídala.',
   'arcFlash.label.ofThisEquipment': 'La etiqueta del tablero no es la de la luminaria.',
   'arcFlash.availableFaultKiloamperes': 'Del estudio o la compañía, o use el transformador.',
-  'arcFlash.clearingSeconds': '2 ciclos son 0.03\u00a0s, 20 son 0.33\u00a0s, 30 son 0.5\u00a0s.',
+  'arcFlash.clearingSeconds': '2 ciclos son 0.03 s, 20 son 0.33 s, 30 son 0.5 s.',
   'arcFlash.transformer.impedancePercent': 'El % Z de la placa.',
   'arcFlash.clothingRatingCalPerCm2': 'La menor de quien esté dentro del límite de arco.',
   'surroundings.groundedSurfaces':
@@ -48,7 +48,7 @@ export const hints: Words<typeof en> = {
   'surroundings.groundedSurfaces.keptClear':
     'Mangas abajo; cadera, brazo y cabeza lejos del metal.',
   'surroundings.ladder.standingLevelFeet':
-    'A lo más el tamaño menos 2\u00a0ft: nunca la tapa ni el peldaño de abajo.',
+    'A lo más el tamaño menos 2 ft: nunca la tapa ni el peldaño de abajo.',
   'surroundings.ceiling':
     'Recubrimiento rociado o con llana de 1980 o antes; balastro magnético sin la marca "No PCBs".',
   'surroundings.lightAdequate': 'Júzguelo con este circuito apagado.',
@@ -62,12 +62,12 @@ export const hints: Words<typeof en> = {
   'crew.rescueTrained': 'Liberar del contacto, RCP y DEA.',
   'briefing.emergency.rescue': 'Quién baja a la persona y cómo.',
   'proof.openedSources': 'Confirme cada una: abierta, asegurada como se planeó y probada.',
-  'proof.controlsOperated': '0\u00a0V detrás de un apagador abierto no comprueba nada.',
+  'proof.controlsOperated': '0 V detrás de un apagador abierto no comprueba nada.',
   'proof.otherLiveParts': 'Otro circuito, o zapatas de línea antes del principal.',
   'proof.neutralAmperes':
-    'Mida con gancho antes de abrir el neutro. Arriba de 0.1\u00a0A es compartido.',
+    'Mida con gancho antes de abrir el neutro. Arriba de 0.1 A es compartido.',
   'proof.storedEnergy': 'Driver, balastro, capacitor o salida de batería.',
   'closeOut.restored': 'No: queda con candado. Anote quién tiene los candados.',
   'closeOut.coversOn': 'Antes de energizar, aunque sea un momento.',
-  'closeOut.egressTestedSeconds': 'Al menos 30\u00a0s.',
+  'closeOut.egressTestedSeconds': 'Al menos 30 s.',
 };

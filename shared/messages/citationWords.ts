@@ -1,0 +1,34 @@
+import type { Citation } from '@/hazard/types';
+import type { Locale } from '../user';
+import { enumWord } from './enumWord';
+import { messages } from './languages';
+import { noBreak } from './template';
+
+/** Editions that say nothing to a reader: a regulation is the one in force. */
+const UNSAID_EDITIONS = ['', 'in force', '1', 'public report'];
+/** 29 CFR 1910.333: the part is printed once, in the section's own number. */
+const CODE_OF_REGULATIONS = /^(.* CFR )(\d+)$/;
+
+function placeOf({ standard, edition, table }: Citation, ownRule: string): string {
+  const part = CODE_OF_REGULATIONS.exec(standard);
+  if (part && table.startsWith(String(part[2]))) return `${part[1]}${table}`;
+  if (standard === 'Common practice') return table;
+  if (standard === 'Wideberth') return `${ownRule}: ${table}`;
+  if (UNSAID_EDITIONS.includes(edition)) return `${standard} ${table}`;
+  return standard === 'NFPA 70E'
+    ? `${standard}-${edition} ${table}`
+    : `${standard}, ${edition}, ${table}`;
+}
+
+/**
+ * Where a figure or a rule comes from and how it was checked:
+ * `NFPA 70E-2024 Table 130.5(C). From memory, to be checked`.
+ */
+export function citationWords(locale: Locale, citation: Citation): string {
+  const { citations } = messages(locale);
+  const place = citations.parts.reduce(
+    (text, { from, to }) => text.replaceAll(from, to),
+    placeOf(citation, citations.ownRule),
+  );
+  return noBreak(`${place}. ${enumWord(locale, 'confidence', citation.confidence)}`);
+}
