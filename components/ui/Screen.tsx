@@ -33,7 +33,7 @@ export interface ScreenProps {
   asideWidth?: number;
   /** `column` 756, `helper` 480, `full` everything. */
   width?: 'column' | 'helper' | 'full';
-  caution?: 'short' | 'full' | 'none';
+  caution?: 'short' | 'none';
   children?: ReactNode;
 }
 
@@ -91,7 +91,7 @@ export function Screen(props: ScreenProps) {
         {caution !== 'none' && (
           <View style={[styles.foot, { borderTopColor: colors.ink }]}>
             <View style={[styles.column, styles.footColumn, column]}>
-              <CautionFoot full={caution === 'full'} />
+              <CautionFoot />
             </View>
           </View>
         )}

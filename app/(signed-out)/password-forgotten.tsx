@@ -1,0 +1,5 @@
+import { PasswordForgottenScreen } from '@/components/account/PasswordForgottenScreen';
+
+export default function PasswordForgottenRoute() {
+  return <PasswordForgottenScreen />;
+}

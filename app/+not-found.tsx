@@ -1,0 +1,5 @@
+import { NotFoundScreen } from '@/components/ui';
+
+export default function NotFoundRoute() {
+  return <NotFoundScreen />;
+}

@@ -1,0 +1,2 @@
+/** On a phone app the navigator moves the focus. */
+export function usePageChange(): void {}
