@@ -118,13 +118,14 @@ const FEET_PATTERN =
   /^(?:(\d+(?:\.\d+)?)\s*(?:ft|feet|foot|pies?|'|′))?\s*(?:(\d+(?:\.\d+)?)\s*(?:in|inch|inches|pulg|pulgadas?|"|″)\.?)?$/i;
 const METRES_PATTERN = /^(\d+(?:\.\d+)?)\s*(mm|cm|m)$/i;
 const BARE_PATTERN = /^\d+(?:\.\d+)?$/;
-const INCHES_PER: Readonly<Record<string, number>> = {
+const INCHES_PER = {
   in: 1,
   ft: 12,
   m: 1 / METRES_PER_INCH,
   cm: 0.01 / METRES_PER_INCH,
   mm: 0.001 / METRES_PER_INCH,
-};
+} as const;
+type LengthUnit = keyof typeof INCHES_PER;
 
 /**
  * What somebody typed as a distance, in inches and unrounded: `3 ft 6 in`,
@@ -134,10 +135,12 @@ const INCHES_PER: Readonly<Record<string, number>> = {
 export function parseDistance(typed: string, bare: 'in' | 'ft' | 'm'): number | null {
   const entry = typed.replace(/[\s\u00a0]+/g, ' ').trim();
   if (entry === '') return null;
-  const inchesPer = (unit: string): number => INCHES_PER[unit] ?? NaN;
-  if (BARE_PATTERN.test(entry)) return Number(entry) * inchesPer(bare);
+  if (BARE_PATTERN.test(entry)) return Number(entry) * INCHES_PER[bare];
   const metric = METRES_PATTERN.exec(entry);
-  if (metric) return Number(metric[1]) * inchesPer(String(metric[2]).toLowerCase());
+  if (metric) {
+    const unit = String(metric[2]).toLowerCase() as LengthUnit;
+    return Number(metric[1]) * INCHES_PER[unit];
+  }
   const imperial = FEET_PATTERN.exec(entry);
   if (!imperial) return null;
   return Number(imperial[1] ?? 0) * 12 + Number(imperial[2] ?? 0);
