@@ -63,13 +63,13 @@ export function touchMilliamperes(
   edition: Edition = nfpa70e2024,
 ): TouchCurrent {
   const { rows, citation: source } = edition.bodyImpedance;
-  const last = rows[rows.length - 1] ?? rows[0];
-  requireBetween('volts', volts, rows[0].volts, last.volts);
+  const tops = rows.map((row) => row.volts);
+  requireBetween('volts', volts, Math.min(...tops), Math.max(...tops));
 
-  const aboveIndex = rows.findIndex((row) => row.volts >= volts);
-  const above = rows[aboveIndex] ?? last;
-  const below = rows[aboveIndex - 1] ?? above;
-  const share = below === above ? 0 : (volts - below.volts) / (above.volts - below.volts);
+  // The rows ascend: the last one at or below the voltage, and the first at or above it.
+  const below = rows.reduce((found, row) => (row.volts <= volts ? row : found));
+  const above = rows.reduceRight((found, row) => (row.volts >= volts ? row : found));
+  const share = (volts - below.volts) / (above.volts - below.volts || 1);
   const milliamperes = (of: 'p5' | 'p50' | 'p95') =>
     (1000 * volts) / (below[of] + share * (above[of] - below[of]));
   return {

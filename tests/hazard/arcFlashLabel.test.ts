@@ -141,6 +141,13 @@ describe('a label that does not hold', () => {
     ]);
   });
 
+  it('without a date of review is a caution, which leaves the figures', () => {
+    const answer = ask({ ppeCategory: 2, reviewedOn: undefined });
+    expect(answer).toMatchObject({ method: 'ppe category', findings: [{ severity: 'caution' }] });
+    // Without a day its age is not judged.
+    expect(ask({ ppeCategory: 2, reviewedOn: '1990-01-01' }).findings).toEqual([]);
+  });
+
   it('needs no working distance of its own for a category or a printed rating', () => {
     const label = { workingDistanceInches: undefined };
     expect(ask({ ...label, ppeCategory: 2 }).findings).toEqual([]);

@@ -1,10 +1,10 @@
 import fc from 'fast-check';
-import { bignumber, create, all } from 'mathjs';
+import { all, bignumber, create } from 'mathjs';
 import { describe, expect, it } from 'vitest';
 import { boltedFaultAmperes, loadAmperes, touchMilliamperes } from '@/hazard';
 
 /** An independent calculator, with decimal arithmetic of 64 digits. */
-const math = create(all, { number: 'BigNumber', precision: 64 });
+const math = create(all ?? {}, { number: 'BigNumber', precision: 64 });
 const calculate = (expression: string, scope: Record<string, number>) =>
   Number(
     math.evaluate(

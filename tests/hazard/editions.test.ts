@@ -150,6 +150,35 @@ describe('an edition', () => {
   });
 });
 
+describe('rows that all hold at once', () => {
+  // Row 2 of the invented edition: 20 kA, 0.03 s, 18 in, category 2; row 6: 15 kA, 0.02 s, 24 in, 4.
+  it.each(['luminaire', 'junction box'] as const)(
+    'bind with the narrowest of each limit, whatever their order: %s',
+    (equipment) => {
+      const ask = (kiloamperes: number, seconds: number, inches: number) =>
+        assessArcFlash(
+          {
+            task: 'energized work',
+            condition: 'normal',
+            equipment,
+            volts: 480,
+            availableFaultKiloamperes: kiloamperes,
+            clearingSeconds: seconds,
+            workingDistanceInches: inches,
+          },
+          inventedEdition,
+        );
+      expect(ask(15, 0.02, 24)).toMatchObject({
+        ppeCategory: 4,
+        arcFlashBoundary: { inches: 60, metres: 1.5 },
+      });
+      expect(ask(15.1, 0.02, 24).method).toBe('study needed');
+      expect(ask(15, 0.021, 24).method).toBe('study needed');
+      expect(ask(15, 0.02, 23.9).method).toBe('study needed');
+    },
+  );
+});
+
 describe('the lists of the face', () => {
   it('hold the tasks of the job in the order of their table', () => {
     expect(TASKS).toEqual([

@@ -46,6 +46,19 @@ export const inventedEdition: Edition = {
       ...nfpa70e2024.ppeCategories.rows,
       1: { ...nfpa70e2024.ppeCategories.rows[1], faultKiloamperes: 20 },
       2: { ...nfpa70e2024.ppeCategories.rows[2], faultKiloamperes: 20 },
+      // Stricter in its distance and category than row 2, which it is joined with.
+      6: {
+        ...nfpa70e2024.ppeCategories.rows[6],
+        faultKiloamperes: 15,
+        clearingSeconds: 0.02,
+        workingDistanceInches: 24,
+        category: 4,
+      },
+    },
+    choices: {
+      ...nfpa70e2024.ppeCategories.choices,
+      luminaire: [{ upToVolts: 600, rows: [2, 6] }],
+      'junction box': [{ upToVolts: 600, rows: [6, 2] }],
     },
   },
   labelReviewMonths: 12,
