@@ -1,0 +1,176 @@
+import { Router } from 'express';
+import type { Request, Response } from 'express';
+import {
+  answerSchema,
+  askSchema,
+  closeSchema,
+  copySchema,
+  createWorksheetSchema,
+  proveSchema,
+  reasonSchema,
+  saveWorksheetSchema,
+  signSchema,
+} from '@/shared/record';
+import { currentUser } from '../currentUser';
+import type { CurrentUser } from '../currentUser';
+import { requireUser } from '../middleware/requireUser';
+import type { Worksheet } from '../models/Worksheet';
+import { parse, parseId } from '../parse';
+import {
+  isCrew,
+  isLead,
+  mayCreate,
+  mayReturn,
+  maySign,
+  mayStop,
+  mayVoid,
+} from '../policies/worksheet';
+import {
+  presentProof,
+  presentQuestion,
+  presentSignature,
+  presentWorksheet,
+} from '../presenters/worksheet';
+import { presentWorksheetRow } from '../presenters/worksheetRow';
+import { notAllowed, preconditionRequired } from '../problem';
+import { answerQuestion, findQuestion } from '../services/answerQuestion';
+import { askQuestion } from '../services/askQuestion';
+import type { ReasonedService } from '../services/changeState';
+import { closeWorksheet } from '../services/closeWorksheet';
+import { copyWorksheet } from '../services/copyWorksheet';
+import { createWorksheet } from '../services/createWorksheet';
+import { findWorksheet } from '../services/findWorksheet';
+import { listWorksheets, worksheetListSchema } from '../services/listWorksheets';
+import { proveWorksheet } from '../services/proveWorksheet';
+import { loadParts, loadPeople } from '../services/readRecord';
+import { loadRowParts } from '../services/readRows';
+import { returnWorksheet } from '../services/returnWorksheet';
+import { reviseWorksheet } from '../services/reviseWorksheet';
+import { saveWorksheet } from '../services/saveWorksheet';
+import { signWorksheet } from '../services/signWorksheet';
+import { stopWorksheet } from '../services/stopWorksheet';
+import { voidWorksheet } from '../services/voidWorksheet';
+
+export const worksheetsRouter = Router();
+worksheetsRouter.use(requireUser);
+
+type Policy = (person: CurrentUser, worksheet: Worksheet) => boolean;
+
+/** The worksheet of the path, for an act: 404 where it is not visible, 403 where the relation does not fit. */
+async function worksheetFor(req: Request, may: Policy = () => true) {
+  const actor = currentUser(req);
+  const worksheet = await findWorksheet(actor, parseId(req.params['worksheetId']));
+  if (!may(actor, worksheet)) throw notAllowed();
+  return { actor, worksheet };
+}
+
+async function sendWorksheet(
+  res: Response,
+  actor: CurrentUser,
+  worksheet: Worksheet,
+  status = 200,
+) {
+  const record = presentWorksheet(actor, await loadParts(worksheet));
+  res.status(status).setHeader('ETag', `"${record.version}"`);
+  if (status === 201) res.location(`/api/worksheets/${record.id}`);
+  res.json(record);
+}
+
+/** The version in `If-Match: "3"`; what names no version of ours matches none. */
+function versionOf(req: Request): number {
+  const header = req.get('If-Match');
+  if (header === undefined) throw preconditionRequired();
+  const version = /^\s*(?:W\/)?"(\d{1,9})"\s*$/.exec(header)?.[1];
+  return version === undefined ? -1 : Number(version);
+}
+
+worksheetsRouter.get('/', async (req, res) => {
+  const query = parse(worksheetListSchema, req.query);
+  const { rows, nextCursor } = await listWorksheets(currentUser(req), query);
+  res.json({ items: (await loadRowParts(rows)).map(presentWorksheetRow), nextCursor });
+});
+
+worksheetsRouter.post('/', async (req, res) => {
+  const actor = currentUser(req);
+  if (!mayCreate(actor)) throw notAllowed();
+  const body = parse(createWorksheetSchema, req.body);
+  const { worksheet, created } = await createWorksheet(actor, body);
+  await sendWorksheet(res, actor, worksheet, created ? 201 : 200);
+});
+
+worksheetsRouter.get('/:worksheetId', async (req, res) => {
+  const { actor, worksheet } = await worksheetFor(req);
+  await sendWorksheet(res, actor, worksheet);
+});
+
+worksheetsRouter.put('/:worksheetId', async (req, res) => {
+  const { actor, worksheet } = await worksheetFor(req, isLead);
+  const version = versionOf(req);
+  const { content } = parse(saveWorksheetSchema, req.body);
+  const saved = await saveWorksheet(actor, { worksheetId: worksheet.id, version, content });
+  await sendWorksheet(res, actor, saved);
+});
+
+worksheetsRouter.post('/:worksheetId/signatures', async (req, res) => {
+  const { actor, worksheet } = await worksheetFor(req, maySign);
+  const body = parse(signSchema, req.body);
+  const { signature, created } = await signWorksheet(actor, worksheet, body);
+  const people = await loadPeople([signature.enteredById]);
+  res.status(created ? 201 : 200).json(presentSignature(signature, people));
+});
+
+worksheetsRouter.post('/:worksheetId/proofs', async (req, res) => {
+  const { actor, worksheet } = await worksheetFor(req, isLead);
+  const body = parse(proveSchema, req.body);
+  const { row, created } = await proveWorksheet(actor, worksheet, body);
+  res.status(created ? 201 : 200).json(presentProof(row));
+});
+
+worksheetsRouter.post('/:worksheetId/questions', async (req, res) => {
+  const { actor, worksheet } = await worksheetFor(req, isCrew);
+  const body = parse(askSchema, req.body);
+  const { row, created } = await askQuestion(actor, worksheet, body);
+  const people = await loadPeople([row.askedById, row.answeredById]);
+  res.status(created ? 201 : 200).json(presentQuestion(row, people));
+});
+
+worksheetsRouter.post('/:worksheetId/questions/:questionId/answer', async (req, res) => {
+  const { actor, worksheet } = await worksheetFor(req);
+  const { id: questionId } = await findQuestion(worksheet.id, parseId(req.params.questionId));
+  if (!isLead(actor, worksheet)) throw notAllowed();
+  const body = parse(answerSchema, req.body);
+  const { row, created } = await answerQuestion(actor, worksheet, { questionId, ...body });
+  const people = await loadPeople([row.askedById, row.answeredById]);
+  res.status(created ? 201 : 200).json(presentQuestion(row, people));
+});
+
+const reasonedActs: [string, Policy, ReasonedService][] = [
+  ['return', mayReturn, returnWorksheet],
+  ['stop', mayStop, stopWorksheet],
+  ['void', mayVoid, voidWorksheet],
+];
+for (const [act, may, service] of reasonedActs) {
+  worksheetsRouter.post(`/:worksheetId/${act}`, async (req, res) => {
+    const { actor, worksheet } = await worksheetFor(req, may);
+    const { reason } = parse(reasonSchema, req.body);
+    await sendWorksheet(res, actor, await service(actor, { worksheetId: worksheet.id, reason }));
+  });
+}
+
+worksheetsRouter.post('/:worksheetId/revise', async (req, res) => {
+  const { actor, worksheet } = await worksheetFor(req, isLead);
+  await sendWorksheet(res, actor, await reviseWorksheet(actor, worksheet.id));
+});
+
+worksheetsRouter.post('/:worksheetId/close', async (req, res) => {
+  const { actor, worksheet } = await worksheetFor(req, isLead);
+  const body = parse(closeSchema, req.body);
+  await sendWorksheet(res, actor, await closeWorksheet(actor, worksheet, body));
+});
+
+worksheetsRouter.post('/:worksheetId/copy', async (req, res) => {
+  const { actor, worksheet } = await worksheetFor(req, isLead);
+  const { id } = parse(copySchema, req.body ?? {});
+  const { worksheet: copy, created } = await copyWorksheet(actor, { worksheet, id });
+  await sendWorksheet(res, actor, copy, created ? 201 : 200);
+});

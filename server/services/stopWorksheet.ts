@@ -1,0 +1,20 @@
+import { actOn, changeState } from './changeState';
+import type { ReasonedService } from './changeState';
+import { notify, supervisorsOf } from './notify';
+
+/** Anyone named on it, or a supervisor of the site, stops the work. Everybody else on it is told. */
+export const stopWorksheet: ReasonedService = (actor, { worksheetId, reason }) =>
+  actOn(worksheetId, 'stop', async (worksheet, transaction) => {
+    const event = await changeState(transaction, {
+      worksheet,
+      to: 'stopped',
+      type: 'stopped',
+      actorId: actor.id,
+      reason,
+    });
+    const named = [worksheet.leadId, ...worksheet.crewIds];
+    const supervisors = await supervisorsOf(worksheet, transaction);
+    const recipientIds = [...named, ...supervisors].filter((id) => id !== actor.id);
+    await notify(transaction, { event, news: 'stopped', worksheet, recipientIds, reason });
+    return worksheet;
+  });
