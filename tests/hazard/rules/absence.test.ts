@@ -1,8 +1,9 @@
+import { it } from 'vitest';
+import { READ_AT } from '../../support/ruleEdits';
 import type { Edits, RuleRow } from '../../support/ruleTable';
 import { describeRule, eachValue, gone, onEach } from '../../support/ruleTable';
 import { zeroReadings } from '../../support/soundWorksheet';
 
-const AT = '2026-12-01T08:50:00-06:00';
 /** A seventh reading, of a pair that is complete without it. */
 const SEVENTH = 'proof/readings/6';
 const reading = (volts: unknown, others: object = {}) => ({
@@ -11,7 +12,7 @@ const reading = (volts: unknown, others: object = {}) => ({
   to: 'G',
   volts,
   current: 'ac',
-  at: AT,
+  at: READ_AT,
   ...others,
 });
 const BATTERY = {
@@ -40,7 +41,7 @@ const ofSource = (sourceId: string, point: string, to: string, others: object = 
   sourceId,
   volts: 0,
   current: 'ac',
-  at: AT,
+  at: READ_AT,
   ...others,
 });
 

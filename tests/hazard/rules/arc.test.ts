@@ -1,5 +1,6 @@
 import { describe, expect, it } from 'vitest';
-import type { Edits, RuleRow } from '../../support/ruleTable';
+import { BELOW_FIFTY, CIRCUIT_277, FAR } from '../../support/ruleEdits';
+import type { Edits } from '../../support/ruleTable';
 import {
   ALL,
   assessBase,
@@ -10,16 +11,6 @@ import {
   onEach,
 } from '../../support/ruleTable';
 
-const BELOW_FIFTY: Edits = {
-  'decision/reason': 'below 50 V',
-  'supply/workVolts': 24,
-  'supply/higherVoltsExposed': false,
-};
-const FAR: Edits = {
-  'job/task': 'inspect',
-  'arcFlash/task': 'thermography or inspection outside restricted',
-  'crew/0/closest': 'outside all boundaries',
-};
 const LABEL = {
   ofThisEquipment: true,
   systemVolts: 208,
@@ -35,12 +26,6 @@ const labelled = (label: object, others: Edits = {}): Edits => ({
   'arcFlash/clothingRatingCalPerCm2': 40,
   ...others,
 });
-const F480: Edits = {
-  'supply/system': '480Y/277',
-  'supply/circuitVolts': 277,
-  'supply/readings': gone,
-  'supply/conductorColors': gone,
-};
 
 const LIMITS: [string, string, unknown[], unknown[]][] = [
   ['arcFlash/availableFaultKiloamperes', '25 kA', [0.1, 25], [25.1, 65]],
@@ -301,8 +286,8 @@ describeRule('arc.rating-low', '70E 130.5(G), 130.7(C)(15)(c)', [
   ...eachValue(ALL, CLOTHING, [4, 40], []),
   ...eachValue(ALL, CLOTHING, [3.9, 0], ['stop /arcFlash/clothingRatingCalPerCm2']),
   ...eachValue(ALL, CLOTHING, [gone, '', NaN, -8], ['open /arcFlash/clothingRatingCalPerCm2']),
-  ...eachValue(ALL, CLOTHING, [8], [], [], F480),
-  ...eachValue(ALL, CLOTHING, [7.9], ['stop /arcFlash/clothingRatingCalPerCm2'], [], F480),
+  ...eachValue(ALL, CLOTHING, [8], [], [], CIRCUIT_277),
+  ...eachValue(ALL, CLOTHING, [7.9], ['stop /arcFlash/clothingRatingCalPerCm2'], [], CIRCUIT_277),
   ...onEach(ALL, 'the energy of the label', labelled(LABEL, { [CLOTHING]: 3 }), []),
   ...onEach(ALL, 'below the energy of the label', labelled(LABEL, { [CLOTHING]: 2.9 }), [
     'stop /arcFlash/clothingRatingCalPerCm2',
@@ -513,7 +498,7 @@ describeRule('arc.bystander-inside', '70E 130.5, 130.7', [
     ...WIDE,
     'supply/movableConductors': true,
   }),
-  ...eachValue(ALL, CLOSEST, ['outside limited'], ['stop /crew/1*'], [], F480),
+  ...eachValue(ALL, CLOSEST, ['outside limited'], ['stop /crew/1*'], [], CIRCUIT_277),
   ...eachValue(ALL, CLOSEST, ['outside all boundaries'], [], [], WIDE),
   ...onEach(ALL, 'the lead himself', { 'crew/0/arcRated': false }, ['stop /crew/0*']),
   ...onEach(

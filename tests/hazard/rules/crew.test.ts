@@ -1,13 +1,12 @@
 import { BRIEFING_TOPICS } from '@/hazard';
+import { BELOW_FIFTY } from '../../support/ruleEdits';
 import type { Edits, RuleRow } from '../../support/ruleTable';
 import { ALL, describeRule, eachValue, ENERGIZED, gone, onEach } from '../../support/ruleTable';
 
-const BELOW_FIFTY: Edits = {
-  'decision/reason': 'below 50 V',
-  'supply/workVolts': 24,
-  'supply/higherVoltsExposed': false,
+const SECOND_QUALIFIED: Edits = {
+  'crew/1/qualified': true,
+  'crew/1/qualifiedThrough': '2028-01-01',
 };
-const QUALIFIED: Edits = { 'crew/1/qualified': true, 'crew/1/qualifiedThrough': '2028-01-01' };
 
 describeRule('crew.lead-unqualified', '1910.332(b)(3), 1910.333(c)(2)', [
   ...onEach(ALL, 'one qualified lead', {}, []),
@@ -43,7 +42,7 @@ describeRule('crew.lead-unqualified', '1910.332(b)(3), 1910.333(c)(2)', [
   ...onEach(
     ALL,
     'two leads',
-    { ...QUALIFIED, 'crew/1/lead': true },
+    { ...SECOND_QUALIFIED, 'crew/1/lead': true },
     ['open'],
     ['crew.rescue-untrained', 'shock.*', 'arc.*'],
   ),

@@ -1,15 +1,11 @@
 import { describe, expect, it } from 'vitest';
 import { JOB_TASKS, REASONS } from '@/hazard';
+import { BELOW_FIFTY } from '../../support/ruleEdits';
 import type { Edits, RuleRow } from '../../support/ruleTable';
 import { assessBase, describeRule, eachValue, found, gone, onEach } from '../../support/ruleTable';
 
 const TESTING = ['trace circuit', 'test or troubleshoot', 'inspect', 'thermography'];
 const REPAIR = JOB_TASKS.filter((task) => !TESTING.includes(task));
-const BELOW_FIFTY: Edits = {
-  'decision/reason': 'below 50 V',
-  'supply/workVolts': 24,
-  'supply/higherVoltsExposed': false,
-};
 
 function admitted(task: string, reason: string): boolean {
   if (TESTING.includes(task)) return reason !== 'additional hazard';

@@ -1,13 +1,8 @@
-import type { Edits } from '../../support/ruleTable';
+import { BELOW_FIFTY } from '../../support/ruleEdits';
 import { describeRule, eachValue, gone, onEach } from '../../support/ruleTable';
 
 const UNTIL = 'decision/permit/validUntil';
 const BY = 'decision/permit/approvedBy';
-const BELOW_FIFTY: Edits = {
-  'decision/reason': 'below 50 V',
-  'supply/workVolts': 24,
-  'supply/higherVoltsExposed': false,
-};
 
 describeRule('permit.missing', '70E 130.2; who approves: own policy', [
   ...onEach(['W', 'W work'], 'complete', {}, []),

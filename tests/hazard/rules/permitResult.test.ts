@@ -1,18 +1,9 @@
 import { describe, expect, it } from 'vitest';
 import { JOB_TASKS } from '@/hazard';
+import { BELOW_FIFTY, FAR } from '../../support/ruleEdits';
 import type { Base, Edits } from '../../support/ruleTable';
 import { assessBase, gone } from '../../support/ruleTable';
 
-const BELOW_FIFTY: Edits = {
-  'decision/reason': 'below 50 V',
-  'supply/workVolts': 24,
-  'supply/higherVoltsExposed': false,
-};
-const FAR: Edits = {
-  'job/task': 'inspect',
-  'arcFlash/task': 'thermography or inspection outside restricted',
-  'crew/0/closest': 'outside all boundaries',
-};
 /** The same inspection for a reason that makes it a worksheet of the W path. */
 const FAR_W: Edits = {
   ...FAR,

@@ -1,18 +1,9 @@
 import { describe, expect, it } from 'vitest';
 import { JOB_TASKS } from '@/hazard';
+import { BELOW_FIFTY, CIRCUIT_277, FAR } from '../../support/ruleEdits';
 import type { Base, Edits } from '../../support/ruleTable';
 import { assessBase, gone } from '../../support/ruleTable';
 
-const BELOW_FIFTY: Edits = {
-  'decision/reason': 'below 50 V',
-  'supply/workVolts': 24,
-  'supply/higherVoltsExposed': false,
-};
-const FAR: Edits = {
-  'job/task': 'inspect',
-  'arcFlash/task': 'thermography or inspection outside restricted',
-  'crew/0/closest': 'outside all boundaries',
-};
 const INSIDE_LIMITED: Edits = { ...FAR, 'crew/0/closest': 'limited' };
 const LABEL = {
   ofThisEquipment: true,
@@ -33,12 +24,6 @@ const category = (ppeCategory: number): Edits => ({
   'arcFlash/label': { ...LABEL, ppeCategory },
   'arcFlash/clothingRatingCalPerCm2': 40,
 });
-const F480: Edits = {
-  'supply/system': '480Y/277',
-  'supply/circuitVolts': 277,
-  'supply/readings': gone,
-  'supply/conductorColors': gone,
-};
 const SURFACE = 'surroundings/groundedSurfaces/0/covered';
 
 const ids = (base: Base, edits: Edits = {}) =>
@@ -73,7 +58,7 @@ const ARC_ROWS: Row[] = ARC.flatMap((id): Row[] => [
   [id, 'O', {}, true],
   [id, 'T', {}, true],
   [id, 'W', {}, true],
-  [id, 'W', F480, true],
+  [id, 'W', CIRCUIT_277, true],
   [id, 'O', category(1), true],
   [id, 'O', category(2), true],
   [id, 'O', energy(1.1), false],
@@ -85,8 +70,8 @@ const ARC_ROWS: Row[] = ARC.flatMap((id): Row[] => [
 ]);
 const HOOD: Row[] = [
   ['O', {}, false],
-  ['O', F480, true],
-  ['W', F480, true],
+  ['O', CIRCUIT_277, true],
+  ['W', CIRCUIT_277, true],
   ['O', category(1), false],
   ['O', category(2), true],
   ['O', energy(1.1), false],
@@ -176,12 +161,12 @@ describe('what must be at hand (1910.335; 70E Tables 130.5(G), 130.7(C)(15)(c))'
 
   it('names the glove class that is enough', () => {
     expect(param('O', 'rubber-insulating-gloves')).toContain('00');
-    expect(param('W', 'rubber-insulating-gloves', F480)).toContain('00');
+    expect(param('W', 'rubber-insulating-gloves', CIRCUIT_277)).toContain('00');
   });
 
   it('names the arc rating', () => {
     expect(param('O', 'arc-rated-shirt-and-trousers')).toContain(4);
-    expect(param('O', 'arc-rated-shirt-and-trousers', F480)).toContain(8);
+    expect(param('O', 'arc-rated-shirt-and-trousers', CIRCUIT_277)).toContain(8);
     expect(param('O', 'arc-rated-shirt-and-trousers', energy(9.5))).toContain(9.5);
   });
 
@@ -204,7 +189,7 @@ describe('what must be at hand (1910.335; 70E Tables 130.5(G), 130.7(C)(15)(c))'
 
   it('cites where each item comes from', () => {
     for (const base of ['O', 'T', 'W'] as const) {
-      for (const { citation, id } of assessBase(base, F480).equipment) {
+      for (const { citation, id } of assessBase(base, CIRCUIT_277).equipment) {
         expect(citation.confidence, id).toBeTruthy();
         expect(citation.standard, id).toBeTruthy();
       }

@@ -1,15 +1,11 @@
 import { describe, expect, it } from 'vitest';
+import { CIRCUIT_277, READ_AT } from '../../support/ruleEdits';
 import type { Edits } from '../../support/ruleTable';
 import { assessBase, gone, unsettled } from '../../support/ruleTable';
 import { zeroReadings } from '../../support/soundWorksheet';
 
-const F480: Edits = {
-  'supply/system': '480Y/277',
-  'supply/circuitVolts': 277,
-  'supply/readings': gone,
-  'supply/conductorColors': ['brown', 'gray'],
-};
-const AT = '2026-12-01T08:50:00-06:00';
+const BROWN_277: Edits = { ...CIRCUIT_277, 'supply/conductorColors': ['brown', 'gray'] };
+
 const codes = (entries: string[]) => entries.map((entry) => entry.split(' ').slice(0, 2).join(' '));
 
 describe('the cases behind the rules (public fatality investigations)', () => {
@@ -28,7 +24,14 @@ describe('the cases behind the rules (public fatality investigations)', () => {
   it('04WA080: the emergency source is found by the readings', () => {
     const result = assessBase('O work', {
       'proof/controlsOperated': false,
-      'proof/readings/6': { point: 'A1', from: 'B', to: 'G', volts: 118, current: 'ac', at: AT },
+      'proof/readings/6': {
+        point: 'A1',
+        from: 'B',
+        to: 'G',
+        volts: 118,
+        current: 'ac',
+        at: READ_AT,
+      },
     });
     expect(codes(unsettled(result))).toEqual([
       'stop absence.voltage-present',
@@ -39,13 +42,13 @@ describe('the cases behind the rules (public fatality investigations)', () => {
   it('86-35: 277 V with the polarity reversed, the white wire never read to ground', () => {
     const readings = zeroReadings(['A1', 'A2'], ['B', 'N', 'G']);
     const unread = readings.filter(({ from, to }) => !(from === 'N' && to === 'G'));
-    const silent = assessBase('O work', { ...F480, 'proof/readings': unread });
+    const silent = assessBase('O work', { ...BROWN_277, 'proof/readings': unread });
     expect(codes(unsettled(silent))).toEqual([
       'open absence.pairs-missing',
       'open absence.pairs-missing',
     ]);
     const read = readings.map((entry) => (entry.from === 'N' ? { ...entry, volts: 277 } : entry));
-    const live = assessBase('O work', { ...F480, 'proof/readings': read });
+    const live = assessBase('O work', { ...BROWN_277, 'proof/readings': read });
     expect(codes(unsettled(live))).toEqual([
       'stop absence.voltage-present',
       'stop absence.voltage-present',
@@ -57,7 +60,14 @@ describe('the cases behind the rules (public fatality investigations)', () => {
       'job/task': 'replace driver or ballast',
       'job/lamps': 'double-ended',
       'proof/storedEnergy': 'not discharged',
-      'proof/readings/6': { point: 'A1', from: 'B', to: 'G', volts: 400, current: 'dc', at: AT },
+      'proof/readings/6': {
+        point: 'A1',
+        from: 'B',
+        to: 'G',
+        volts: 400,
+        current: 'dc',
+        at: READ_AT,
+      },
     });
     expect(codes(unsettled(result))).toEqual([
       'open sources.stored-energy',
@@ -82,7 +92,7 @@ describe('the cases behind the rules (public fatality investigations)', () => {
 
   it('94MD022: 277 V, alone, in an emergency corridor', () => {
     const result = assessBase('W', {
-      ...F480,
+      ...BROWN_277,
       'crew/1': gone,
       'decision/hazard': 'illumination',
       'decision/temporaryLight': 'possible',
@@ -95,7 +105,7 @@ describe('the cases behind the rules (public fatality investigations)', () => {
   });
 
   it('92NJ007: a new luminaire on a live 277 V circuit', () => {
-    const result = assessBase('W', { ...F480, 'job/task': 'add or extend circuit' });
+    const result = assessBase('W', { ...BROWN_277, 'job/task': 'add or extend circuit' });
     expect(codes(unsettled(result))).toEqual(['stop decision.unjustified']);
   });
 });

@@ -1,17 +1,10 @@
+import { BELOW_FIFTY, FAR } from '../../support/ruleEdits';
 import type { Edits, RuleRow } from '../../support/ruleTable';
 import { ALL, describeRule, eachValue, ENERGIZED, gone, onEach } from '../../support/ruleTable';
 
-const BELOW_FIFTY: Edits = {
-  'decision/reason': 'below 50 V',
-  'supply/workVolts': 24,
-  'supply/higherVoltsExposed': false,
-};
-const QUALIFIED: Edits = { 'crew/1/qualified': true, 'crew/1/qualifiedThrough': '2028-01-01' };
-/** Nobody enters the restricted boundary: an inspection from outside, covers on. */
-const FAR: Edits = {
-  'job/task': 'inspect',
-  'arcFlash/task': 'thermography or inspection outside restricted',
-  'crew/0/closest': 'outside all boundaries',
+const SECOND_QUALIFIED: Edits = {
+  'crew/1/qualified': true,
+  'crew/1/qualifiedThrough': '2028-01-01',
 };
 const GLOVES = 'protectiveEquipment/gloves';
 const SET = {
@@ -49,14 +42,14 @@ describeRule('shock.unqualified-inside', '70E 130.4', [
   ...onEach(
     ALL,
     'qualified',
-    { ...QUALIFIED, 'crew/1/closest': 'limited', 'crew/1/arcRated': true },
+    { ...SECOND_QUALIFIED, 'crew/1/closest': 'limited', 'crew/1/arcRated': true },
     [],
   ),
   ...onEach(
     ALL,
     'training lapsed',
     {
-      ...QUALIFIED,
+      ...SECOND_QUALIFIED,
       'crew/1/qualifiedThrough': '2026-11-30',
       'crew/1/closest': 'limited',
       'crew/1/arcRated': true,
@@ -102,14 +95,19 @@ describeRule('shock.gloves-missing', '1910.137, 1910.335(a)(1)', [
   ...onEach(
     ALL,
     'two inside, one set',
-    { ...QUALIFIED, 'crew/1/closest': 'restricted', 'crew/1/arcRated': true },
+    { ...SECOND_QUALIFIED, 'crew/1/closest': 'restricted', 'crew/1/arcRated': true },
     ['stop'],
     ['crew.rescue-untrained'],
   ),
   ...onEach(
     ALL,
     'two inside, a set of the crew and a shared one',
-    { ...QUALIFIED, 'crew/1/closest': 'restricted', 'crew/1/arcRated': true, 'crew/1/gloves': SET },
+    {
+      ...SECOND_QUALIFIED,
+      'crew/1/closest': 'restricted',
+      'crew/1/arcRated': true,
+      'crew/1/gloves': SET,
+    },
     [],
     ['crew.rescue-untrained'],
   ),

@@ -1,15 +1,9 @@
 import { JOB_TASKS } from '@/hazard';
+import { HELD_BY_LEAD } from '../../support/ruleEdits';
 import type { Base, Edits, RuleRow } from '../../support/ruleTable';
 import { ALL, describeRule, eachValue, ENERGIZED, gone, onEach } from '../../support/ruleTable';
 import { zeroReadings } from '../../support/soundWorksheet';
 
-const HELD = {
-  openedAt: 'breaker',
-  held: 'lock and tag',
-  lockNumber: '12',
-  lockedBy: ['c1'],
-  byCrewId: 'c1',
-};
 const BATTERY = {
   id: 'b1',
   kind: 'battery unit',
@@ -23,16 +17,22 @@ const INVERTER = {
   kind: 'central inverter',
   from: 'Inverter room',
   sameConductorsAs: 's1',
-  ...HELD,
+  ...HELD_BY_LEAD,
 };
-const CONTROL = { id: 'k1', kind: 'control', from: 'LC-2', sameConductorsAs: 's1', ...HELD };
+const CONTROL = {
+  id: 'k1',
+  kind: 'control',
+  from: 'LC-2',
+  sameConductorsAs: 's1',
+  ...HELD_BY_LEAD,
+};
 const SHARED_NEUTRAL = {
   id: 'n1',
   kind: 'shared neutral',
   from: 'LA-1 ckt 9, 11',
   sameConductorsAs: 's1',
   allPhasesOpened: true,
-  ...HELD,
+  ...HELD_BY_LEAD,
 };
 /** One source only, and nothing that asks for another. */
 const ALONE: Edits = {
@@ -268,7 +268,7 @@ describeRule('sources.battery-connected', 'common practice; 1910.333(b)(2)(ii)(B
   ...['breaker', 'disconnect', 'wall switch', 'plug', 'none'].map((openedAt): RuleRow => [
     'O',
     `opened at ${openedAt}`,
-    { 'sources/3': { ...BATTERY, ...HELD, openedAt } },
+    { 'sources/3': { ...BATTERY, ...HELD_BY_LEAD, openedAt } },
     ['stop /sources/3/openedAt'],
     openedAt === 'wall switch' ? ['sources.switch-only'] : [],
   ]),

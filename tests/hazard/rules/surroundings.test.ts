@@ -1,12 +1,8 @@
 import { JOB_TASKS } from '@/hazard';
+import { BELOW_FIFTY } from '../../support/ruleEdits';
 import type { Edits, RuleRow } from '../../support/ruleTable';
 import { ALL, describeRule, eachValue, ENERGIZED, gone, onEach } from '../../support/ruleTable';
 
-const BELOW_FIFTY: Edits = {
-  'decision/reason': 'below 50 V',
-  'supply/workVolts': 24,
-  'supply/higherVoltsExposed': false,
-};
 const ACCESS = 'surroundings/access';
 const LADDER = 'surroundings/ladder';
 const EXTENSION: Edits = { [ACCESS]: 'extension ladder' };

@@ -1,16 +1,12 @@
 import { describe, expect, it } from 'vitest';
 import { assess } from '@/hazard';
+import { BELOW_FIFTY } from '../../support/ruleEdits';
 import type { Base, Edits } from '../../support/ruleTable';
 import { assessBase, assessed, edited, gone, unsettled } from '../../support/ruleTable';
 import { withPath } from '../../support/soundWorksheet';
 
 const ON = '2026-12-01T09:00:00-06:00';
 const ALL: Base[] = ['O', 'T', 'W'];
-const BELOW_FIFTY: Edits = {
-  'decision/reason': 'below 50 V',
-  'supply/workVolts': 24,
-  'supply/higherVoltsExposed': false,
-};
 
 describe('an empty worksheet is open and holds no stop (convention 2)', () => {
   it.each([
