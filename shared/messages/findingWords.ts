@@ -1,4 +1,4 @@
-import type { Finding, RequiredItem } from '@/hazard/types';
+import type { Finding, RequiredItem, Severity } from '@/hazard/types';
 import { dateText, list } from '../format';
 import type { Locale, Units } from '../user';
 import { enumWord, isEnumGroup } from './enumWord';
@@ -187,6 +187,22 @@ function entryOf(locale: Locale, code: string): Entry {
 }
 
 /**
+ * The sentence of a severity. Where one rule asks for several things it has one
+ * for each limit that was passed, or for each field that it leads to.
+ */
+function sentenceOf(entry: Entry, severity: Severity, path: string, params: Params): string {
+  const field = steps(path)
+    .filter((step) => !/^\d+$/.test(step))
+    .at(-1);
+  return (
+    entry[`${severity}:${String(params['limit'])}`] ??
+    entry[`${severity}/${String(field)}`] ??
+    entry[severity] ??
+    ''
+  );
+}
+
+/**
  * A finding in words: a title for lists, and a sentence that says what is so and
  * then what to do. Params that the finding does not carry leave no hole.
  */
@@ -198,8 +214,7 @@ export function findingWords(
   const { code, severity, path, params } = finding;
   const entry = entryOf(locale, code);
   const reader = new Reader(locale, units, params, path);
-  const byReason = entry[`${severity}:${String(params['reason'])}`];
-  const sentence = byReason ?? entry[severity] ?? '';
+  const sentence = sentenceOf(entry, severity, path, params);
   return {
     title: entry['title'] ?? code,
     text: noBreak(fill(sentence, reader.resolve, reader.fallback)),

@@ -49,6 +49,12 @@ function upperFirst(text: string): string {
 type Figure = (locale: Locale, value: number, units: Units) => string;
 const FEET_TO_INCHES = 12;
 
+/** What somebody typed; in metres also as feet, to be held against a limit printed in feet. */
+function inBoth(inches: number, units: Units): string {
+  const inFeet = format.typedDistance(inches, 'feet');
+  return units === 'metric' ? `${format.typedDistance(inches, units)} (${inFeet})` : inFeet;
+}
+
 const FIGURES: Readonly<Record<string, Figure>> = {
   V: format.volts,
   A: format.amperes,
@@ -57,8 +63,10 @@ const FIGURES: Readonly<Record<string, Figure>> = {
   cal: format.calories,
   reading: format.reading,
   hours: (locale, value) => format.quantity(locale, value, 'h', 1),
-  inches: (_, value, units) => format.typedDistance(value, units),
-  feet: (_, value, units) => format.typedDistance(value * FEET_TO_INCHES, units),
+  inches: (_, value, units) => inBoth(value, units),
+  feet: (_, value, units) => inBoth(value * FEET_TO_INCHES, units),
+  /* A printed limit: its metres are another printed figure, so they are not worked out here. */
+  least: (_, value) => format.feetAndInches(value),
 };
 
 /** A figure with the unit that its sentence names; a plain number without one. */

@@ -158,7 +158,7 @@ export const common = {
     person_number: (n: number) => `Person ${n} of the crew`,
     point: 'A point of work',
     point_number: (n: number) => `Point of work ${n}`,
-    reading: 'Voltage',
+    volts: 'Voltage',
     pair: (from: string, to: string) => `${from} to ${to}`,
     item: 'A piece of equipment',
     topic: 'a topic',

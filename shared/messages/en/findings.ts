@@ -11,12 +11,12 @@ export const findings = {
   },
   'supply.voltage-not-of-system': {
     title: 'Circuit voltage does not fit the system',
-    stop: '[{volts} ]is no circuit voltage of this system[ ({system})]. Correct the system or the voltage; 120 V beside 480Y/277 V comes from a transformer and is a system of its own.',
+    stop: '[{volts:V} ]is no circuit voltage of this system[ ({system})]. Correct the system or the voltage; 120 V beside 480Y/277 V comes from a transformer and is a system of its own.',
     open: 'System and circuit voltage cannot be compared yet. Read both off the panel and answer in section 2.',
   },
   'supply.readings-do-not-fit': {
     title: 'Readings do not fit the system',
-    stop: 'The voltages read do not fit the declared system[ ({system})][. They fit {fits}]. Find out which supply this is, then correct section 2.',
+    stop: 'The voltages read do not fit the declared system[ ({system})][. They fit {fits:system}]. Find out which supply this is, then correct section 2.',
     open: 'Voltages were read, but no system is named. Name the system in section 2.',
   },
   'supply.high-leg': {
@@ -27,7 +27,7 @@ export const findings = {
   'supply.colors-do-not-fit': {
     title: 'Conductor color of another system',
     caution:
-      '[{color} ]is the custom of another system than the one declared. Read the voltage; color proves nothing.',
+      '[{color:conductorColor} ]is the custom of another system than the one declared. Read the voltage; color proves nothing.',
   },
   'supply.tripped': {
     title: 'Breaker tripped',
@@ -47,8 +47,8 @@ export const findings = {
   },
   'sources.egress-not-listed': {
     title: 'Emergency supply is not listed',
-    stop: 'The emergency supply[ ({supply})] reaches this equipment and is not listed. Add it in section 3, with where it is opened.',
-    open: 'The emergency supply[ ({supply})] reaches this equipment and the list of ways is not complete. Add it, and name the kind of each way, in section 3.',
+    stop: 'The emergency supply[ ({supply:egressSupply})] reaches this equipment and is not listed. Add it in section 3, with where it is opened.',
+    open: 'The emergency supply[ ({supply:egressSupply})] reaches this equipment and the list of ways is not complete. Add it, and name the kind of each way, in section 3.',
   },
   'sources.switch-only': {
     title: 'A switch or control is not an opening',
@@ -95,7 +95,7 @@ export const findings = {
   },
   'sources.neutral-not-checked': {
     title: 'Current in the neutral',
-    stop: '[{amperes} ]flows in the neutral: another circuit shares it. Do not part it; find and open the other circuit, then clamp again.',
+    stop: '[{amperes:A} ]flows in the neutral: another circuit shares it. Do not part it; find and open the other circuit, then clamp again.',
     open: 'The neutral is or may be shared and no clamp reading is entered. Clamp it before it is parted, and enter the amperes.',
   },
   'sources.live-neighbor': {
@@ -125,7 +125,7 @@ export const findings = {
   },
   'decision.below-fifty-not-so': {
     title: 'Not everything is below 50 V',
-    stop: '50 V or more is worked on or exposed[ ({volts})]. Below 50 V is then no reason; switch it off.',
+    stop: '50 V or more is worked on or exposed[ ({volts:V})]. Below 50 V is then no reason; switch it off.',
     open: 'Below 50 V is the reason, and the voltages are not all answered. Enter the highest voltage worked on, and whether anything higher is exposed.',
   },
   'decision.testing-is-not-repair': {
@@ -161,7 +161,7 @@ export const findings = {
   },
   'absence.meter-category': {
     title: 'Meter not rated for this',
-    stop: 'The tester[ ({category}, {ratedVolts})] is not rated for this place[: {requiredCategory}, {requiredVolts} or more]. Use one that is, leads included.',
+    stop: 'The tester[ ({category}, {ratedVolts:V})] is not rated for this place[: {requiredCategory:category}, {requiredVolts:V} or more]. Use one that is, leads included.',
     open: 'Category or rated voltage of the tester is not answered. Read both off the meter and the leads, and enter the lowest.',
   },
   'absence.not-proved': {
@@ -174,11 +174,11 @@ export const findings = {
   },
   'absence.voltage-present': {
     title: 'Voltage present',
-    stop: '{point}: {reading} is present[, {pair}]. It is live. Step back, stop the work, and find the way that is missing.',
+    stop: '{point}: {volts:reading} is present[, {pair}]. It is live. Step back, stop the work, and find the way that is missing.',
   },
   'absence.stray-voltage': {
     title: 'Stray voltage',
-    stop: '{point}: {reading} remains[, {pair}]. Find where it comes from, or test again with a low-impedance meter.',
+    stop: '{point}: {volts:reading} remains[, {pair}]. Find where it comes from, or test again with a low-impedance meter.',
   },
   'absence.controls-not-operated': {
     title: 'Controls not operated',
@@ -209,7 +209,7 @@ export const findings = {
   },
   'shock.gloves-class': {
     title: 'Glove class too low',
-    stop: 'The gloves of {who}[, class {gloveClass},] are not enough[ for {volts}]. Take class {requiredClass} or better.',
+    stop: 'The gloves of {who}[, class {gloveClass},] are not enough[ for {volts:V}]. Take class {requiredClass} or better.',
     open: 'The class of the gloves of {who} is not answered. Read it off the cuff.',
   },
   'shock.gloves-overdue': {
@@ -228,7 +228,7 @@ export const findings = {
   },
   'shock.grounded-surface': {
     title: 'Grounded metal in reach',
-    stop: '[{kind}: ]grounded metal is in reach and neither covered nor kept clear as this work asks. Cover it with a rubber blanket; on a lift use an insulating one.',
+    stop: '[{kind:surfaceKind}: ]grounded metal is in reach and neither covered nor kept clear as this work asks. Cover it with a rubber blanket; on a lift use an insulating one.',
     open: 'Grounded metal in reach is not answered. Look for the ceiling grid, duct, strut and conduit, then answer in section 9.',
   },
   'shock.conductive-articles': {
@@ -244,27 +244,48 @@ export const findings = {
   },
   'arc.study-needed': {
     title: 'Engineering study needed',
-    stop: 'No arc flash method holds here[: {limit}]. Get an engineering study or a label of this equipment, or switch it off from where no arc flash is likely.',
-    open: 'The arc flash method cannot be chosen yet[: {limit}]. Read the label, or enter that there is none, the fault current, the clearing time and the working distance.',
-    caution:
-      'Arc flash: [{limit}. ]Check the date of the label, and how near the transformer estimate is to the limit[ ({estimate} of {limitKiloamperes})].',
+    stop: 'No arc flash method holds here. Get an engineering study or a label of this equipment, or plan it with the power off upstream.',
+    'stop:limits-not-known':
+      'Fault current or clearing time cannot be found out, so the category table does not hold. Get an engineering study or a label of this equipment.',
+    'stop:voltage-outside-table':
+      'The category table ends[ at {allowed:V}][; this supply is {value:V}]. Get an engineering study.',
+    'stop:fault-current-exceeded':
+      'The available fault current[, {value:kA},] is more than the category table admits[, {allowed:kA}]. Get an engineering study or a label of this equipment.',
+    'stop:clearing-time-exceeded':
+      'The clearing time[, {value:s},] is longer than the category table admits[, {allowed:s}]. Get an engineering study or a label of this equipment.',
+    'stop:working-distance-short':
+      'The working distance[, {value:inches},] is shorter than the category table admits[, {allowed:inches}]. Plan to stay farther off, or get an engineering study.',
+    'stop:label-voltage-differs':
+      'The label is for another voltage[: {value:V}, here {allowed:V}]. Read it again; if it is right, get a label or a study of this equipment.',
+    'stop:label-working-distance':
+      'The working distance[, {value:inches},] is shorter than the label’s[, {allowed:inches}]. Plan to stay farther off, or get an engineering study.',
+    open: 'The arc flash method cannot be chosen yet. Read the label, or enter that there is none, with fault current, clearing time and working distance.',
+    'open:label-not-answered':
+      'Label or no label is not answered. Look at the equipment and enter what its label says, or that there is none.',
+    'open:not-answered':
+      '“{field}” is not answered, so the arc flash method cannot be chosen. Enter it in section 7; if it cannot be found out, mark that.',
+    caution: 'Check the date of the label, and how near the fault current is to the limit.',
+    'caution:label-review':
+      'The label bears no date, or one of more than5 years ago. Ask whether it still holds.',
+    'caution:transformer-near-limit':
+      'The transformer estimate is near the limit of the table[: {estimate:kA} of {limitKiloamperes:kA}]. Impedance has a tolerance; get the study’s figure.',
   },
   'arc.above-forty': {
     title: 'More than 40 cal/cm²',
-    stop: 'The label says more than 40 cal/cm²[ ({energy})]. No clothing answers the blast. Do not open it energized; open the supply upstream.',
+    stop: 'The label says more than 40 cal/cm²[ ({energy:cal})]. No clothing answers the blast. Do not open it energized; open the supply upstream.',
   },
   'arc.rating-low': {
     title: 'Arc rating too low',
-    stop: 'The clothing[, {rating},] is rated below what is required[, {requiredRating}]. Everyone inside the arc flash boundary changes, or stays out.',
-    open: 'The arc rating worn is not answered[; {requiredRating} is required]. Read the lowest one off the garments.',
+    stop: 'The clothing[, {rating:cal},] is rated below what is required[, {requiredRating:cal}]. Everyone inside the arc flash boundary changes, or stays out.',
+    open: 'The arc rating worn is not answered[; {requiredRating:cal} is required]. Read the lowest one off the garments.',
   },
   'arc.task-does-not-fit': {
     title: 'Arc flash task does not fit the job',
-    open: 'The arc flash task chosen[ ({arcFlashTask})] is milder than the job[ ({floor})]. Choose the one that fits; until then the stricter counts.',
+    open: 'The arc flash task chosen[ ({arcFlashTask})] is milder than the job[ ({floor:arcFlashTask})]. Choose the one that fits; until then the stricter counts.',
   },
   'arc.bystander-inside': {
     title: 'Inside the arc flash boundary unprotected',
-    stop: '{who} is inside the arc flash boundary[ ({boundary})] without arc-rated clothing. Dress them for it, or keep them outside.',
+    stop: '{who} is inside the arc flash boundary[ ({boundary:least})] without arc-rated clothing. Dress them for it, or keep them outside.',
   },
   'equipment.not-at-hand': {
     title: 'Equipment not at hand',
@@ -279,17 +300,17 @@ export const findings = {
   },
   'surroundings.ladder-conductive': {
     title: 'Conductive ladder',
-    stop: 'The ladder conducts[ ({material})]. Take a fiberglass one.',
+    stop: 'The ladder conducts[ ({material:ladderMaterial})]. Take a fiberglass one.',
     open: 'What the ladder is made of is not answered. Look at the rails, then answer in section 9.',
   },
   'surroundings.ladder-top': {
     title: 'Standing too high on the ladder',
-    stop: 'The step stood on[, {standing},] is too high on this ladder[; highest {highest}]. Stand lower, or take a taller ladder.',
+    stop: 'The step stood on[, {standing:feet},] is too high on this ladder[; highest {highest:feet}]. Stand lower, or take a taller ladder.',
     open: 'Ladder size or the step stood on is not answered. Enter both in section 9.',
   },
   'surroundings.ladder-short': {
     title: 'Ladder too short or not placed',
-    stop: 'The ladder is too short for this ceiling[; {required} needed], or not locked open, level and kept from doors and traffic. Take a taller one, a platform or a lift, and set it right.',
+    stop: 'The ladder is too short for this ceiling[; {required:feet} needed], or not locked open, level and kept from doors and traffic. Take a taller one, a platform or a lift, and set it right.',
     open: 'Ladder size, ceiling height or how the ladder stands is not answered. Enter them in section 9.',
   },
   'surroundings.dark': {
@@ -306,8 +327,8 @@ export const findings = {
   },
   'surroundings.barricade': {
     title: 'Barricade',
-    stop: 'The barricade[, at {barricade},] is nearer than it must be[: {required}]. Move it out, attendant or not.',
-    open: 'People may approach, and no barricade far enough out[ ({required})] nor attendant keeps them off. Set one and enter it in section 9.',
+    stop: 'The barricade[, at {barricade:inches},] is nearer than it must be[: {required:least}]. Move it out, attendant or not.',
+    open: 'People may approach, and no barricade far enough out[ ({required:least})] nor attendant keeps them off. Set one and enter it in section 9.',
   },
   'surroundings.egress-dark': {
     title: 'Emergency lighting out of service',
@@ -360,7 +381,7 @@ export const findings = {
   },
   'window.too-long': {
     title: 'More than 12 hours',
-    stop: 'The work is planned for more than 12 hours[ ({hours})]. Split it into worksheets of 12 hours or less.',
+    stop: 'The work is planned for more than 12 hours[ ({hours:hours})]. Split it into worksheets of 12 hours or less.',
   },
   'window.reversed': {
     title: 'Ends before it starts',

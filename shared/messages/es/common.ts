@@ -161,7 +161,7 @@ export const common: Words<typeof en> = {
     person_number: (n: number) => `Persona ${n} de la cuadrilla`,
     point: 'Un punto de trabajo',
     point_number: (n: number) => `Punto de trabajo ${n}`,
-    reading: 'tensión',
+    volts: 'Tensión',
     pair: (from: string, to: string) => `${from} a ${to}`,
     item: 'Un equipo',
     topic: 'un tema',

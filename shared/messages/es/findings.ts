@@ -10,12 +10,12 @@ export const findings: Words<typeof en> = {
   },
   'supply.voltage-not-of-system': {
     title: 'La tensión del circuito no es del sistema',
-    stop: '[{volts} ]no es tensión de circuito de este sistema[ ({system})]. Corrija el sistema o la tensión; 120 V junto a 480Y/277 V viene de un transformador y es otro sistema.',
+    stop: '[{volts:V} ]no es tensión de circuito de este sistema[ ({system})]. Corrija el sistema o la tensión; 120 V junto a 480Y/277 V viene de un transformador y es otro sistema.',
     open: 'Todavía no se pueden comparar el sistema y la tensión del circuito. Léalos en el tablero y conteste en la sección 2.',
   },
   'supply.readings-do-not-fit': {
     title: 'Las lecturas no corresponden al sistema',
-    stop: 'Las tensiones leídas no corresponden al sistema declarado[ ({system})][. Corresponden a {fits}]. Averigüe qué alimentación es y corrija la sección 2.',
+    stop: 'Las tensiones leídas no corresponden al sistema declarado[ ({system})][. Corresponden a {fits:system}]. Averigüe qué alimentación es y corrija la sección 2.',
     open: 'Hay lecturas, pero falta el sistema. Indíquelo en la sección 2.',
   },
   'supply.high-leg': {
@@ -26,7 +26,7 @@ export const findings: Words<typeof en> = {
   'supply.colors-do-not-fit': {
     title: 'Color de conductor de otro sistema',
     caution:
-      '[{color} ]se acostumbra en otro sistema, no en el declarado. Mida la tensión; el color no comprueba nada.',
+      '[{color:conductorColor} ]se acostumbra en otro sistema, no en el declarado. Mida la tensión; el color no comprueba nada.',
   },
   'supply.tripped': {
     title: 'Se disparó el termomagnético',
@@ -46,8 +46,8 @@ export const findings: Words<typeof en> = {
   },
   'sources.egress-not-listed': {
     title: 'Falta la fuente de emergencia',
-    stop: 'La alimentación de emergencia[ ({supply})] llega a este equipo y no está en la lista. Agréguela en la sección 3, con el lugar donde se abre.',
-    open: 'La alimentación de emergencia[ ({supply})] llega a este equipo y la lista de fuentes no está completa. Agréguela y ponga el tipo de cada fuente en la sección 3.',
+    stop: 'La alimentación de emergencia[ ({supply:egressSupply})] llega a este equipo y no está en la lista. Agréguela en la sección 3, con el lugar donde se abre.',
+    open: 'La alimentación de emergencia[ ({supply:egressSupply})] llega a este equipo y la lista de fuentes no está completa. Agréguela y ponga el tipo de cada fuente en la sección 3.',
   },
   'sources.switch-only': {
     title: 'Un apagador o control no cuenta como abierto',
@@ -94,7 +94,7 @@ export const findings: Words<typeof en> = {
   },
   'sources.neutral-not-checked': {
     title: 'Corriente en el neutro',
-    stop: '[{amperes} ]circula por el neutro: otro circuito lo comparte. No lo abra; encuentre y abra el otro circuito, y mida otra vez con gancho.',
+    stop: '[{amperes:A} ]circula por el neutro: otro circuito lo comparte. No lo abra; encuentre y abra el otro circuito, y mida otra vez con gancho.',
     open: 'El neutro es o puede ser compartido y falta la lectura de gancho. Mida antes de abrirlo y anote los amperes.',
   },
   'sources.live-neighbor': {
@@ -124,7 +124,7 @@ export const findings: Words<typeof en> = {
   },
   'decision.below-fifty-not-so': {
     title: 'No todo está abajo de 50 V',
-    stop: 'Se trabaja o queda expuesto a 50 V o más[ ({volts})]. Entonces estar abajo de 50 V no es razón; corte la energía.',
+    stop: 'Se trabaja o queda expuesto a 50 V o más[ ({volts:V})]. Entonces estar abajo de 50 V no es razón; corte la energía.',
     open: 'La razón es que está abajo de 50 V y faltan tensiones. Anote la mayor que se trabaja y si hay algo mayor expuesto.',
   },
   'decision.testing-is-not-repair': {
@@ -160,7 +160,7 @@ export const findings: Words<typeof en> = {
   },
   'absence.meter-category': {
     title: 'Medidor no apto para este lugar',
-    stop: 'El probador[ ({category}, {ratedVolts})] no es apto para este lugar[: {requiredCategory}, {requiredVolts} o más]. Use uno que lo sea, con sus cables.',
+    stop: 'El probador[ ({category}, {ratedVolts:V})] no es apto para este lugar[: {requiredCategory:category}, {requiredVolts:V} o más]. Use uno que lo sea, con sus cables.',
     open: 'Falta la categoría o la tensión nominal del probador. Léalas en el medidor y los cables, y anote la menor.',
   },
   'absence.not-proved': {
@@ -173,11 +173,11 @@ export const findings: Words<typeof en> = {
   },
   'absence.voltage-present': {
     title: 'Hay tensión',
-    stop: '{point}: hay {reading}[, {pair}]. Está vivo. Retírese, pare el trabajo y encuentre la fuente que falta.',
+    stop: '{point}: hay {volts:reading}[, {pair}]. Está vivo. Retírese, pare el trabajo y encuentre la fuente que falta.',
   },
   'absence.stray-voltage': {
     title: 'Tensión residual',
-    stop: '{point}: quedan {reading}[, {pair}]. Encuentre de dónde viene, o mida otra vez con un medidor de baja impedancia.',
+    stop: '{point}: quedan {volts:reading}[, {pair}]. Encuentre de dónde viene, o mida otra vez con un medidor de baja impedancia.',
   },
   'absence.controls-not-operated': {
     title: 'Controles sin operar',
@@ -208,7 +208,7 @@ export const findings: Words<typeof en> = {
   },
   'shock.gloves-class': {
     title: 'Clase de guantes insuficiente',
-    stop: 'Los guantes de {who}[, clase {gloveClass},] no bastan[ para {volts}]. Use clase {requiredClass} o mejor.',
+    stop: 'Los guantes de {who}[, clase {gloveClass},] no bastan[ para {volts:V}]. Use clase {requiredClass} o mejor.',
     open: 'Falta la clase de los guantes de {who}. Léala en el puño.',
   },
   'shock.gloves-overdue': {
@@ -227,7 +227,7 @@ export const findings: Words<typeof en> = {
   },
   'shock.grounded-surface': {
     title: 'Metal a tierra al alcance',
-    stop: '[{kind}: ]hay metal a tierra al alcance, sin cubrir ni libre como pide este trabajo. Cúbralo con manta dieléctrica; en plataforma elevadora use una aislante.',
+    stop: '[{kind:surfaceKind}: ]hay metal a tierra al alcance, sin cubrir ni libre como pide este trabajo. Cúbralo con manta dieléctrica; en plataforma elevadora use una aislante.',
     open: 'Falta decir qué metal a tierra está al alcance. Busque retícula, ducto, unicanal y conduit, y conteste en la sección 9.',
   },
   'shock.conductive-articles': {
@@ -243,27 +243,49 @@ export const findings: Words<typeof en> = {
   },
   'arc.study-needed': {
     title: 'Se necesita un estudio de ingeniería',
-    stop: 'Aquí no aplica ningún método de arco eléctrico[: {limit}]. Consiga un estudio o la etiqueta de este equipo, o corte la energía desde donde el arco no es probable.',
-    open: 'Todavía no se puede elegir el método de arco eléctrico[: {limit}]. Lea la etiqueta, o indique que no hay, y anote corriente de falla, tiempo de liberación y distancia de trabajo.',
+    stop: 'Aquí no aplica ningún método de arco eléctrico. Consiga un estudio o la etiqueta de este equipo, o planéelo sin energía desde aguas arriba.',
+    'stop:limits-not-known':
+      'No se puede saber la corriente de falla o el tiempo de liberación, así que la tabla de categorías no aplica. Consiga un estudio o la etiqueta de este equipo.',
+    'stop:voltage-outside-table':
+      'La tabla de categorías termina[ en {allowed:V}][; esta alimentación es de {value:V}]. Consiga un estudio de ingeniería.',
+    'stop:fault-current-exceeded':
+      'La corriente de falla disponible[, {value:kA},] pasa de lo que admite la tabla de categorías[, {allowed:kA}]. Consiga un estudio o la etiqueta de este equipo.',
+    'stop:clearing-time-exceeded':
+      'El tiempo de liberación[, {value:s},] pasa de lo que admite la tabla de categorías[, {allowed:s}]. Consiga un estudio o la etiqueta de este equipo.',
+    'stop:working-distance-short':
+      'La distancia de trabajo[, {value:inches},] es menor que la de la tabla de categorías[, {allowed:inches}]. Planee quedarse más lejos, o consiga un estudio.',
+    'stop:label-voltage-differs':
+      'La etiqueta es de otra tensión[: {value:V}, aquí {allowed:V}]. Léala otra vez; si es correcta, consiga la etiqueta o un estudio de este equipo.',
+    'stop:label-working-distance':
+      'La distancia de trabajo[, {value:inches},] es menor que la de la etiqueta[, {allowed:inches}]. Planee quedarse más lejos, o consiga un estudio.',
+    open: 'Todavía no se puede elegir el método de arco eléctrico. Lea la etiqueta, o indique que no hay, con corriente de falla, tiempo de liberación y distancia de trabajo.',
+    'open:label-not-answered':
+      'Falta decir si hay etiqueta. Vea el equipo y anote lo que dice, o que no tiene.',
+    'open:not-answered':
+      'Falta contestar “{field}”, así que no se puede elegir el método de arco eléctrico. Anótelo en la sección 7; si no se puede saber, márquelo.',
     caution:
-      'Arco eléctrico: [{limit}. ]Revise la fecha de la etiqueta y qué tan cerca del límite queda el cálculo del transformador[ ({estimate} de {limitKiloamperes})].',
+      'Revise la fecha de la etiqueta y qué tan cerca del límite está la corriente de falla.',
+    'caution:label-review':
+      'La etiqueta no tiene fecha, o es de hace más de 5 años. Pregunte si todavía vale.',
+    'caution:transformer-near-limit':
+      'El cálculo del transformador queda cerca del límite de la tabla[: {estimate:kA} de {limitKiloamperes:kA}]. La impedancia tiene tolerancia; consiga la cifra del estudio.',
   },
   'arc.above-forty': {
     title: 'Más de 40 cal/cm²',
-    stop: 'La etiqueta dice más de 40 cal/cm²[ ({energy})]. Ninguna ropa aguanta la explosión. No lo abra energizado; abra la alimentación aguas arriba.',
+    stop: 'La etiqueta dice más de 40 cal/cm²[ ({energy:cal})]. Ninguna ropa aguanta la explosión. No lo abra energizado; abra la alimentación aguas arriba.',
   },
   'arc.rating-low': {
     title: 'Clasificación de arco insuficiente',
-    stop: 'La ropa[, {rating},] queda abajo de lo requerido[, {requiredRating}]. Todos dentro del límite de arco se cambian o se quedan fuera.',
-    open: 'Falta la clasificación de arco de la ropa[; se requieren {requiredRating}]. Lea la menor en las prendas.',
+    stop: 'La ropa[, {rating:cal},] queda abajo de lo requerido[, {requiredRating:cal}]. Todos dentro del límite de arco se cambian o se quedan fuera.',
+    open: 'Falta la clasificación de arco de la ropa[; se requieren {requiredRating:cal}]. Lea la menor en las prendas.',
   },
   'arc.task-does-not-fit': {
     title: 'La tarea de arco no corresponde',
-    open: 'La tarea de arco elegida[ ({arcFlashTask})] es más leve que el trabajo[ ({floor})]. Elija la que corresponde; mientras, cuenta la más estricta.',
+    open: 'La tarea de arco elegida[ ({arcFlashTask})] es más leve que el trabajo[ ({floor:arcFlashTask})]. Elija la que corresponde; mientras, cuenta la más estricta.',
   },
   'arc.bystander-inside': {
     title: 'Alguien sin protección dentro del límite de arco',
-    stop: '{who} está dentro del límite de arco eléctrico[ ({boundary})] sin ropa con clasificación de arco. Vístalo para eso o que se quede fuera.',
+    stop: '{who} está dentro del límite de arco eléctrico[ ({boundary:least})] sin ropa con clasificación de arco. Vístalo para eso o que se quede fuera.',
   },
   'equipment.not-at-hand': {
     title: 'Equipo que no está a la mano',
@@ -278,17 +300,17 @@ export const findings: Words<typeof en> = {
   },
   'surroundings.ladder-conductive': {
     title: 'Escalera conductora',
-    stop: 'La escalera conduce[ ({material})]. Use una de fibra de vidrio.',
+    stop: 'La escalera conduce[ ({material:ladderMaterial})]. Use una de fibra de vidrio.',
     open: 'Falta decir de qué es la escalera. Vea los largueros y conteste en la sección 9.',
   },
   'surroundings.ladder-top': {
     title: 'Parado muy arriba en la escalera',
-    stop: 'El peldaño[, {standing},] queda muy arriba en esta escalera[; a lo más {highest}]. Párese más abajo o use una más alta.',
+    stop: 'El peldaño[, {standing:feet},] queda muy arriba en esta escalera[; a lo más {highest:feet}]. Párese más abajo o use una más alta.',
     open: 'Falta el tamaño de la escalera o el peldaño donde se para. Anote los dos en la sección 9.',
   },
   'surroundings.ladder-short': {
     title: 'Escalera corta o mal puesta',
-    stop: 'La escalera es corta para este techo[; se necesita de {required}], o no está trabada, a nivel y lejos de puertas y paso. Use una más alta, una plataforma o un elevador, y colóquela bien.',
+    stop: 'La escalera es corta para este techo[; se necesita de {required:feet}], o no está trabada, a nivel y lejos de puertas y paso. Use una más alta, una plataforma o un elevador, y colóquela bien.',
     open: 'Falta el tamaño de la escalera, la altura del techo o cómo está puesta. Anótelo en la sección 9.',
   },
   'surroundings.dark': {
@@ -305,8 +327,8 @@ export const findings: Words<typeof en> = {
   },
   'surroundings.barricade': {
     title: 'Barricada',
-    stop: 'La barricada[, a {barricade},] está más cerca de lo debido[: {required}]. Aléjela, haya vigía o no.',
-    open: 'Puede acercarse gente y no hay barricada a la distancia debida[ ({required})] ni vigía que lo impida. Ponga una y anótela en la sección 9.',
+    stop: 'La barricada[, a {barricade:inches},] está más cerca de lo debido[: {required:least}]. Aléjela, haya vigía o no.',
+    open: 'Puede acercarse gente y no hay barricada a la distancia debida[ ({required:least})] ni vigía que lo impida. Ponga una y anótela en la sección 9.',
   },
   'surroundings.egress-dark': {
     title: 'Alumbrado de emergencia fuera de servicio',
@@ -359,7 +381,7 @@ export const findings: Words<typeof en> = {
   },
   'window.too-long': {
     title: 'Más de 12 horas',
-    stop: 'El trabajo está planeado para más de 12 horas[ ({hours})]. Divídalo en hojas de 12 horas o menos.',
+    stop: 'El trabajo está planeado para más de 12 horas[ ({hours:hours})]. Divídalo en hojas de 12 horas o menos.',
   },
   'window.reversed': {
     title: 'Termina antes de empezar',
