@@ -10,8 +10,11 @@ import { originCheck } from './middleware/originCheck';
 import { requestId } from './middleware/requestId';
 import { requestLog } from './middleware/requestLog';
 import { endStaleSession, passport } from './passport';
+import { assessmentsRouter } from './routes/assessments';
 import { healthRouter } from './routes/health';
 import { sessionRouter } from './routes/session';
+import { verifyRouter } from './routes/verify';
+import { worksheetsRouter } from './routes/worksheets';
 import { sessionMiddleware } from './session';
 
 /** The whole server as a function of requests; `main.ts` gives it a port, tests call it as it is. */
@@ -66,6 +69,9 @@ function buildApi(): express.Router {
   api.use(jsonBody, originCheck);
   api.use(sessionMiddleware(), passport.initialize(), passport.session(), endStaleSession);
   api.use('/session', sessionRouter);
+  api.use('/worksheets', worksheetsRouter);
+  api.use('/assessments', assessmentsRouter);
+  api.use('/verify', verifyRouter);
   api.use(notFoundHandler);
   return api;
 }

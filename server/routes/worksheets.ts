@@ -31,8 +31,9 @@ import {
   presentSignature,
   presentWorksheet,
 } from '../presenters/worksheet';
+import { presentEvent, presentRevision, presentRevisionDetail } from '../presenters/history';
 import { presentWorksheetRow } from '../presenters/worksheetRow';
-import { notAllowed, preconditionRequired } from '../problem';
+import { notAllowed, notFound, preconditionRequired } from '../problem';
 import { answerQuestion, findQuestion } from '../services/answerQuestion';
 import { askQuestion } from '../services/askQuestion';
 import type { ReasonedService } from '../services/changeState';
@@ -42,6 +43,7 @@ import { createWorksheet } from '../services/createWorksheet';
 import { findWorksheet } from '../services/findWorksheet';
 import { listWorksheets, worksheetListSchema } from '../services/listWorksheets';
 import { proveWorksheet } from '../services/proveWorksheet';
+import { listEvents, listRevisions, readRevision } from '../services/readHistory';
 import { loadParts, loadPeople } from '../services/readRecord';
 import { loadRowParts } from '../services/readRows';
 import { returnWorksheet } from '../services/returnWorksheet';
@@ -173,4 +175,22 @@ worksheetsRouter.post('/:worksheetId/copy', async (req, res) => {
   const { id } = parse(copySchema, req.body ?? {});
   const { worksheet: copy, created } = await copyWorksheet(actor, { worksheet, id });
   await sendWorksheet(res, actor, copy, created ? 201 : 200);
+});
+
+worksheetsRouter.get('/:worksheetId/revisions', async (req, res) => {
+  const { worksheet } = await worksheetFor(req);
+  res.json({ items: (await listRevisions(worksheet)).map(presentRevision) });
+});
+
+worksheetsRouter.get('/:worksheetId/revisions/:revision', async (req, res) => {
+  const { worksheet } = await worksheetFor(req);
+  if (!/^[1-9]\d{0,8}$/.test(req.params.revision)) throw notFound();
+  const parts = await readRevision(worksheet, Number(req.params.revision));
+  res.json(presentRevisionDetail(parts));
+});
+
+worksheetsRouter.get('/:worksheetId/events', async (req, res) => {
+  const { worksheet } = await worksheetFor(req);
+  const { events, people } = await listEvents(worksheet);
+  res.json({ items: events.map((event) => presentEvent(event, people)) });
 });
