@@ -24,6 +24,7 @@ export default defineConfig({
           include: ['tests/server/**/*.test.ts'],
           environment: 'node',
           globalSetup: ['tests/support/globalSetup.ts'],
+          setupFiles: ['tests/support/serverSetup.ts'],
           testTimeout: 60_000,
           hookTimeout: 120_000,
         },
