@@ -1,12 +1,8 @@
 import { BRIEFING_TOPICS } from '@/hazard';
-import { BELOW_FIFTY } from '../../support/ruleEdits';
+import { BELOW_FIFTY, SECOND_QUALIFIED } from '../../support/ruleEdits';
 import type { Edits, RuleRow } from '../../support/ruleTable';
 import { ALL, describeRule, eachValue, ENERGIZED, gone, onEach } from '../../support/ruleTable';
 
-const SECOND_QUALIFIED: Edits = {
-  'crew/1/qualified': true,
-  'crew/1/qualifiedThrough': '2028-01-01',
-};
 
 describeRule('crew.lead-unqualified', '1910.332(b)(3), 1910.333(c)(2)', [
   ...onEach(ALL, 'one qualified lead', {}, []),

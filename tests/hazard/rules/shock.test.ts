@@ -1,11 +1,7 @@
-import { BELOW_FIFTY, FAR } from '../../support/ruleEdits';
+import { BELOW_FIFTY, FAR, SECOND_QUALIFIED } from '../../support/ruleEdits';
 import type { Edits, RuleRow } from '../../support/ruleTable';
 import { ALL, describeRule, eachValue, ENERGIZED, gone, onEach } from '../../support/ruleTable';
 
-const SECOND_QUALIFIED: Edits = {
-  'crew/1/qualified': true,
-  'crew/1/qualifiedThrough': '2028-01-01',
-};
 const GLOVES = 'protectiveEquipment/gloves';
 const SET = {
   gloveClass: '0',
