@@ -189,6 +189,7 @@ const commonCitations = {
   'own.aboveForty': own('Above 40 cal/cm²'),
   'own.alone': own('Working alone'),
   'own.window': own('Length of a worksheet'),
+  'own.complete': own('Questions that must be answered'),
   'own.egressTest': own('Test of emergency lighting'),
 } as const satisfies Record<string, Citation>;
 

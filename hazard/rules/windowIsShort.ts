@@ -1,0 +1,24 @@
+import { minutesBetween } from '../engine/moment';
+import { ALL, notAnswered, PLAN_AND_WORK } from '../engine/rule';
+import type { Hit, Rule } from '../engine/rule';
+
+const LONGEST_MINUTES = 12 * 60;
+
+/** `window.too-long`: a worksheet is for one day's work, 12 h on the clock that never changes. */
+export const windowIsShort: Rule = {
+  code: 'window.too-long',
+  severity: 'stop',
+  stages: PLAN_AND_WORK,
+  appliesTo: ALL,
+  citations: ['own.window'],
+  find({ answers }) {
+    const { startsAt, endsAt } = answers.job;
+    if (startsAt === undefined || endsAt === undefined) {
+      const hits: Hit[] = startsAt === undefined ? [notAnswered('/job/startsAt')] : [];
+      return endsAt === undefined ? [...hits, notAnswered('/job/endsAt')] : hits;
+    }
+    const minutes = minutesBetween(startsAt, endsAt);
+    if (minutes <= LONGEST_MINUTES) return [];
+    return [{ path: '/job/endsAt', params: { minutes, limit: LONGEST_MINUTES } }];
+  },
+};
