@@ -1,5 +1,6 @@
 import type { Citation } from '@/hazard/types';
 import type { Locale } from '../user';
+import { citationParts } from './es/citations';
 import { enumWord } from './enumWord';
 import { messages } from './languages';
 import { noBreak } from './template';
@@ -26,9 +27,10 @@ function placeOf({ standard, edition, table }: Citation, ownRule: string): strin
  */
 export function citationWords(locale: Locale, citation: Citation): string {
   const { citations } = messages(locale);
-  const place = citations.parts.reduce(
-    (text, { from, to }) => text.replaceAll(from, to),
-    placeOf(citation, citations.ownRule),
-  );
+  const printed = placeOf(citation, citations.ownRule);
+  const place =
+    locale === 'es-MX'
+      ? citationParts.reduce((text, { from, to }) => text.replaceAll(from, to), printed)
+      : printed;
   return noBreak(`${place}. ${enumWord(locale, 'confidence', citation.confidence)}`);
 }

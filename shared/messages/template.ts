@@ -30,7 +30,7 @@ export function fill(template: string, resolve: Resolve, fallback: Fallback): st
     PLACEHOLDER,
     (_, name: string, unit: string | undefined, offset: number) => {
       const value = resolve(name, unit) ?? { text: fallback(name), isName: false };
-      const beginsSentence = offset === 0 || /[.?] $/.test(without.slice(0, offset));
+      const beginsSentence = /(?:^|[.?] )[“¿]?$/.test(without.slice(0, offset));
       return value.isName || beginsSentence ? value.text : lowerFirst(value.text);
     },
   );

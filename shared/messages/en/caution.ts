@@ -57,6 +57,11 @@ export const caution = {
       text: 'Anyone may stop or refuse, without giving proof and without penalty.',
     },
   ],
+  /** Shown as a caution with 1926.416(a) and 1926.417 where the job is new or renovation work. */
+  construction: {
+    title: 'Construction rules apply',
+    text: 'New and renovation work is construction (29 CFR 1926): tag the deenergized circuit at every point where it can be energized. State plans and local codes may ask more.',
+  },
   /** What stands for the brackets where no worksheet fills them. */
   unfilled: {
     editions: 'NFPA 70E-2024 and 29 CFR 1910 Subparts S and I',

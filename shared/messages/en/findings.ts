@@ -419,11 +419,6 @@ export const findings = {
     title: 'Emergency lighting not tested',
     open: 'The emergency lights are not tested after the work. Run them on battery for at least 30 s, or see them lit on their branch, and enter it.',
   },
-  'job.construction': {
-    title: 'Construction rules apply',
-    caution:
-      'New and renovation work is construction: tag the deenergized circuit at every point where it can be energized. State plans and local codes may ask more.',
-  },
   unanswered: {
     title: 'Not answered',
     open: '[{where}: ]“{field}” is not answered. Answer it in section {section}.',

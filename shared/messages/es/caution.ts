@@ -55,6 +55,10 @@ export const caution: Words<typeof en> = {
       text: 'Cualquiera puede parar o negarse, sin dar pruebas y sin castigo.',
     },
   ],
+  construction: {
+    title: 'Aplican reglas de construcción',
+    text: 'La obra nueva y la remodelación son construcción (29 CFR 1926): etiquete el circuito sin energía en cada punto donde se pueda energizar. Los planes estatales y códigos locales pueden pedir más.',
+  },
   unfilled: {
     editions: 'NFPA 70E-2024 y 29 CFR 1910, subpartes S e I',
     contact: 'quien indica la hoja',

@@ -419,11 +419,6 @@ export const findings: Words<typeof en> = {
     title: 'Alumbrado de emergencia sin probar',
     open: 'Las luces de emergencia no se han probado después del trabajo. Déjelas con batería al menos 30 s, o véalas encendidas en su circuito, y anótelo.',
   },
-  'job.construction': {
-    title: 'Aplican reglas de construcción',
-    caution:
-      'La obra nueva y la remodelación son construcción: etiquete el circuito sin energía en cada punto donde se pueda energizar. Los planes estatales y códigos locales pueden pedir más.',
-  },
   unanswered: {
     title: 'Sin respuesta',
     open: '[{where}: ]falta contestar “{field}”. Conteste en la sección {section}.',
