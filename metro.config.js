@@ -1,9 +1,13 @@
+const path = require('node:path');
 const { getDefaultConfig } = require('expo/metro-config');
 
 const config = getDefaultConfig(__dirname);
-// Metro does not know woff2; the web target ships Barlow in it (a third of the size of the TTF).
-config.resolver.assetExts.push('woff2');
-// Data of the local database and built files are no source: watching them would be slow.
-config.resolver.blockList = [/\/\.data\/.*/, /\/dist\/.*/, /\/\.stryker-tmp\/.*/];
+const here = path.resolve(__dirname).replace(/[.*+?^${}()|[\]\\]/g, '\\$&');
+
+// Data of the local database and built files of this project are no source: watching them would
+// be slow. Only at its root: packages ship their code in folders called dist, too.
+config.resolver.blockList = [
+  new RegExp(`^${here}/(\\.data|dist|coverage|reports|\\.stryker-tmp)/.*`),
+];
 
 module.exports = config;

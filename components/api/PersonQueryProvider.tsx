@@ -21,7 +21,9 @@ interface Kept {
 const FORMAT = 1;
 
 function isKept(value: unknown): value is Kept {
-  return typeof value === 'object' && value !== null && 'format' in value && value.format === FORMAT;
+  return (
+    typeof value === 'object' && value !== null && 'format' in value && value.format === FORMAT
+  );
 }
 
 /** Reads what this person was last shown into the cache, then keeps every new answer. */

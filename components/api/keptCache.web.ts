@@ -1,7 +1,5 @@
 import { openDB, type DBSchema, type IDBPDatabase } from 'idb';
-import type { KeptCache } from './keptCache';
-
-export type { KeptCache } from './keptCache';
+import type { KeptCache } from './keptCacheTypes';
 
 interface Schema extends DBSchema {
   caches: { key: string; value: unknown };

@@ -43,6 +43,10 @@ export async function request<T extends z.ZodType>(
 }
 
 /** The options of a request that sends JSON. */
-export function json(method: 'POST' | 'PUT' | 'PATCH', body: unknown, headers?: HeadersInit): RequestInit {
+export function json(
+  method: 'POST' | 'PUT' | 'PATCH',
+  body: unknown,
+  headers?: HeadersInit,
+): RequestInit {
   return { method, body: JSON.stringify(body), headers };
 }

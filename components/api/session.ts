@@ -104,12 +104,16 @@ export function usePatchSession() {
       mutationFn: (patch: SessionPatch) => request(sessionSchema, '/session', json('PATCH', patch)),
       onMutate: (patch) => {
         const before = deviceClient.getQueryData(sessionQuery().queryKey);
-        if (before) deviceClient.setQueryData(sessionQuery().queryKey, { ...before, user: { ...before.user, ...patch } });
+        if (before) {
+          const next: Session = { ...before, user: { ...before.user, ...patch } };
+          deviceClient.setQueryData(sessionQuery().queryKey, next);
+        }
         return before;
       },
       onError: (error, _patch, before) => {
         // Without signal the choice holds on this device until the session is read again.
-        if (before && !(error instanceof TypeError)) deviceClient.setQueryData(sessionQuery().queryKey, before);
+        if (before && !(error instanceof TypeError))
+          deviceClient.setQueryData(sessionQuery().queryKey, before);
       },
       onSuccess: (session) => store(session),
     },

@@ -46,6 +46,11 @@ export function LanguageSwitch({ value, onChange }: Props) {
 }
 
 const styles = StyleSheet.create({
-  frame: { flexDirection: 'row', borderWidth: rule.middle, borderRadius: radius.control, overflow: 'hidden' },
+  frame: {
+    flexDirection: 'row',
+    borderWidth: rule.middle,
+    borderRadius: radius.control,
+    overflow: 'hidden',
+  },
   half: { minHeight: touch.least, justifyContent: 'center', paddingHorizontal: 14 },
 });

@@ -39,7 +39,11 @@ export function SignedIn({ children }: { children: ReactNode }) {
     return <LoadingScreen />;
   }
   if (session.data === null) {
-    return <Redirect href={pathname === '/' ? '/sign-in' : { pathname: '/sign-in', params: { to: pathname } }} />;
+    return (
+      <Redirect
+        href={pathname === '/' ? '/sign-in' : { pathname: '/sign-in', params: { to: pathname } }}
+      />
+    );
   }
   return <SignedInAs user={session.data.user}>{children}</SignedInAs>;
 }

@@ -1,7 +1,8 @@
 import type { Href } from 'expo-router';
 import type { Role } from '@/shared/user';
 
-export type PlaceKey = 'home' | 'board' | 'archive' | 'insights' | 'people' | 'sites' | 'rubberGoods';
+export type PlaceKey =
+  'home' | 'board' | 'archive' | 'insights' | 'people' | 'sites' | 'rubberGoods';
 
 const HREFS: Readonly<Record<PlaceKey, Href>> = {
   home: '/',

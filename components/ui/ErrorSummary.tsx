@@ -24,6 +24,8 @@ export function ErrorSummary({ faults, title }: { faults: readonly FieldFault[];
   }, [key]);
 
   if (faults.length === 0) return null;
+  // A fault of the whole form, such as a wrong password, has no field to count.
+  const whole = title === undefined && faults.every((fault) => fault.id === undefined);
   return (
     <View
       ref={box}
@@ -31,12 +33,14 @@ export function ErrorSummary({ faults, title }: { faults: readonly FieldFault[];
       {...webProps({ tabIndex: -1 })}
       style={[styles.box, { borderColor: colors.ink, backgroundColor: colors.tone }]}
     >
-      <Text variant="signal" weight="600" level={2}>
-        {title ?? ui.errorSummary(faults.length)}
-      </Text>
+      {!whole && (
+        <Text variant="signal" weight="600" level={2}>
+          {title ?? ui.errorSummary(faults.length)}
+        </Text>
+      )}
       {faults.map(({ id, message }) =>
         id === undefined ? (
-          <Text key={message} variant="answer">
+          <Text key={message} variant="strong">
             {message}
           </Text>
         ) : (

@@ -1,13 +1,12 @@
 import { mkdir, writeFile } from 'node:fs/promises';
 import path from 'node:path';
-import { fileURLToPath } from 'node:url';
 import sharp from 'sharp';
 
 /**
  * Draws the pictures of the app's icon from the mark. Run by hand when the
  * mark changes; the pictures are kept in the repository.
  */
-const root = path.resolve(path.dirname(fileURLToPath(import.meta.url)), '../..');
+const root = path.resolve(__dirname, '../..');
 const INK = '#1B1916';
 const PAPER = '#F6F1E6';
 
@@ -37,10 +36,14 @@ async function draw(file: string, size: number, share: number, ground?: string):
   );
 }
 
-await draw('public/icons/icon-192.png', 192, 0.72, PAPER);
-await draw('public/icons/icon-512.png', 512, 0.72, PAPER);
-// A mask may cut a fifth from each side.
-await draw('public/icons/icon-maskable-512.png', 512, 0.5, PAPER);
-await draw('public/icons/apple-touch-icon.png', 180, 0.68, PAPER);
-await draw('assets/images/icon.png', 1024, 0.68, PAPER);
-await draw('assets/images/favicon.png', 64, 0.94);
+async function main(): Promise<void> {
+  await draw('public/icons/icon-192.png', 192, 0.72, PAPER);
+  await draw('public/icons/icon-512.png', 512, 0.72, PAPER);
+  // A mask may cut a fifth from each side.
+  await draw('public/icons/icon-maskable-512.png', 512, 0.5, PAPER);
+  await draw('public/icons/apple-touch-icon.png', 180, 0.68, PAPER);
+  await draw('assets/images/icon.png', 1024, 0.68, PAPER);
+  await draw('assets/images/favicon.png', 64, 0.94);
+}
+
+void main();

@@ -1,6 +1,7 @@
 /** Sign-in, password reset, invitation and the person's own account. */
 export const account = {
-  tagline: 'Find every way a lighting circuit can be live, keep the distance, prove it dead, keep the record.',
+  tagline:
+    'Find every way a lighting circuit can be live, keep the distance, prove it dead, keep the record.',
   signIn: 'Sign in',
   email: 'E-mail',
   password: 'Password',
@@ -26,7 +27,8 @@ export const account = {
     send: 'Send the link',
     sent: 'If this e-mail belongs to an account, the link is on its way. It works once, within an hour.',
     newTitle: 'New password',
-    newBody: 'Every other sign-in of yours ends, and a mail tells you so. The signing PIN stays as it is.',
+    newBody:
+      'Every other sign-in of yours ends, and a mail tells you so. The signing PIN stays as it is.',
     save: 'Save the password',
     done: 'The password is changed. Sign in with it.',
     dead: 'This link has run out or was used. Ask for a new one.',

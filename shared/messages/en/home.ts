@@ -22,10 +22,12 @@ export const home = {
   find: 'Find an earlier worksheet',
   create: 'New worksheet',
   copy: 'From an earlier one',
-  copyHint: 'Open the earlier worksheet and choose Copy. Dates, locks, permit and briefing are not copied.',
+  copyHint:
+    'Open the earlier worksheet and choose Copy. Dates, locks, permit and briefing are not copied.',
   board: 'Open the board',
   archive: 'Search the archive',
-  keptHere: (count: number) => (count === 1 ? '1 kept here, not sent' : `${count} kept here, not sent`),
+  keptHere: (count: number) =>
+    count === 1 ? '1 kept here, not sent' : `${count} kept here, not sent`,
   allSent: 'All sent',
   lastSent: (time: string) => `Last sent ${time}`,
   asLastSeen: (time: string) => `No answer from the server. Shown as of ${time}.`,
@@ -53,12 +55,17 @@ export const home = {
     readAndSign: 'Read and sign',
     countersign: 'Waits for your signature',
     read: 'Read and sign or send back',
-    crewStopped: (name: string) => (name === '' ? 'Stopped: hands off' : `Stopped by ${name}: hands off`),
+    crewStopped: (name: string) =>
+      name === '' ? 'Stopped: hands off' : `Stopped by ${name}: hands off`,
     look: 'See why',
   },
   state: {
     draft: (stops: number, open: number) =>
-      stops > 0 ? `Draft, ${stops} stop, ${open} open` : open > 0 ? `Draft, ${open} open` : 'Draft, ready to sign',
+      stops > 0
+        ? `Draft, ${stops} stop, ${open} open`
+        : open > 0
+          ? `Draft, ${open} open`
+          : 'Draft, ready to sign',
     briefing: (count: number) =>
       count === 1 ? 'Waits for 1 of the crew' : `Waits for ${count} of the crew`,
     countersign: 'Waits for a supervisor',

@@ -13,7 +13,9 @@ export const account: Words<typeof en> = {
   passwordMissing: 'Escriba su contraseña.',
   wrong: 'El correo o la contraseña no es correcto.',
   tooMany: (minutes) =>
-    minutes <= 1 ? 'Demasiados intentos. Espere un minuto.' : `Demasiados intentos. Espere ${minutes} minutos.`,
+    minutes <= 1
+      ? 'Demasiados intentos. Espere un minuto.'
+      : `Demasiados intentos. Espere ${minutes} minutos.`,
   noAnswer: 'El servidor no respondió. Busque señal e intente de nuevo.',
   figure: {
     title: 'Vivo hasta comprobar lo contrario',

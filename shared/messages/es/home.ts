@@ -15,7 +15,8 @@ export const home: Words<typeof en> = {
   title: (weekday, day, month) => `${weekday} ${day} de ${month}`,
   waits: 'Le espera a usted',
   nothingWaits: 'Nada le espera.',
-  nothingWaitsHelper: 'Cuando un encargado lo anote en una hoja, aparece aquí para leerla y firmarla.',
+  nothingWaitsHelper:
+    'Cuando un encargado lo anote en una hoja, aparece aquí para leerla y firmarla.',
   today: 'Hoy',
   worksheets: (count) => (count === 1 ? '1 hoja' : `${count} hojas`),
   nothingToday: 'No hay hojas para hoy.',
@@ -28,7 +29,8 @@ export const home: Words<typeof en> = {
     'Abra la hoja anterior y elija Copiar. No se copian fechas, candados, permiso ni plática de seguridad.',
   board: 'Abrir el tablero',
   archive: 'Buscar en el archivo',
-  keptHere: (count) => (count === 1 ? '1 guardada aquí, sin enviar' : `${count} guardadas aquí, sin enviar`),
+  keptHere: (count) =>
+    count === 1 ? '1 guardada aquí, sin enviar' : `${count} guardadas aquí, sin enviar`,
   allSent: 'Todo enviado',
   lastSent: (time) => `Último envío ${time}`,
   asLastSeen: (time) => `El servidor no responde. Se muestra lo de las ${time}.`,
@@ -56,7 +58,8 @@ export const home: Words<typeof en> = {
     readAndSign: 'Leer y firmar',
     countersign: 'Espera su firma',
     read: 'Leer y firmar o devolver',
-    crewStopped: (name) => (name === '' ? 'Detenida: no toque nada' : `Detenida por ${name}: no toque nada`),
+    crewStopped: (name) =>
+      name === '' ? 'Detenida: no toque nada' : `Detenida por ${name}: no toque nada`,
     look: 'Ver por qué',
   },
   state: {
@@ -66,7 +69,8 @@ export const home: Words<typeof en> = {
         : open > 0
           ? `Borrador, ${open} pendientes`
           : 'Borrador, listo para firmar',
-    briefing: (count) => (count === 1 ? 'Falta 1 de la cuadrilla' : `Faltan ${count} de la cuadrilla`),
+    briefing: (count) =>
+      count === 1 ? 'Falta 1 de la cuadrilla' : `Faltan ${count} de la cuadrilla`,
     countersign: 'Espera a un supervisor',
     notProved: 'En vigor, trátela como viva',
     proved: 'En vigor, comprobada sin tensión',

@@ -1,0 +1,5 @@
+import { NewWorksheetScreen } from '@/components/worksheet/NewWorksheetScreen';
+
+export default function NewWorksheetRoute() {
+  return <NewWorksheetScreen />;
+}

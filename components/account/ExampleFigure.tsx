@@ -1,0 +1,5 @@
+import { View } from 'react-native';
+
+export function ExampleFigure() {
+  return <View />;
+}
