@@ -57,9 +57,9 @@ export function gloveStatus(
     const dueOn = addCalendarMonths(lastTestedOn, testEveryMonths);
     return { adequate, inTest: lastTestedOn <= on && on <= dueOn, dueOn };
   }
-  // Issued after the test, so a test after `on` would mean an issue after `on` too.
+  // Issued after the test, so a test after `on` would mean an issue after `on` too; and gloves
+  // issued after the shelf time ends are in test on no day, since they are due before it.
   const shelfEndsOn = addCalendarMonths(lastTestedOn, issueWithinMonthsOfTest);
-  if (issuedOn > shelfEndsOn) return { adequate, inTest: false, dueOn: shelfEndsOn };
   const afterIssue = addCalendarMonths(issuedOn, testEveryMonths);
   const dueOn = afterIssue < shelfEndsOn ? afterIssue : shelfEndsOn;
   return { adequate, inTest: issuedOn <= on && on <= dueOn, dueOn };

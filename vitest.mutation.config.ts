@@ -1,0 +1,14 @@
+import path from 'node:path';
+import { defineConfig } from 'vitest/config';
+
+process.env.TZ = 'America/Chicago';
+
+/** Only the tests of hazard: the others ask for a database or a browser, once for each mutant. */
+export default defineConfig({
+  resolve: { alias: [{ find: /^@\//, replacement: `${path.resolve(__dirname)}/` }] },
+  test: {
+    include: ['tests/hazard/**/*.test.ts'],
+    environment: 'node',
+    setupFiles: ['tests/support/propertyRuns.ts'],
+  },
+});
