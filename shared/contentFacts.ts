@@ -1,7 +1,7 @@
 import { z } from 'zod';
 import type { Locale, Units } from './user';
 import * as format from './format';
-import { messages, type Messages } from './messages/index';
+import { itemWords, messages, type Messages } from './messages/index';
 import { sectionOf, type SectionId } from './sections';
 import { closeOutSchema, worksheetContentSchema } from './worksheet';
 
@@ -148,16 +148,12 @@ class Teller {
   }
 
   private itemName(id: string): string {
-    const items: Readonly<Record<string, string | { title?: string }>> = this.words.items as never;
-    const item = items[id];
-    return typeof item === 'string' ? item : (item?.title ?? id);
+    return itemWords(this.options.locale, { id, params: {} });
   }
 
   private topicName(topic: string): string {
-    const topics: Readonly<Record<string, string | { title?: string }>> = this.words
-      .topics as never;
-    const found = topics[topic];
-    return typeof found === 'string' ? found : (found?.title ?? topic);
+    const topics: Readonly<Record<string, { name: string }>> = this.words.topics;
+    return topics[topic]?.name ?? topic;
   }
 
   private sourceName(id: string): string {

@@ -30,3 +30,9 @@ export function wordOf(words: Messages, group: EnumerationGroup, value: string):
 export function fieldId(name: string): string {
   return `field-${name.replaceAll('.', '-')}`;
 }
+
+/** Why a field was refused, by zod's or the server's code. */
+export function faultWord(words: Messages, code: string): string {
+  const faults: Readonly<Record<string, string>> = words.common.fieldErrors;
+  return faults[code] ?? words.common.fieldErrors.other;
+}

@@ -15,7 +15,7 @@ import {
 } from '../../ui';
 import { useState } from 'react';
 import { FieldFrame } from './FieldFrame';
-import { fieldId, hintOf, labelOf, wordOf, type EnumerationGroup } from './fieldWords';
+import { faultWord, fieldId, hintOf, labelOf, wordOf, type EnumerationGroup } from './fieldWords';
 import { useWorksheetForm } from './WorksheetFormContext';
 
 interface Named {
@@ -42,7 +42,7 @@ function useBound({ name, label, hint }: Named) {
       label: label ?? labelOf(words, name),
       hint: hint ?? hintOf(words, name),
       todo: findingsOf(name).some((finding) => finding.severity === 'open'),
-      error: fault === undefined ? undefined : words.ui.fieldFault(fault.code),
+      error: fault === undefined ? undefined : faultWord(words, fault.code),
     },
   };
 }
@@ -121,7 +121,7 @@ export function FieldDistance({ keptIn, ...named }: Named & { keptIn: 'in' | 'ft
     <FieldFrame name={named.name}>
       <TextField
         {...common}
-        error={unreadable ? words.ui.notADistance(typed.trim()) : common.error}
+        error={unreadable ? words.worksheet.notADistance(typed.trim()) : common.error}
         exact
         unit={/[a-z'"′″]/i.test(typed) ? undefined : bare}
         value={typed}

@@ -28,7 +28,10 @@ function isPlainObject(value: unknown): value is Raw {
  */
 function withoutEmpty(value: unknown): unknown {
   if (Array.isArray(value)) {
-    return value.map((item) => withoutEmpty(item) ?? (isPlainObject(item) ? {} : undefined));
+    // A figure not typed yet leaves a hole in its list; an empty row is still a row.
+    return value
+      .filter((item) => item !== undefined && item !== null && item !== '')
+      .map((item: unknown) => withoutEmpty(item) ?? {});
   }
   if (isPlainObject(value)) {
     const kept = Object.entries(value)
@@ -73,7 +76,10 @@ export function readContent(raw: unknown): ReadContent {
     const issue = parsed.error.issues[0];
     if (issue === undefined || issue.path.length === 0) return { content: {}, faults };
     for (const path of pathsOf(issue)) {
-      faults.push({ name: path.map(String).join('.'), code: issue.code });
+      // A figure in a list says its own fault: its place in the list is not its place on the screen.
+      if (typeof path.at(-1) !== 'number') {
+        faults.push({ name: path.map(String).join('.'), code: issue.code });
+      }
       candidate = withoutEmpty(without(candidate, path)) ?? {};
     }
   }

@@ -1,7 +1,7 @@
 import { StyleSheet, View } from 'react-native';
 import type { Finding } from '@/hazard';
-import { findingWords } from '@/shared/messages/findingWords';
-import { useLocale } from '../../i18n/preferences';
+import { findingWords } from '@/shared/messages';
+import { useLocale, useUnits } from '../../i18n/preferences';
 import { space } from '../../theme/tokens';
 import { CautionPanel, Citation, StateMark, StopPanel, Text } from '../../ui';
 
@@ -21,7 +21,8 @@ export function FindingPanels({ findings }: { findings: readonly Finding[] }) {
 
 function FindingPanel({ finding }: { finding: Finding }) {
   const locale = useLocale();
-  const { title, text } = findingWords(locale, finding);
+  const units = useUnits();
+  const { title, text } = findingWords(locale, finding, units);
   const citation = <Citation citation={finding.citation} />;
   if (finding.severity === 'stop')
     return <StopPanel title={title} body={text} citation={citation} />;

@@ -1,4 +1,215 @@
-import type { worksheet as en } from '../en/worksheet';
-import type { Words } from '../words';
+/** La pantalla de la hoja de trabajo. */
+export const worksheet = {
+  thisWorksheet: 'Esta hoja',
+  loading: 'Cargando la hoja',
+  newTitle: 'Hoja nueva',
+  state: 'Estado',
+  sections: 'Secciones',
+  openPoints: 'Puntos abiertos',
+  saved: 'Guardado',
+  asLastRead: 'Última lectura, sin respuesta',
+  restored: 'Lo que se escribió aquí no se había enviado. Se muestra de nuevo y se está enviando.',
+  conflictTitle: 'Alguien guardó antes otra versión.',
+  conflictBody:
+    'Lo que escribió está guardado en este aparato. Conserve lo suyo, o descártelo y vea lo que tiene el servidor.',
+  keepMine: 'Conservar lo mío y enviarlo',
+  takeTheirs: 'Descartar lo mío, ver lo otro',
+  refusedByServer:
+    'El servidor no lo aceptó. Está guardado en este aparato. Cargue otra vez la hoja para ver cómo quedó.',
+  notADistance: (typed: string) =>
+    `“${typed}” no es una distancia. Escríbala como 3 ft 6 in, 42 in o 1.07 m.`,
+  fromSite: 'Del sitio, por confirmar',
+  takeSuggestion: (value: string) => `Tomar ${value}`,
+  occupied: { yes: 'Hay gente en el edificio.', no: 'No hay nadie en el edificio.' },
 
-export const worksheet: Words<typeof en> = {};
+  readingsFit: (systems: string) => `Las lecturas corresponden a ${systems}.`,
+  readingsFitNothing:
+    'Las lecturas no corresponden a ningún sistema. Mida otra vez y busque otro circuito.',
+  readingLabel: {
+    phaseToPhase: ['A con B', 'B con C', 'C con A'],
+    phaseToNeutral: ['A con N', 'B con N', 'C con N'],
+  },
+  expectedLoad: (amperes: string) =>
+    `Se esperan ${amperes} con la carga encendida. Otro valor en la pinza indica otro circuito.`,
+  systemAndCircuit: (system: string, circuit: string | undefined) =>
+    circuit === undefined ? system : `${system}. Circuito a ${circuit}`,
+  panelAndCircuit: (panel: string, circuit: string | undefined) =>
+    circuit === undefined ? `Tablero ${panel}` : `Tablero ${panel}, circuito ${circuit}`,
+
+  newSource: 'Fuente nueva, sin tipo',
+  addSource: 'Agregar otra forma de estar vivo',
+  removeSource: (name: string) => `Quitar: ${name}`,
+  mostSources: (most: number) => `${most} fuentes como máximo. Divida el trabajo.`,
+  openAndHeld: (held: number, all: number) => `${held} de ${all} abiertas y bloqueadas`,
+  switchNeverOpen:
+    '29 CFR 1910.333(b)(2). Un apagador, con cinta o sin ella, nunca cuenta como abierto.',
+  sameLockAs: (place: string) => `Abierto y bloqueado igual que ${place}`,
+  connectorParted: 'Conector separado',
+
+  modeSentence: {
+    off: 'Sin energía. Desenergizar, bloquear, probar que está muerto.',
+    energized: 'Energizado. Justificado abajo.',
+  },
+  modeChoice: { off: 'Sin energía', energized: 'Energizado' },
+  modeNote: {
+    off: 'Desenergizar, bloquear y etiquetar, probar. Vivo hasta entonces.',
+    energized: 'Solo por las razones que admite el reglamento.',
+  },
+  permitNeeded: 'Se necesita permiso de trabajo energizado.',
+  noPermitNeeded: 'No se necesita permiso de trabajo energizado.',
+
+  proveDead: 'Probar que está muerto',
+  proofComes: 'Las lecturas vienen cuando el plan está firmado y en vigor.',
+  noProofEnergized: 'El trabajo energizado no tiene prueba. Todo sigue vivo.',
+  proofLine: (at: string, readings: number, ready: boolean) =>
+    `${at}: ${readings} lecturas, ${ready ? 'probado muerto' : 'sin probar'}`,
+  testedBy: (name: string) => `Prueba: ${name}`,
+
+  boundary: {
+    restricted: 'Límite de aproximación restringida',
+    limitedFixed: 'Límite de aproximación limitada, parte fija',
+    limitedMovable: 'Límite de aproximación limitada, conductor móvil',
+    arcFlash: 'Límite de arco eléctrico',
+    barricade: 'Barricada, por lo menos',
+  },
+  avoidContact: 'Evitar contacto',
+  noDistance: 'Ninguna',
+  onlyInside: (names: string) => `Solo ${names}, con guantes`,
+  nobodyNamedInside: 'Quien prueba entra, con guantes',
+  limitedOtherwise: {
+    movable: (distance: string) => `${distance} si un conductor puede moverse`,
+    fixed: (distance: string) => `${distance} cuando ningún conductor pueda moverse`,
+  },
+  arcFlashNote: {
+    'not likely': 'El arco eléctrico no es probable. No probable no es imposible.',
+    'incident energy': 'Ropa contra arco dentro de él, según la etiqueta',
+    'ppe category': 'Ropa contra arco dentro de él, según la tabla de categorías',
+    'study needed': 'No se sabe. Pida un estudio antes de que alguien se acerque.',
+  },
+  barricadeNote: 'El mayor de los límites: limitada o arco eléctrico',
+  distancesNotKnown: 'Distancias: no se saben hasta completar la sección 2.',
+  notInTable: 'Después del último renglón de la tabla. Pida un estudio.',
+  waitsForSupply: 'de la sección 2',
+  followsSupply: 'según la alimentación',
+  yesMovable: 'Sí, móvil',
+  noFixed: 'No, fijo',
+
+  arcFlashLikely: 'El arco eléctrico es probable.',
+  arcFlashNotLikely: 'El arco eléctrico no es probable. No probable no es imposible.',
+  studyNeeded: 'Se necesita un estudio de ingeniería',
+  ppeCategory: 'Categoría de EPP',
+  arcRating: 'Resistencia al arco, mínima',
+  normalQuestion: '¿Cuáles de estas se cumplen?',
+  normalHint: 'Las siete hacen normal la condición. Lo que no se marque la hace anormal.',
+  oneRating: 'Uno de los tres valores, como está impreso',
+  fromNameplate: 'Estimar con la placa del transformador',
+  estimate: (current: string) => `${current} como máximo`,
+  estimateNote:
+    'Barra infinita: un tope, no un estudio. Una corriente menor puede quemar más tiempo y peor. Cuenta el mayor entre este valor y el de arriba.',
+  phases: { one: 'Monofásico', three: 'Trifásico' },
+  clearingGivenIn: 'Dado en',
+  seconds: 'Segundos',
+  cycles: 'Ciclos de 60 Hz',
+  cyclesLabel: 'Tiempo de apertura en ciclos',
+  cyclesUnit: 'ciclos',
+
+  gloveName: (serial: string, gloveClass: string) => `${serial}, ${gloveClass}`,
+  gloveDates: (tested: string, due: string) => `Probados ${tested}, vencen ${due}`,
+  glovesByHand: 'Fuera del registro: anotar clase y fechas',
+  requiredItems: 'Puesto o a la mano',
+  atHand: (ready: number, all: number) => `${ready} de ${all} a la mano`,
+  notAtHand: 'falta',
+
+  short: {
+    grounded: 'A tierra',
+    access: 'Desde',
+    ladder: 'Escalera',
+    ceiling: 'Techo',
+    light: 'Luz',
+    barricade: 'Barricada',
+  },
+  surface: 'Superficie',
+  lookedNone: 'Revisado, ninguna al alcance',
+  surfacesHint:
+    'Retícula del plafón, ducto, canal, tubo conduit: donde pueda apoyarse la cadera, el brazo o la cabeza.',
+  addSurface: 'Agregar superficie a tierra',
+  removeSurface: (name: string) => `Quitar: ${name}`,
+  standingAt: (height: string) => `de pie a ${height}`,
+  lightEnough: 'Suficiente con el circuito apagado',
+  lightTooLittle: 'Insuficiente con el circuito apagado',
+  smallestLadder: (size: string, standing: string) =>
+    `Para este techo: ${size} o más alta, de pie a ${standing} como máximo. Regla práctica.`,
+  noLadderTallEnough: 'Ninguna escalera de tijera alcanza. Use plataforma o elevador.',
+
+  namelessMember: 'Persona sin nombre',
+  nameCrewFirst: 'Anote primero la cuadrilla en la sección 10.',
+  addMember: 'Agregar a una persona de este sitio',
+  removeMember: (name: string) => `Quitar a ${name} de la cuadrilla`,
+  qualified: 'calificado',
+  notQualified: 'No calificado',
+  qualifiedUnknown: 'Calificado, sin fecha',
+  qualifiedThrough: (date: string) => `Calificado hasta ${date}`,
+  topicsCovered: (count: number) => `${count} temas tratados`,
+  emergencyPlan: 'Plan de emergencia',
+
+  aSupervisor: 'Un supervisor del sitio',
+  notSigned: 'Sin firma',
+  signedAt: (at: string) => `Firmado ${at}`,
+  enteredBy: (name: string) => `en el aparato de ${name}`,
+  signedOf: (signed: number, all: number) => `${signed} de ${all} firmas`,
+  waitsForPoints: (count: number) => (count === 1 ? 'por 1 punto' : `por ${count} puntos`),
+  fieldsToMend: (count: number) =>
+    count === 1 ? '1 campo no se puede leer' : `${count} campos no se pueden leer`,
+  signPlan: 'Firmar el plan',
+  readAndSign: 'Leer y firmar',
+  handPhoneTo: (name: string) => `Pasar el teléfono a ${name}`,
+  countersign: 'Refrendar',
+
+  closeOut: 'Cerrar la hoja',
+  closeOutRestore:
+    'Herramienta fuera, gente avisada y retirada, tapas puestas; después restablecer el circuito.',
+  closeOutLocks: (locks: string) => `Retirar los candados ${locks}, cada uno su dueño.`,
+  closeOutEgress: 'Probar el alumbrado de emergencia.',
+  closedBy: (name: string, at: string) => `Cerrado por ${name}, ${at}`,
+  untilInForce: 'hasta estar en vigor',
+
+  notYetInForce: 'Todavía no está en vigor',
+  toSignatures: 'A las firmas',
+  treatAsLive: 'Tratar como vivo',
+  notProved: 'Sin probar que está muerto',
+  notProvedTitle: 'Sin probar que está muerto: tratar como vivo',
+  notProvedBody:
+    'Las distancias y el EPP valen hasta registrar la prueba en cada punto de trabajo.',
+  provedTitle: (time: string) => `Probado muerto, ${time}`,
+  provedBody:
+    'Pruebe otra vez si el trabajo quedó solo, si se movió un candado, si cambió el turno u otra cosa.',
+  energizedTitle: 'Trabajo energizado en vigor',
+  energizedBody: 'Todo está vivo. Las distancias y el EPP valen hasta el final.',
+
+  reasonBy: 'Motivo',
+  reasonTitle: {
+    draft: 'Motivo',
+    briefing: 'Motivo',
+    countersign: 'Motivo',
+    'in-force': 'Motivo',
+    returned: 'Devuelta',
+    stopped: 'Detenida: manos fuera',
+    expired: 'Pasó su hora de término',
+    void: 'Retirada',
+    closed: 'Motivo',
+  },
+  reasonLine: (reason: string, name: string, at: string) => `“${reason}” ${name}, ${at}`,
+  asked: (name: string, question: string) => `${name} pregunta: ${question}`,
+  answered: (name: string, answer: string) => `${name}: ${answer}`,
+  notAnsweredYet: 'Sin respuesta todavía. Detiene el refrendo.',
+  answerLabel: 'Su respuesta',
+  answer: 'Responder',
+  writeAnswerFirst: 'Escriba primero la respuesta',
+  reasonMissing: 'Escriba primero el motivo',
+  reasonFor: { return: 'Por qué se devuelve', void: 'Por qué se retira' },
+  actName: { return: 'Devolver', void: 'Retirar' },
+  revise: (revision: number) => `Hacer la revisión ${revision}`,
+  copy: 'Hacer una nueva a partir de esta',
+  openPdf: 'PDF',
+  trail: 'Historial y revisiones',
+};

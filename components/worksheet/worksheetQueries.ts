@@ -1,0 +1,79 @@
+import { queryOptions, useMutation, useQueryClient, type QueryClient } from '@tanstack/react-query';
+import { worksheetSchema, type WorksheetRecord } from '@/shared/record';
+import type { WorksheetContent } from '@/shared/worksheet';
+import { ApiProblem, isProblem } from '../api/ApiProblem';
+import { json, request } from '../api/request';
+import type { SendOutcome } from '../drafts/useDraft';
+
+export const worksheetKeys = {
+  all: ['worksheets'] as const,
+  detail: (worksheetId: string) => ['worksheets', 'detail', worksheetId] as const,
+};
+
+export function worksheetQuery(worksheetId: string) {
+  return queryOptions({
+    queryKey: worksheetKeys.detail(worksheetId),
+    queryFn: ({ signal }) => request(worksheetSchema, `/worksheets/${worksheetId}`, { signal }),
+  });
+}
+
+/** Puts a record where every screen reads it, and marks the lists as old. */
+export async function storeWorksheet(client: QueryClient, record: WorksheetRecord): Promise<void> {
+  client.setQueryData(worksheetQuery(record.id).queryKey, record);
+  await client.invalidateQueries({
+    queryKey: worksheetKeys.all,
+    predicate: ({ queryKey }) => queryKey[1] !== 'detail',
+  });
+}
+
+export function useCreateWorksheet() {
+  const client = useQueryClient();
+  return useMutation({
+    mutationFn: (body: { id: string; content: WorksheetContent }) =>
+      request(worksheetSchema, '/worksheets', json('POST', body)),
+    onSuccess: (record) => storeWorksheet(client, record),
+  });
+}
+
+/** A POST that answers with the worksheet itself: return, stop, void, revise, close. */
+export function useWorksheetAct(worksheetId: string, act: string) {
+  const client = useQueryClient();
+  return useMutation({
+    mutationFn: (body: unknown) =>
+      request(worksheetSchema, `/worksheets/${worksheetId}/${act}`, json('POST', body)),
+    onSuccess: (record) => storeWorksheet(client, record),
+  });
+}
+
+function outcomeOf(error: unknown): SendOutcome {
+  if (isProblem(error, 'stale-version')) return { kind: 'conflict' };
+  if (
+    error instanceof ApiProblem &&
+    error.status < 500 &&
+    error.status !== 408 &&
+    error.status !== 429
+  ) {
+    return { kind: 'refused', error };
+  }
+  return { kind: 'unreachable' };
+}
+
+/** Saves a content over the version that it was typed over, and says how that ended. */
+export async function saveContent(
+  client: QueryClient,
+  worksheetId: string,
+  content: WorksheetContent,
+  baseVersion: number,
+): Promise<SendOutcome> {
+  try {
+    const record = await request(
+      worksheetSchema,
+      `/worksheets/${worksheetId}`,
+      json('PUT', { content }, { 'If-Match': `"${baseVersion}"` }),
+    );
+    await storeWorksheet(client, record);
+    return { kind: 'accepted', version: record.version, at: record.updatedAt };
+  } catch (error) {
+    return outcomeOf(error);
+  }
+}
