@@ -21,20 +21,21 @@ export class AttachmentRow extends Model<
   declare createdAt: Date;
 }
 
-const requiredText = { type: DataTypes.TEXT, allowNull: false };
+// A new object a column: Sequelize writes the column's name into it.
+const requiredText = () => ({ type: DataTypes.TEXT, allowNull: false });
 
 AttachmentRow.init(
   {
     id: { type: DataTypes.UUID, primaryKey: true },
     worksheetId: { type: DataTypes.UUID, allowNull: false },
     revision: { type: DataTypes.INTEGER, allowNull: false },
-    section: requiredText,
-    caption: requiredText,
-    type: requiredText,
+    section: requiredText(),
+    caption: requiredText(),
+    type: requiredText(),
     byteCount: { type: DataTypes.INTEGER, allowNull: false },
     // Sequelize would make it sha_256.
-    sha256: { ...requiredText, field: 'sha256' },
-    receivedSha256: { ...requiredText, field: 'received_sha256' },
+    sha256: { ...requiredText(), field: 'sha256' },
+    receivedSha256: { ...requiredText(), field: 'received_sha256' },
     createdById: { type: DataTypes.UUID, allowNull: false },
     createdAt: { type: DataTypes.DATE, allowNull: false },
   },

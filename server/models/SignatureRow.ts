@@ -29,25 +29,26 @@ export class SignatureRow extends Model<
   declare receivedAt: Date;
 }
 
-const requiredText = { type: DataTypes.TEXT, allowNull: false };
-const requiredId = { type: DataTypes.UUID, allowNull: false };
+// A new object a column: Sequelize writes the column's name into it.
+const requiredText = () => ({ type: DataTypes.TEXT, allowNull: false });
+const requiredId = () => ({ type: DataTypes.UUID, allowNull: false });
 
 SignatureRow.init(
   {
     id: { type: DataTypes.UUID, primaryKey: true },
-    worksheetId: requiredId,
+    worksheetId: requiredId(),
     revision: { type: DataTypes.INTEGER, allowNull: false },
-    meaning: requiredText,
-    signerId: requiredId,
-    signerName: requiredText,
-    signerRole: requiredText,
-    enteredById: requiredId,
-    contentHash: requiredText,
-    edition: requiredText,
-    assessmentHash: requiredText,
+    meaning: requiredText(),
+    signerId: requiredId(),
+    signerName: requiredText(),
+    signerRole: requiredText(),
+    enteredById: requiredId(),
+    contentHash: requiredText(),
+    edition: requiredText(),
+    assessmentHash: requiredText(),
     strokes: { type: DataTypes.JSONB, allowNull: false },
-    strokesHash: requiredText,
-    method: requiredText,
+    strokesHash: requiredText(),
+    method: requiredText(),
     deviceId: DataTypes.UUID,
     deviceSignature: DataTypes.TEXT,
     signedAt: { type: DataTypes.DATE, allowNull: false },

@@ -44,11 +44,12 @@ export class Worksheet extends Model<
   declare updatedAt: Date;
 }
 
-const text = { type: DataTypes.TEXT };
-const requiredText = { type: DataTypes.TEXT, allowNull: false, defaultValue: '' };
-const count = { type: DataTypes.INTEGER, allowNull: false, defaultValue: 0 };
-const ids = { type: DataTypes.ARRAY(DataTypes.UUID), allowNull: false, defaultValue: [] };
-const codes = { type: DataTypes.ARRAY(DataTypes.TEXT), allowNull: false, defaultValue: [] };
+// A new object a column: Sequelize writes the column's name into it.
+const text = () => ({ type: DataTypes.TEXT });
+const requiredText = () => ({ type: DataTypes.TEXT, allowNull: false, defaultValue: '' });
+const count = () => ({ type: DataTypes.INTEGER, allowNull: false, defaultValue: 0 });
+const ids = () => ({ type: DataTypes.ARRAY(DataTypes.UUID), allowNull: false, defaultValue: [] });
+const codes = () => ({ type: DataTypes.ARRAY(DataTypes.TEXT), allowNull: false, defaultValue: [] });
 
 Worksheet.init(
   {
@@ -60,28 +61,28 @@ Worksheet.init(
     version: { type: DataTypes.INTEGER, allowNull: false, defaultValue: 1 },
     leadId: { type: DataTypes.UUID, allowNull: false },
     createdById: { type: DataTypes.UUID, allowNull: false },
-    authorIds: ids,
-    crewIds: ids,
-    signedCrewIds: ids,
+    authorIds: ids(),
+    crewIds: ids(),
+    signedCrewIds: ids(),
     siteId: DataTypes.UUID,
     startsAt: DataTypes.DATE,
     endsAt: DataTypes.DATE,
-    mode: text,
-    task: text,
-    system: text,
+    mode: text(),
+    task: text(),
+    system: text(),
     circuitVolts: DataTypes.DOUBLE,
-    area: requiredText,
-    equipment: requiredText,
+    area: requiredText(),
+    equipment: requiredText(),
     verdict: { type: DataTypes.TEXT, allowNull: false, defaultValue: 'open' },
-    stopCount: count,
-    openCount: count,
-    cautionCount: count,
-    findingCodes: codes,
-    metCodes: codes,
-    reason: text,
+    stopCount: count(),
+    openCount: count(),
+    cautionCount: count(),
+    findingCodes: codes(),
+    metCodes: codes(),
+    reason: text(),
     reasonById: DataTypes.UUID,
     reasonAt: DataTypes.DATE,
-    searchDocument: requiredText,
+    searchDocument: requiredText(),
     createdAt: { type: DataTypes.DATE, allowNull: false },
     updatedAt: { type: DataTypes.DATE, allowNull: false },
   },
