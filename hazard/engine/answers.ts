@@ -272,14 +272,13 @@ export function readAnswers(content: unknown) {
 }
 
 function readReading(reading: Fields) {
-  const current = field(reading, 'current');
   return {
     point: text(reading, 'point')?.trim(),
     from: one(reading, 'from', E.CONDUCTORS),
     to: one(reading, 'to', E.CONDUCTORS),
     volts: readSigned(field(reading, 'volts')),
-    /** Absent is alternating current; anything else that is no current is not answered. */
-    current: current === undefined ? 'ac' : readOne(current, E.CURRENTS),
+    /** Not answered is alternating current. */
+    current: one(reading, 'current', E.CURRENTS) ?? 'ac',
     lowImpedance: flag(reading, 'lowImpedance'),
     sourceId: text(reading, 'sourceId'),
     at: moment(reading, 'at'),

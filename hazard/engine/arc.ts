@@ -149,6 +149,7 @@ export function arcOf(question: Question, edition: Edition): ArcFacts {
 
   const { kiloamperes, gaps } = transformerOf(question.answers);
   const result = evaluate(question, likelihood, kiloamperes, edition);
+  const isByTable = result.likely && !isLabelled(question.answers);
   return {
     likely: result.likely,
     result,
@@ -156,6 +157,7 @@ export function arcOf(question: Question, edition: Edition): ArcFacts {
       chosen !== undefined &&
       (counted !== chosen || (floor !== undefined && isMilder(chosen, floor, edition))),
     floor,
-    transformerGaps: result.likely && !isLabelled(question.answers) ? gaps : [],
+    // Without a fault current it is that which is open.
+    transformerGaps: isByTable && arcFlash.availableFaultKiloamperes !== undefined ? gaps : [],
   };
 }

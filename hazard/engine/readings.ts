@@ -38,8 +38,7 @@ function isInTime({ at }: ReadingAnswers, startsAt: Moment | undefined, on: Mome
   return startsAt === undefined || at.instant >= startsAt.instant;
 }
 
-const isPlaced = ({ point, volts, current }: ReadingAnswers) =>
-  point !== undefined && volts !== undefined && current !== undefined;
+const isPlaced = ({ point, volts }: ReadingAnswers) => point !== undefined && volts !== undefined;
 
 /** What a reading is of; readings of the same thing govern one another. */
 function subjectOf({ point, from, to, current, sourceId }: ReadingAnswers): string {

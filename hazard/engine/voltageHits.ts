@@ -9,7 +9,7 @@ export function voltageHits(
 ): readonly Hit[] {
   return readings.flatMap(({ index, volts, point, from, to, current, sourceId }) => {
     if (volts === undefined || !isRefused(Math.abs(volts))) return [];
-    const params: Finding['params'] = { index, volts, current: current ?? 'ac' };
+    const params: Finding['params'] = { index, volts, current };
     for (const [name, value] of Object.entries({ point, from, to, sourceId })) {
       if (value !== undefined) params[name] = value;
     }
