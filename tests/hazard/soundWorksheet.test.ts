@@ -28,11 +28,13 @@ const OPTIONAL = [
 ];
 /** Answers whose absence counts as the worse case: what it costs shows elsewhere, or not at all. */
 const WORSE_WHEN_ABSENT = [
-  'supply/movableConductors',
+  'supply/(exposure|movableConductors)',
   'arcFlash/normal',
   'job/occupied',
   'egressReaches',
   'crew/0/worksOnCircuit',
+  // A traveler of its own is read at work.
+  'sources/2/sameConductorsAs',
   'surroundings/groundedSurfaces/0/(kind|inReach|covered)',
   // Without a day of issue the six months run from the test, which is never later.
   'protectiveEquipment/gloves/issuedOn',
