@@ -1,7 +1,7 @@
 import path from 'node:path';
 import { defineConfig } from 'vitest/config';
 
-const alias = [{ find: /^@\//, replacement: `${path.resolve(__dirname)}/` }];
+const alias = [{ find: /^@\//, replacement: `${import.meta.dirname}/` }];
 
 /** A zone far from UTC, so that a date worked out in the wrong zone fails here first. */
 process.env.TZ = 'America/Chicago';

@@ -2,7 +2,8 @@ import compression from 'compression';
 import express from 'express';
 import type { Express } from 'express';
 import helmet from 'helmet';
-import { env, isLoopback, publicUrl } from './env';
+import { env, publicUrl } from './env';
+import { isLoopback } from './loopback';
 import { errorHandler } from './middleware/errorHandler';
 import { jsonBody } from './middleware/jsonBody';
 import { notFoundHandler } from './middleware/notFound';
@@ -16,6 +17,7 @@ import { sessionRouter } from './routes/session';
 import { verifyRouter } from './routes/verify';
 import { worksheetsRouter } from './routes/worksheets';
 import { sessionMiddleware } from './session';
+import { webApp } from './web';
 
 /** The whole server as a function of requests; `main.ts` gives it a port, tests call it as it is. */
 export function buildApp(): Express {
@@ -26,6 +28,7 @@ export function buildApp(): Express {
   app.set('trust proxy', env.TRUST_PROXY);
   app.use(requestId, requestLog, securityHeaders(), compression());
   app.use('/api', buildApi());
+  app.use(webApp());
   app.use(notFoundHandler);
   app.use(errorHandler);
   return app;

@@ -49,13 +49,6 @@ function readEnv(source: NodeJS.ProcessEnv): Env {
   throw new Error(`The environment is not right. ${faults.join('; ')}`);
 }
 
-const LOOPBACK = /^(localhost|127(\.\d{1,3}){3}|\[?::1\]?)$/;
-
-/** True where nothing outside this machine can reach the host. */
-export function isLoopback(host: string): boolean {
-  return LOOPBACK.test(host);
-}
-
 /** The address that people use; links in mail are built from it, never from the Host header. */
 export function publicUrl(): string {
   return (env.PUBLIC_URL ?? `http://${env.HOST}:${env.PORT}`).replace(/\/+$/, '');

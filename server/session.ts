@@ -3,7 +3,8 @@ import connectPgSimple from 'connect-pg-simple';
 import type { RequestHandler } from 'express';
 import session from 'express-session';
 import { pool } from './db';
-import { env, isLoopback, publicUrl } from './env';
+import { env, publicUrl } from './env';
+import { isLoopback } from './loopback';
 import { logger } from './log';
 
 const HOUR = 3_600_000;

@@ -35,7 +35,7 @@ export function asDatabaseUser(program: string, args: string[]): [string, string
 export async function runTool(
   program: string,
   args: string[],
-  env: NodeJS.ProcessEnv = {},
+  env: Record<string, string> = {},
 ): Promise<string> {
   const [file, argv] = asDatabaseUser(program, args);
   // The folder that the command was called from may be closed to the database's user.
@@ -74,7 +74,7 @@ export function portIsTaken(port: number, host: string): Promise<boolean> {
 }
 
 /** Runs a program of PostgreSQL as the calling user, with its output to the terminal. */
-export function stream(program: string, args: string[], env: NodeJS.ProcessEnv): Promise<void> {
+export function stream(program: string, args: string[], env: Record<string, string>): Promise<void> {
   return new Promise((resolve, reject) => {
     const child = spawn(path.join(postgresFolder(), program), args, {
       stdio: 'inherit',
