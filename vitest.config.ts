@@ -31,8 +31,28 @@ export default defineConfig({
       },
       {
         resolve: {
-          alias: [{ find: /^react-native$/, replacement: 'react-native-web' }, ...alias],
-          extensions: ['.web.tsx', '.web.ts', '.tsx', '.ts', '.jsx', '.js', '.mjs', '.json'],
+          alias: [
+            { find: /^react-native$/, replacement: 'react-native-web' },
+            {
+              find: /^react-native-svg$/,
+              replacement: path.resolve(
+                __dirname,
+                'node_modules/react-native-svg/lib/module/ReactNativeSVG.web.js',
+              ),
+            },
+            ...alias,
+          ],
+          extensions: [
+            '.web.tsx',
+            '.web.ts',
+            '.web.js',
+            '.tsx',
+            '.ts',
+            '.jsx',
+            '.js',
+            '.mjs',
+            '.json',
+          ],
         },
         define: { __DEV__: 'true' },
         test: {

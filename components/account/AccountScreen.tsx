@@ -1,8 +1,10 @@
+import { View } from 'react-native';
 import { useUser } from '../api/session';
 import { dateText } from '@/shared/format';
 import { useLocale } from '../i18n/preferences';
 import { useMessages } from '../i18n/useMessages';
-import { Facts, Screen } from '../ui';
+import { space } from '../theme/tokens';
+import { Screen, Text } from '../ui';
 import { Appearance } from './Appearance';
 import { Devices } from './Devices';
 import { Security } from './Security';
@@ -22,9 +24,10 @@ export function AccountScreen() {
     <Screen
       title={user.name}
       subtitle={`${home.role[user.role]}, ${user.email}`}
+      headerEnd={<View />}
       back={{ label: account.back, href: '/' }}
     >
-      <Facts facts={[{ label: account.title, value: qualified }]} />
+      <Text style={{ paddingBottom: space.lg }}>{qualified}</Text>
       <Appearance />
       <Security />
       <Devices />

@@ -1,5 +1,129 @@
-import { View } from 'react-native';
+import { useMemo, useState } from 'react';
+import { StyleSheet, View } from 'react-native';
+import { assess } from '@/hazard';
+import type { Citation as CitationData, Distance } from '@/hazard/types';
+import { sectionGeometry } from '@/shared/drawing/section';
+import { frameOf } from '@/shared/drawing/sectionFrame';
+import { distanceLines, sectionInputOf } from '@/shared/drawing/worksheetDrawing';
+import { distance } from '@/shared/format';
+import { useUnits } from '../i18n/preferences';
+import { useMessages } from '../i18n/useMessages';
+import { space } from '../theme/tokens';
+import { useTheme } from '../theme/useTheme';
+import { Citation, Text } from '../ui';
+import { useDrawingSubject } from '../worksheet/DistanceStrip';
+import { DrawingView } from '../worksheet/DrawingView';
+import { ZoneSwatch, type ZoneName } from '../worksheet/parts/ZoneSwatch';
+import { EXAMPLE_DAY, exampleWorksheet } from './exampleWorksheet';
 
-export function ExampleFigure() {
-  return <View />;
+const PIXELS_PER_FOOT = 36;
+const WIDEST = 520;
+
+interface Line {
+  zone: ZoneName;
+  name: string;
+  pair: Distance;
 }
+
+/** Assessed like any worksheet: the figures beside the sign-in are never typed in. */
+function useExample() {
+  const { account } = useMessages();
+  return useMemo(() => {
+    const assessment = assess(exampleWorksheet, { on: EXAMPLE_DAY });
+    const { boundaries, arcFlash, barricade } = assessment;
+    const lines: Line[] = [];
+    const citations: CitationData[] = [];
+    if (boundaries?.inTable) {
+      const { restricted, limitedFixed } = boundaries;
+      if (restricted !== null && restricted !== 'avoid contact') {
+        lines.push({ zone: 'restricted', name: account.figure.restricted, pair: restricted });
+      }
+      if (limitedFixed)
+        lines.push({ zone: 'limited', name: account.figure.limited, pair: limitedFixed });
+      citations.push(boundaries.citation);
+    }
+    if (arcFlash.arcFlashBoundary) {
+      lines.push({
+        zone: 'arcFlash',
+        name: account.figure.arcFlash,
+        pair: arcFlash.arcFlashBoundary,
+      });
+      citations.push(...arcFlash.citations);
+    }
+    if (barricade)
+      lines.push({ zone: 'barricade', name: account.figure.barricade, pair: barricade });
+    return { assessment, lines, citations };
+  }, [account]);
+}
+
+/** The section of the example, without the rows below its floor: the legend beside it has the figures. */
+function Section({ assessment }: Pick<ReturnType<typeof useExample>, 'assessment'>) {
+  const subject = useDrawingSubject(exampleWorksheet, assessment);
+  const [width, setWidth] = useState(0);
+  const made = useMemo(() => {
+    if (width === 0) return null;
+    const input = sectionInputOf(subject, {
+      width,
+      pixelsPerFoot: PIXELS_PER_FOOT,
+      medium: 'screen',
+    });
+    return { drawing: sectionGeometry(input), floor: frameOf(input).floor };
+  }, [subject, width]);
+  const label = [`${subject.messages.drawing.drawingLabel}.`, ...distanceLines(subject)].join(' ');
+  return (
+    <View
+      role="img"
+      aria-label={label}
+      onLayout={(event) => setWidth(Math.floor(Math.min(WIDEST, event.nativeEvent.layout.width)))}
+      style={[styles.section, { height: made === null ? 360 : made.floor + 3 }]}
+    >
+      {made && <DrawingView drawing={made.drawing} />}
+    </View>
+  );
+}
+
+/** What the tool is about, in one picture: the distances around a part that counts as live. */
+export function ExampleFigure() {
+  const { account } = useMessages();
+  const units = useUnits();
+  const { colors } = useTheme();
+  const { assessment, lines, citations } = useExample();
+  return (
+    <View style={styles.figure}>
+      <Section assessment={assessment} />
+      <View style={styles.legend}>
+        <Text variant="value">{account.figure.title}</Text>
+        {lines.map(({ zone, name, pair }) => (
+          <View key={zone} style={[styles.line, { borderTopColor: colors.hair }]}>
+            <ZoneSwatch zone={zone} />
+            <View>
+              <Text variant="signal" style={styles.distance}>
+                {distance(pair, units)}
+              </Text>
+              <Text variant="note">{name}</Text>
+            </View>
+          </View>
+        ))}
+        <View style={[styles.source, { borderTopColor: colors.hair }]}>
+          <Citation lead={account.figure.example} citation={citations} confidence={false} />
+        </View>
+      </View>
+    </View>
+  );
+}
+
+const styles = StyleSheet.create({
+  figure: { flexDirection: 'row', alignItems: 'flex-start', gap: space.xl },
+  section: { flex: 1, minWidth: 0, overflow: 'hidden' },
+  legend: { width: 236 },
+  line: {
+    flexDirection: 'row',
+    alignItems: 'center',
+    gap: space.sm,
+    borderTopWidth: 1,
+    marginTop: space.xs,
+    paddingTop: space.xs,
+  },
+  distance: { fontSize: 22, lineHeight: 26 },
+  source: { borderTopWidth: 1, marginTop: space.xs, paddingTop: space.sm },
+});

@@ -1,5 +1,5 @@
 import { useSetAtom } from 'jotai';
-import type { ReactNode } from 'react';
+import { lazy, Suspense, type ReactNode } from 'react';
 import { StyleSheet, View } from 'react-native';
 import { deviceLocaleAtom } from '../api/deviceChoices';
 import { LanguageSwitch } from '../i18n/LanguageSwitch';
@@ -9,7 +9,11 @@ import { rule, space } from '../theme/tokens';
 import { useBreakpoint } from '../theme/useBreakpoint';
 import { useTheme } from '../theme/useTheme';
 import { CautionFoot, Mark, Text, useDocumentTitle, webProps } from '../ui';
-import { ExampleFigure } from './ExampleFigure';
+
+/** Read only on a wide screen: a phone that signs in does not wait for the tables. */
+const ExampleFigure = lazy(() =>
+  import('./ExampleFigure').then((module) => ({ default: module.ExampleFigure })),
+);
 
 interface Props {
   /** Names the browser's tab, and the form beside the figure on a wide screen. */
@@ -67,7 +71,9 @@ export function SignedOutFrame({ title, purpose = false, foot, children }: Props
         <View role="complementary" style={styles.left}>
           <Purpose large />
           <View style={[styles.figure, line]}>
-            <ExampleFigure />
+            <Suspense fallback={null}>
+              <ExampleFigure />
+            </Suspense>
           </View>
           <View style={[styles.wideFoot, line]}>
             <CautionFoot />
@@ -136,7 +142,13 @@ const styles = StyleSheet.create({
   formWide: { gap: space.lg, flex: 1, paddingTop: space.xxl },
   figure: { paddingTop: space.xl, flex: 1 },
   wideFoot: { paddingTop: space.lg },
-  column: { width: '100%', alignSelf: 'center', paddingTop: space.sm, gap: space.md },
+  column: {
+    width: '100%',
+    alignSelf: 'center',
+    paddingTop: space.sm,
+    paddingBottom: space.lg,
+    gap: space.md,
+  },
   columnTablet: { maxWidth: 560 },
   language: { alignSelf: 'flex-end' },
   purpose: { gap: space.sm, paddingTop: space.xs },
@@ -147,5 +159,5 @@ const styles = StyleSheet.create({
   nameWide: { fontSize: 52, lineHeight: 60, letterSpacing: -0.26 },
   taglineWide: { fontSize: 26, lineHeight: 36, maxWidth: 640 },
   form: { gap: space.md, paddingTop: space.lg, marginTop: space.xxs },
-  foot: { marginTop: 'auto', paddingBottom: space.lg, paddingTop: space.xxs },
+  foot: { marginTop: 'auto' },
 });

@@ -109,33 +109,37 @@ export function Button(props: ButtonProps) {
     'aria-controls': props['aria-controls'],
     'aria-busy': busy,
   });
-  const pressable = (
+  const box = StyleSheet.flatten([
+    styles.box,
+    kind === 'quiet' && styles.quiet,
+    kind === 'stop' && styles.stop,
+    (large === true || kind === 'onBar') && styles.large,
+    look.box,
+    style,
+  ]);
+  const inside = <Inside {...props} kind={kind} color={look.text} />;
+  const named = id === undefined ? {} : { id };
+  if (href !== undefined && usable) {
+    // `Link` hands its child a style that is an object, never one that depends on the press.
+    return (
+      <Link href={href} asChild>
+        <Pressable role="link" {...aria} {...named} style={box}>
+          {inside}
+        </Pressable>
+      </Link>
+    );
+  }
+  return (
     <Pressable
       role={href === undefined ? 'button' : 'link'}
       {...aria}
-      {...(id !== undefined && { id })}
+      {...named}
       disabled={!usable}
       onPress={href === undefined ? onPress : undefined}
-      style={({ pressed }) =>
-        StyleSheet.flatten([
-          styles.box,
-          kind === 'quiet' && styles.quiet,
-          kind === 'stop' && styles.stop,
-          (large === true || kind === 'onBar') && styles.large,
-          look.box,
-          pressed && styles.pressed,
-          style,
-        ])
-      }
+      style={({ pressed }) => (pressed ? { ...box, ...styles.pressed } : box)}
     >
-      <Inside {...props} kind={kind} color={look.text} />
+      {inside}
     </Pressable>
-  );
-  if (href === undefined || !usable) return pressable;
-  return (
-    <Link href={href} asChild>
-      {pressable}
-    </Link>
   );
 }
 

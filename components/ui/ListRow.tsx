@@ -36,19 +36,12 @@ export function ListRow({
 }: ListRowProps) {
   const { colors } = useTheme();
   const leads = href !== undefined || onPress !== undefined;
-  const row = (
-    <Pressable
-      role={href !== undefined ? 'link' : leads ? 'button' : undefined}
-      onPress={href === undefined ? onPress : undefined}
-      disabled={!leads}
-      style={({ pressed }) =>
-        StyleSheet.flatten([
-          styles.row,
-          { borderTopColor: colors.hair, borderTopWidth: first === true ? 0 : 1 },
-          pressed && { backgroundColor: colors.tone },
-        ])
-      }
-    >
+  const box = StyleSheet.flatten([
+    styles.row,
+    { borderTopColor: colors.hair, borderTopWidth: first === true ? 0 : 1 },
+  ]);
+  const inside = (
+    <>
       {(mark !== undefined || icon !== undefined) && (
         <View style={styles.mark}>
           {mark !== undefined ? (
@@ -79,13 +72,22 @@ export function ListRow({
             <Icon name="right" color="blue" />
           </View>
         ))}
-    </Pressable>
+    </>
   );
-  if (href === undefined) return row;
+  if (href !== undefined) {
+    return (
+      <Link href={href} asChild>
+        <Pressable role="link" style={box}>
+          {inside}
+        </Pressable>
+      </Link>
+    );
+  }
+  if (onPress === undefined) return <View style={box}>{inside}</View>;
   return (
-    <Link href={href} asChild>
-      {row}
-    </Link>
+    <Pressable role="button" onPress={onPress} style={box}>
+      {inside}
+    </Pressable>
   );
 }
 
