@@ -11,6 +11,9 @@ export const boss = new PgBoss({
   connectionString: env.DATABASE_URL,
   application_name: 'wideberth',
   migrate: false,
+  // Housekeeping and the timetable are for servers, not for tests.
+  supervise: env.NODE_ENV !== 'test',
+  schedule: env.NODE_ENV !== 'test',
   max: 3,
 });
 boss.on('error', (error) => logger.warn({ message: error.message }, 'job queue'));

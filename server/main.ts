@@ -4,6 +4,7 @@ import { buildApp } from './app';
 import { closeDatabase } from './db';
 import { env } from './env';
 import { logger } from './log';
+import { startWorker, stopWorker } from './worker';
 
 export interface RunningServer {
   port: number;
@@ -21,6 +22,7 @@ export async function startServer(): Promise<RunningServer> {
       resolve();
     });
   });
+  await startWorker();
   const { port } = server.address() as AddressInfo;
   return {
     port,
@@ -31,6 +33,7 @@ export async function startServer(): Promise<RunningServer> {
       const sweep = setInterval(() => server.closeIdleConnections(), 100);
       await closed;
       clearInterval(sweep);
+      await stopWorker();
       await closeDatabase();
       logger.info('stopped');
     },
