@@ -1,4 +1,4 @@
-import type { Finding, RequiredItem, Severity } from '@/hazard/types';
+import type { Finding, RequiredItem } from '@/hazard/types';
 import { dateText, list } from '../format';
 import type { Locale, Units } from '../user';
 import { enumWord, isEnumGroup } from './enumWord';
@@ -6,6 +6,8 @@ import { messages, type Messages } from './languages';
 import { figure, fill, lowerFirst, noBreak, type Resolve, type Value } from './template';
 
 type Params = Readonly<Record<string, string | number>>;
+/** What of a finding its words rest on. */
+type Said = Pick<Finding, 'code' | 'severity' | 'path' | 'params'>;
 type Entry = Readonly<Record<string, string>>;
 
 const DATE = /^\d{4}-\d{2}-\d{2}$/;
@@ -129,14 +131,16 @@ class Reader {
   private who(): Value | null {
     const given = textOf(this.params, 'name', 'who');
     if (given !== null) return name(given);
-    const index = this.index('crew');
+    const { index: position } = this.params;
+    const isOfGloves = this.path.startsWith('/protectiveEquipment') && typeof position === 'number';
+    const index = isOfGloves ? position : this.index('crew');
     return index === null ? null : own(this.words.common.fallback.person_number(index + 1));
   }
 
   private point(): Value | null {
-    const { point } = this.params;
+    const { point, number } = this.params;
     if (typeof point === 'string' && point !== '') return name(point);
-    return typeof point === 'number' ? own(this.words.common.fallback.point_number(point)) : null;
+    return typeof number === 'number' ? own(this.words.common.fallback.point_number(number)) : null;
   }
 
   private pair(): Value | null {
@@ -181,24 +185,22 @@ class Reader {
   }
 }
 
-function entryOf(locale: Locale, code: string): Entry {
-  const all: Readonly<Record<string, Entry>> = messages(locale).findings;
-  return all[code.endsWith('.unanswered') ? 'unanswered' : code] ?? {};
-}
-
 /**
  * The sentence of a severity. Where one rule asks for several things it has one
- * for each limit that was passed, or for each field that it leads to.
+ * for each limit that was passed, for what is not answered, or for each field
+ * that it leads to. A finding is never without a sentence.
  */
-function sentenceOf(entry: Entry, severity: Severity, path: string, params: Params): string {
+function sentenceOf(entry: Entry, words: Messages, finding: Said): string {
+  const { severity, path, params } = finding;
   const field = steps(path)
     .filter((step) => !/^\d+$/.test(step))
     .at(-1);
   return (
     entry[`${severity}:${String(params['limit'])}`] ??
+    (params['field'] === undefined ? undefined : entry[`${severity}:unanswered`]) ??
     entry[`${severity}/${String(field)}`] ??
     entry[severity] ??
-    ''
+    (severity === 'open' ? words.findings.unanswered.open : words.common.fallback.sentence)
   );
 }
 
@@ -208,15 +210,16 @@ function sentenceOf(entry: Entry, severity: Severity, path: string, params: Para
  */
 export function findingWords(
   locale: Locale,
-  finding: Pick<Finding, 'code' | 'severity' | 'path' | 'params'>,
+  finding: Said,
   units: Units = 'feet',
 ): { title: string; text: string } {
-  const { code, severity, path, params } = finding;
-  const entry = entryOf(locale, code);
-  const reader = new Reader(locale, units, params, path);
-  const sentence = sentenceOf(entry, severity, path, params);
+  const words = messages(locale);
+  const { unanswered, ...rules }: Readonly<Record<string, Entry>> = words.findings;
+  const entry = finding.code.endsWith('.unanswered') ? unanswered : rules[finding.code];
+  const reader = new Reader(locale, units, finding.params, finding.path);
+  const sentence = entry ? sentenceOf(entry, words, finding) : words.common.fallback.sentence;
   return {
-    title: entry['title'] ?? code,
+    title: entry?.['title'] ?? finding.code,
     text: noBreak(fill(sentence, reader.resolve, reader.fallback)),
   };
 }

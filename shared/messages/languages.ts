@@ -15,8 +15,7 @@ function keptTogether<T>(words: T): T {
       keptTogether((words as (...a: unknown[]) => unknown)(...args))) as T;
   }
   if (Array.isArray(words)) return words.map(keptTogether) as T;
-  if (typeof words !== 'object' || words === null) return words;
-  const entries = Object.entries(words).map(([key, value]) => [key, keptTogether(value)]);
+  const entries = Object.entries(words as object).map(([key, value]) => [key, keptTogether(value)]);
   return Object.fromEntries(entries) as T;
 }
 

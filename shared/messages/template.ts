@@ -48,6 +48,7 @@ function upperFirst(text: string): string {
 
 type Figure = (locale: Locale, value: number, units: Units) => string;
 const FEET_TO_INCHES = 12;
+const MILLISECONDS_PER_MINUTE = 60_000;
 
 /** What somebody typed; in metres also as feet, to be held against a limit printed in feet. */
 function inBoth(inches: number, units: Units): string {
@@ -62,7 +63,7 @@ const FIGURES: Readonly<Record<string, Figure>> = {
   s: format.seconds,
   cal: format.calories,
   reading: format.reading,
-  hours: (locale, value) => format.quantity(locale, value, 'h', 1),
+  minutes: (_, value) => format.durationText(value * MILLISECONDS_PER_MINUTE),
   inches: (_, value, units) => inBoth(value, units),
   feet: (_, value, units) => inBoth(value * FEET_TO_INCHES, units),
   /* A printed limit: its metres are another printed figure, so they are not worked out here. */

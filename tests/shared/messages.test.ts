@@ -4,6 +4,7 @@ import * as hazard from '@/hazard';
 import { PERMIT_EXEMPTIONS, PERMIT_REASONS } from '@/hazard/engine/permit';
 import { REQUIRED_ITEM_IDS } from '@/hazard/engine/items';
 import { COMMON_CITATION_IDS } from '@/hazard/citations';
+import { rules as hazardRules } from '@/hazard/rules';
 import { PROBLEMS } from '@/shared/problem';
 import * as record from '@/shared/record';
 import * as register from '@/shared/register';
@@ -25,21 +26,33 @@ import {
 const LOCALES = user.LOCALES;
 type Severity = hazard.Severity;
 
+/** What the functions among the words are tried with: counts, names, flags and the caution's blanks. */
+const SAMPLES: readonly unknown[][] = [
+  [2, 2, 2, 2],
+  [1, 1, 1, 1],
+  [0, 1, 0, 1],
+  [1, 0, 1, 0],
+  ['X', 'X', 'X', 'X'],
+  ['X', 1, 'X', 1],
+  ['X', 2, 'X', 2],
+  [true, true, true, true],
+  [{ editions: 'E', contact: '911', place: 'D' }],
+  [['X', 'X']],
+];
+
 /** Every text in a set of words, with functions called, by its path. */
 function textsOf(words: unknown, path = ''): [string, string][] {
   if (typeof words === 'string') return [[path, words]];
   if (typeof words === 'function') {
     const write = words as (...args: unknown[]) => unknown;
-    const sample = { editions: 'E', contact: '911', place: 'D' };
-    for (const args of [[2, 2, 2, 2], ['X', 'X', 'X', 'X'], [sample], [['X']]]) {
+    return SAMPLES.flatMap((args) => {
       try {
         const texts = textsOf(write(...args), path);
-        if (!texts.some(([, text]) => text.includes('undefined'))) return texts;
+        return texts.some(([, text]) => /undefined|NaN|true|\[object/.test(text)) ? [] : texts;
       } catch {
-        // This function takes something else.
+        return []; // This function takes something else.
       }
-    }
-    return [];
+    });
   }
   if (typeof words !== 'object' || words === null) return [];
   return Object.entries(words).flatMap(([key, value]) =>
@@ -191,7 +204,8 @@ describe('coverage of every value', () => {
 
 describe('both languages', () => {
   it('have the same keys', () => {
-    expect(spanish.map(([path]) => path)).toEqual(english.map(([path]) => path));
+    const paths = (texts: [string, string][]) => [...new Set(texts.map(([path]) => path))];
+    expect(paths(spanish)).toEqual(paths(english));
   });
 
   /** Names, units, codes and words that are the same in both languages. */
@@ -199,10 +213,10 @@ describe('both languages', () => {
     /^(Wideberth|English|Español|CAT I{1,3}V?|No|Total|Normal|Error|[Ss]upervisor|SHA-256|Personal|Control|PDF|CSV|PIN|ID|AED|[Vv]olts|Local|A|N|G|X|E|D|2|911|ft|m|W|V)?$/;
 
   it('say different things but for a list of names', () => {
-    const words = new Map(spanish);
+    const words = new Set(spanish.map(([path, text]) => `${path}: ${text}`));
     const same = english.filter(
       ([path, text]) =>
-        words.get(path) === text &&
+        words.has(`${path}: ${text}`) &&
         /\p{L}{2}/u.test(text.replace(/\{[^}]*\}/g, '')) &&
         !SAME.test(text),
     );
@@ -229,7 +243,7 @@ describe('both languages', () => {
 
   it('hold no straight hole and no double space', () => {
     for (const [path, text] of [...english, ...spanish]) {
-      expect(text, path).not.toMatch(/undefined|NaN|\[object|\s{2}/);
+      expect(text, path).not.toMatch(/undefined|NaN|\[object|[^\S\n]{2}/);
     }
   });
 });
@@ -305,9 +319,9 @@ describe('findingWords', () => {
         volts: 118.5,
       }),
     ).toMatch(/^A1: 118\.5 V is present, B to N\./);
-    expect(text('absence.pairs-missing', 'open', '/proof/readings', { point: 2 })).toMatch(
-      /^Point of work 2: readings are missing\./,
-    );
+    expect(
+      text('absence.pairs-missing', 'open', '/proof/readings', { point: '', number: 2 }),
+    ).toMatch(/^Point of work 2: readings are missing\./);
     expect(text('absence.pairs-missing', 'open', '/proof/readings', { point: '' })).toMatch(
       /^A point of work: /,
     );
@@ -355,6 +369,34 @@ describe('findingWords', () => {
     );
   });
 
+  it('writes each figure with its unit', () => {
+    const text = (code: string, path: string, params: Record<string, string | number>) =>
+      findingWords('en-US', finding(code, 'stop', path, params)).text.replaceAll('\u00a0', ' ');
+    expect(text('sources.neutral-not-checked', '/proof/neutralAmperes', { amperes: 2.5 })).toMatch(
+      /^2\.5 A flows/,
+    );
+    const fault = { limit: 'fault-current-exceeded', value: 50, allowed: 25 };
+    expect(text('arc.study-needed', '/arcFlash', fault)).toContain('50 kA, is more than');
+    const clearing = { limit: 'clearing-time-exceeded', value: 0.5, allowed: 0.03 };
+    expect(text('arc.study-needed', '/arcFlash', clearing)).toContain('0.5 s, is longer');
+    expect(text('window.too-long', '/job/endsAt', { minutes: 750 })).toContain('(12 h 30 min)');
+    const ladder = { standingLevelFeet: 5, limit: 4 };
+    expect(text('surroundings.ladder-top', '/surroundings/ladder', ladder)).toContain(
+      'on, 5 ft 0 in, is too high on this ladder; highest 4 ft 0 in.',
+    );
+    const barricade = { inches: 20, requiredInches: 42 };
+    expect(text('surroundings.barricade', '/surroundings/barricadeInches', barricade)).toContain(
+      'at 1 ft 8 in, is nearer than it must be: 3 ft 6 in.',
+    );
+  });
+
+  it('names the person of the gloves by number where no name is given', () => {
+    const gloves = finding('shock.gloves-missing', 'stop', '/protectiveEquipment/gloves', {
+      index: 1,
+    });
+    expect(findingWords('en-US', gloves).text).toMatch(/^Person 2 of the crew enters/);
+  });
+
   it('lists several values and keeps words that it does not know', () => {
     const fits = { system: '208Y/120', fits: '480Y/277, 480 delta' };
     expect(
@@ -369,11 +411,45 @@ describe('findingWords', () => {
     ).toMatch(/^Submarine: this sheet/);
   });
 
-  it('shows an unknown code rather than nothing', () => {
-    expect(findingWords('en-US', finding('new.rule', 'stop'))).toEqual({
+  it('says so where it has no words, rather than nothing', () => {
+    const { sentence } = messages('en-US').common.fallback;
+    expect(findingWords('en-US', finding('new.rule', 'open'))).toEqual({
       title: 'new.rule',
-      text: '',
+      text: sentence,
     });
+    expect(findingWords('en-US', finding('sources.none', 'caution')).text).toBe(sentence);
+    expect(findingWords('en-US', finding('window.over', 'open', '/job/endsAt')).text).toBe(
+      '“Work ends” is not answered. Answer it in section 1.',
+    );
+  });
+
+  it.each(LOCALES)('has a sentence for each rule at its own severity (%s)', (locale) => {
+    const { sentence } = messages(locale).common.fallback;
+    for (const { code, severity } of hazardRules) {
+      expect(findingWords(locale, finding(code, severity)).text, code).not.toBe(sentence);
+    }
+  });
+
+  it('has words for all that a worksheet without answers, and a bad one, is told', () => {
+    const energized = { decision: { mode: 'energized' as const } };
+    const bad = {
+      ...energized,
+      job: { task: 'replace luminaire' as const },
+      supply: { damage: true, tripped: 'cause not found' as const },
+      crew: [{ name: 'Ines', lead: true, qualified: false, closest: 'restricted' as const }],
+    };
+    const { sentence } = messages('en-US').common.fallback;
+    for (const content of [{}, energized, bad]) {
+      for (const stage of ['plan', 'work', 'close-out'] as const) {
+        const { findings } = hazard.assess(content, { on: '2026-12-01T09:00:00-06:00', stage });
+        for (const found of findings) {
+          const { text } = findingWords('en-US', found);
+          expect(text, found.code).toMatch(/^[\p{Lu}“\d].*\.$/u);
+          expect(text, found.code).not.toBe(sentence);
+          expect(text, found.code).not.toContain('A field');
+        }
+      }
+    }
   });
 });
 
@@ -394,6 +470,7 @@ describe('the other words', () => {
       plain(itemWords('en-US', { id: 'arc-flash-suit-hood', params: { rating: 25 } })),
     ).toContain('25 cal/cm² or more');
     expect(itemWords('en-US', { id: 'new-item', params: {} })).toBe('New-item');
+    expect(itemWords('en-US', { id: '{new}', params: {} })).toBe('Not known');
   });
 
   it('keeps an unknown value of a list', () => {

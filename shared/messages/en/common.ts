@@ -152,6 +152,7 @@ export const common = {
   },
   /** For what a finding leaves out. */
   fallback: {
+    sentence: 'A rule speaks here that this version has no words for. Load the page again.',
     way: 'A way it can be live',
     way_number: (n: number) => `Way ${n}`,
     who: 'Somebody',
@@ -163,7 +164,5 @@ export const common = {
     item: 'A piece of equipment',
     topic: 'a topic',
     field: 'A field',
-    requiredClass: 'the class that is asked for',
-    amount: 'more than is admitted',
   },
 };

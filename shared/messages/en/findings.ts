@@ -12,7 +12,8 @@ export const findings = {
   'supply.voltage-not-of-system': {
     title: 'Circuit voltage does not fit the system',
     stop: '[{volts:V} ]is no circuit voltage of this system[ ({system})]. Correct the system or the voltage; 120 V beside 480Y/277 V comes from a transformer and is a system of its own.',
-    open: 'System and circuit voltage cannot be compared yet. Read both off the panel and answer in section 2.',
+    open: 'The circuit voltage is not answered. Read it off the panel and answer in section 2.',
+    'open/system': 'The system is not answered. Read it off the panel and answer in section 2.',
   },
   'supply.readings-do-not-fit': {
     title: 'Readings do not fit the system',
@@ -43,7 +44,9 @@ export const findings = {
   'sources.egress-unknown': {
     title: 'Emergency egress supply not known',
     stop: 'Nobody knows where the emergency egress supply comes from. Find it before anything is opened: charge lamps, emergency panels, the building’s drawings.',
-    open: 'Where the emergency egress supply comes from is not answered, or two answers exclude each other. Look for charge lamps and emergency panels, then answer in section 3.',
+    open: 'None after checking stands beside a supply. Look again, then keep one of the two in section 3.',
+    'open:unanswered':
+      'Where the emergency egress supply comes from is not answered. Look for charge lamps and emergency panels, then answer in section 3.',
   },
   'sources.egress-not-listed': {
     title: 'Emergency supply is not listed',
@@ -62,26 +65,38 @@ export const findings = {
   'sources.not-locked': {
     title: 'Opening not locked as required',
     stop: '{way} is not held open as it must be[ (now: {held})]. Hang a lock and a tag. A tag alone needs a second measure; a lock alone serves one device within one shift; holding it in hand serves a plug or battery connector only.',
-    open: '{way}: how it is held open, or its lock number, is not answered. Enter both in section 3.',
+    open: '{way}: how it is held open is not answered. Hang a lock and a tag, then enter it in section 3.',
+    'open/openedAt':
+      '{way} is in the hands of the person who works, and where it is opened is not answered. Choose it in section 3.',
+    'open/lockNumber':
+      '{way}: the number of its lock is not entered. Read it off the lock and enter it in section 3.',
   },
   'sources.battery-connected': {
     title: 'Battery unit still connected',
     stop: '{way} is still connected. Its output may be at line voltage with every breaker off. Part the connector in the luminaire, then mark it here; if it cannot be parted, this sheet cannot go on.',
-    open: '{way}: not marked as parted, or the battery unit to be replaced is not listed. List it and part its connector, then mark it in section 3.',
+    open: 'A battery unit is to be replaced and none is listed. Add it in section 3 and part its connector.',
+    'open/openedAt':
+      '{way}: not marked as parted. Part the connector in the luminaire, then mark it in section 3.',
   },
   'sources.by-unqualified': {
     title: 'Locking or testing by someone not qualified',
-    stop: '{who} locks or tests and is not a qualified person of this crew. Give it to one who is.',
-    open: 'Not said who locks[ {way}] or who tests, or whether they are qualified. Name a qualified person of this crew.',
+    stop: '{who} locks or tests[ {way}] and is not a qualified person of this crew. Give it to one who is.',
+    open: 'Whether {who}, who locks or tests[ {way}], is a qualified person is not answered. Answer it in section 10.',
+    'open:unanswered':
+      'Not said who opens and locks, or who tests[: {way}]. Name a qualified person of this crew.',
   },
   'sources.traveler-unlisted': {
     title: 'Traveler not listed',
-    open: 'Switches in two or more places, or switching not answered, and no traveler is listed. Walk to each switch, then add the traveler or answer the switching in section 2.',
+    open: 'There are switches in two or more places, and no traveler is listed. Walk to each switch, then add the traveler in section 3.',
+    'open:unanswered':
+      'How it is switched is not answered, so a traveler may be missing. Walk the area, then answer in section 2.',
   },
   'sources.shared-neutral': {
     title: 'Shared neutral',
     stop: '{way}: not every phase that shares the neutral is opened. Open and lock all of them; a parted neutral can stand at line voltage.',
-    open: 'The neutral is shared, and its phases are not all listed and marked as opened. Add the shared neutral in section 3 and answer whether all its phases are open.',
+    open: 'The neutral is shared and no shared neutral is listed. Add it in section 3, with all its phases.',
+    'open/allPhasesOpened':
+      '{way}: not said whether every phase that shares the neutral is opened. Trace them, then answer in section 3.',
   },
   'sources.opened-before-transfer': {
     title: 'Opened ahead of the transfer switch',
@@ -106,18 +121,23 @@ export const findings = {
   'sources.control-unlisted': {
     title: 'Control wiring not listed',
     open: 'The switching is automatic or not known, and no control wiring is listed. Find what feeds the sensor, relay or dimming pair, and add it in section 3.',
+    'open:unanswered':
+      'How it is switched is not answered, so control wiring may be missing. Answer it in section 2.',
   },
   'sources.stored-energy': {
     title: 'Stored energy',
-    open: 'Stored energy is not answered or not discharged. Wait, discharge and measure the driver, ballast or battery output, then enter it with the proof.',
+    open: 'Stored energy is not discharged. Wait, discharge and measure the driver, ballast or battery output, then enter it with the proof.',
+    'open:unanswered':
+      'Stored energy is not answered. Measure the driver, ballast or battery output, discharge it, then enter it with the proof.',
   },
   'sources.not-everyone-locked': {
     title: 'Not everyone has a lock on it',
-    open: '{way}: not everyone who works on the circuit has a lock on it[ (missing: {who})]. Each hangs their own, on the device or the group lock box.',
+    open: '{way}: not everyone who works on the circuit has a lock on it[ (missing: {names})]. Each hangs their own, on the device or the group lock box.',
   },
   'decision.unjustified': {
     title: 'Energized without an admitted reason',
     stop: 'Energized work is planned and no admitted reason is given[ for this task ({task})]. Switch it off, or give a reason that the regulation admits.',
+    open: 'Energized work is planned, and which reasons are admitted follows from the task. Choose the task in section 1.',
   },
   'decision.explanation-missing': {
     title: 'Explanation missing',
@@ -126,7 +146,9 @@ export const findings = {
   'decision.below-fifty-not-so': {
     title: 'Not everything is below 50 V',
     stop: '50 V or more is worked on or exposed[ ({volts:V})]. Below 50 V is then no reason; switch it off.',
-    open: 'Below 50 V is the reason, and the voltages are not all answered. Enter the highest voltage worked on, and whether anything higher is exposed.',
+    open: 'Below 50 V is the reason, and the highest voltage worked on is not answered. Enter it in section 2.',
+    'open/higherVoltsExposed':
+      'Below 50 V is the reason, and not said whether anything higher is exposed. Look, then answer in section 2.',
   },
   'decision.testing-is-not-repair': {
     title: 'Testing is no reason to repair live',
@@ -134,20 +156,38 @@ export const findings = {
   },
   'decision.infeasible-not-admitted': {
     title: 'Ground not admitted',
-    stop: 'This ground does not make it infeasible to switch off. Convenience, tenants, lost sales and overtime are not admitted. Plan the outage.',
+    stop: 'This ground does not make it infeasible to switch off. Convenience, tenants, lost sales and overtime are not admitted, and testing is no ground for a repair. Plan the outage.',
     open: 'Why it cannot be done with the power off is not answered. Choose it in section 4.',
+    'open/task':
+      'Testing is the ground, and the task is not answered. Choose the task in section 1.',
     caution:
       'A continuous industrial process is given as the ground. A building’s lighting is hardly ever part of one. Have the supervisor look at it.',
   },
   'decision.alternative-possible': {
     title: 'Another way is possible',
     stop: 'Temporary light is possible, so darkness is no reason. Set up the light and switch off.',
-    open: 'The other ways are not all asked for: who refused the outage, which hazard, whether temporary light is possible. Answer them in section 4.',
+    open: 'Another way is not ruled out yet. Answer it in section 4.',
+    'open/outageRefusedBy':
+      'Nobody who runs the building is named as having refused the outage. Ask them, then enter who refused.',
+    'open/hazard':
+      'Which greater hazard switching off would bring is not answered. Choose it in section 4.',
+    'open/temporaryLight':
+      'Whether temporary light is possible is not answered. Look, then answer in section 4.',
   },
   'permit.missing': {
     title: 'Energized work permit',
-    stop: 'The permit ends before the work, or its signer is on the crew. Get one that lasts, signed by someone who is not.',
+    stop: 'The permit does not hold for this work. Get one that does.',
+    'stop/approvedBy':
+      'The permit is signed by someone of the crew[, {who}]. Get it signed by someone who is not.',
+    'stop/validUntil':
+      'The permit ends before the work does. Get one that lasts, or end the work earlier.',
     open: 'An energized work permit is required. Enter its number, who signed it, and until when it holds.',
+    'open/number':
+      'An energized work permit is required, and its number is not entered. Get the permit, then enter its number.',
+    'open/approvedBy':
+      'An energized work permit is required, and who signed it is not entered. Enter their name.',
+    'open/validUntil':
+      'An energized work permit is required, and until when it holds is not entered. Enter the date and time.',
   },
   'absence.source-not-opened': {
     title: 'Opening not confirmed',
@@ -161,16 +201,28 @@ export const findings = {
   },
   'absence.meter-category': {
     title: 'Meter not rated for this',
-    stop: 'The tester[ ({category}, {ratedVolts:V})] is not rated for this place[: {requiredCategory:category}, {requiredVolts:V} or more]. Use one that is, leads included.',
+    stop: 'The tester is not rated for this place. Use one that is, leads included.',
+    'stop/category':
+      'The tester[, {category},] is not rated for this place. Fixed wiring needs CAT III or IV, a service CAT IV, leads included.',
+    'stop/ratedVolts':
+      'The tester is rated[ {ratedVolts:V}] below the supply here[, {volts:V} phase to phase]. Use one rated for it, leads included.',
     open: 'Category or rated voltage of the tester is not answered. Read both off the meter and the leads, and enter the lowest.',
+    'open/atService':
+      'Not said whether this is at the service, where a meter needs CAT IV. Answer it in section 2.',
   },
   'absence.not-proved': {
     title: 'Tester not proved before and after',
     open: 'The tester is not proved on a known live source before and after the test. Prove it, then mark both.',
+    'open/provedBefore':
+      'The tester is not proved on a known live source before the test. Prove it, then test and mark it.',
+    'open/provedAfter':
+      'The tester is not proved on a known live source after the test. Prove it again, then mark it; if it fails, the readings count for nothing.',
   },
   'absence.pairs-missing': {
     title: 'Readings missing',
     open: '{point}: readings are missing[ ({pairs})]. Test every pair at every point of work, and enter each reading.',
+    'open/pointsOfWork':
+      'How many points of work there are is not answered, so no test can be complete. Count them and answer in section 1.',
   },
   'absence.voltage-present': {
     title: 'Voltage present',
@@ -187,11 +239,11 @@ export const findings = {
   },
   'absence.source-not-tested': {
     title: 'A way was not tested',
-    open: '{way}: its conductors are not read[ at {points}]. Read each to ground and to each phase at every point that it reaches.',
+    open: '{way}: its conductors are not read[ at {point}][ to {to:conductor}]. Read each to ground and to each phase at every point that it reaches.',
   },
   'absence.dc-not-tested': {
     title: 'DC not tested',
-    open: '{way}: no DC reading[ at {points}]. An AC range does not see a battery or a driver output. Switch to DC and read them.',
+    open: '{way}: no DC reading[ at {point}]. An AC range does not see a battery or a driver output. Switch to DC and read them.',
   },
   'absence.leads-not-inspected': {
     title: 'Leads not inspected',
@@ -199,8 +251,9 @@ export const findings = {
   },
   'shock.unqualified-inside': {
     title: 'Someone not qualified comes too close',
-    stop: '{who} is not qualified and comes inside a shock boundary[ ({closest})]. Keep them outside the limited boundary, or give them a qualified escort where limited admits one.',
-    open: '{who} comes inside a shock boundary, and whether they are qualified is not answered. Answer it in section 10.',
+    stop: '{who} is not qualified and comes too close[: {closest}]. Keep them outside the limited boundary, or give them a qualified escort where limited admits one.',
+    open: '{who} comes close[: {closest}], and whether they are qualified is not answered. Answer it in section 10.',
+    'open:unanswered': 'How close {who} comes is not answered. Answer it in section 10.',
   },
   'shock.gloves-missing': {
     title: 'Rubber gloves missing',
@@ -209,7 +262,7 @@ export const findings = {
   },
   'shock.gloves-class': {
     title: 'Glove class too low',
-    stop: 'The gloves of {who}[, class {gloveClass},] are not enough[ for {volts:V}]. Take class {requiredClass} or better.',
+    stop: 'The gloves of {who}[, class {class},] are not enough[ for {volts:V}]. Take a pair of a higher class; section 8 names it.',
     open: 'The class of the gloves of {who} is not answered. Read it off the cuff.',
   },
   'shock.gloves-overdue': {
@@ -228,8 +281,12 @@ export const findings = {
   },
   'shock.grounded-surface': {
     title: 'Grounded metal in reach',
-    stop: '[{kind:surfaceKind}: ]grounded metal is in reach and neither covered nor kept clear as this work asks. Cover it with a rubber blanket; on a lift use an insulating one.',
+    stop: '[{kind:surfaceKind}: ]grounded metal is in reach and neither covered nor kept clear as this work asks. Cover it with a rubber blanket, or keep everything but gloved hands and probes off it where that is admitted.',
+    'stop/access':
+      'The lift does not insulate, and its basket is grounded metal in reach. Use an insulating lift, or switch off.',
     open: 'Grounded metal in reach is not answered. Look for the ceiling grid, duct, strut and conduit, then answer in section 9.',
+    'open/access':
+      'Whether the lift insulates is not answered. Read its plate, then answer in section 9.',
   },
   'shock.conductive-articles': {
     title: 'Metal on the body',
@@ -266,7 +323,7 @@ export const findings = {
       '“{field}” is not answered, so the arc flash method cannot be chosen. Enter it in section 7; if it cannot be found out, mark that.',
     caution: 'Check the date of the label, and how near the fault current is to the limit.',
     'caution:label-review':
-      'The label bears no date, or one of more than5 years ago. Ask whether it still holds.',
+      'The label bears no date, or one of more than 5 years ago. Ask whether it still holds.',
     'caution:transformer-near-limit':
       'The transformer estimate is near the limit of the table[: {estimate:kA} of {limitKiloamperes:kA}]. Impedance has a tolerance; get the study’s figure.',
   },
@@ -276,16 +333,17 @@ export const findings = {
   },
   'arc.rating-low': {
     title: 'Arc rating too low',
-    stop: 'The clothing[, {rating:cal},] is rated below what is required[, {requiredRating:cal}]. Everyone inside the arc flash boundary changes, or stays out.',
-    open: 'The arc rating worn is not answered[; {requiredRating:cal} is required]. Read the lowest one off the garments.',
+    stop: 'The clothing[, {rating:cal},] is rated below what is required[, {required:cal}]. Everyone inside the arc flash boundary changes, or stays out.',
+    open: 'The arc rating worn is not answered[; {required:cal} is required]. Read the lowest one off the garments.',
   },
   'arc.task-does-not-fit': {
     title: 'Arc flash task does not fit the job',
-    open: 'The arc flash task chosen[ ({arcFlashTask})] is milder than the job[ ({floor:arcFlashTask})]. Choose the one that fits; until then the stricter counts.',
+    open: 'The arc flash task chosen[ ({task:arcFlashTask})] is milder than the job[ ({floor:arcFlashTask})]. Choose the one that fits; until then the stricter counts.',
   },
   'arc.bystander-inside': {
     title: 'Inside the arc flash boundary unprotected',
-    stop: '{who} is inside the arc flash boundary[ ({boundary:least})] without arc-rated clothing. Dress them for it, or keep them outside.',
+    stop: '{who} is inside the arc flash boundary without arc-rated clothing. Dress them for it, or keep them outside.',
+    open: 'How close {who} comes is not answered, and they wear no arc-rated clothing. Answer it in section 10.',
   },
   'equipment.not-at-hand': {
     title: 'Equipment not at hand',
@@ -305,13 +363,21 @@ export const findings = {
   },
   'surroundings.ladder-top': {
     title: 'Standing too high on the ladder',
-    stop: 'The step stood on[, {standing:feet},] is too high on this ladder[; highest {highest:feet}]. Stand lower, or take a taller ladder.',
-    open: 'Ladder size or the step stood on is not answered. Enter both in section 9.',
+    stop: 'The step stood on[, {standingLevelFeet:feet},] is too high on this ladder[; highest {limit:feet}]. Stand lower, or take a taller ladder.',
+    open: 'Ladder size is not answered. Read it off the ladder and enter it in section 9.',
+    'open/standingLevelFeet':
+      'The height of the step stood on is not answered. Enter it in section 9.',
   },
   'surroundings.ladder-short': {
     title: 'Ladder too short or not placed',
-    stop: 'The ladder is too short for this ceiling[; {required:feet} needed], or not locked open, level and kept from doors and traffic. Take a taller one, a platform or a lift, and set it right.',
-    open: 'Ladder size, ceiling height or how the ladder stands is not answered. Enter them in section 9.',
+    stop: 'The ladder is too short for this ceiling[; {smallestFeet:feet} needed]. Take a taller one, a platform or a lift.',
+    'stop/placed':
+      'The ladder is not locked open, level and kept from doors and traffic. Set it right before anyone climbs.',
+    open: 'Ladder size is not answered. Read it off the ladder and enter it in section 9.',
+    'open/ceilingHeightFeet':
+      'Ceiling height is not answered. Measure it and enter it in section 9.',
+    'open/placed':
+      'Not said whether the ladder is locked open, level and kept from doors and traffic. Check it, then answer in section 9.',
   },
   'surroundings.dark': {
     title: 'Not enough light',
@@ -327,24 +393,32 @@ export const findings = {
   },
   'surroundings.barricade': {
     title: 'Barricade',
-    stop: 'The barricade[, at {barricade:inches},] is nearer than it must be[: {required:least}]. Move it out, attendant or not.',
-    open: 'People may approach, and no barricade far enough out[ ({required:least})] nor attendant keeps them off. Set one and enter it in section 9.',
+    stop: 'The barricade[, at {inches:inches},] is nearer than it must be[: {requiredInches:least}]. Move it out, attendant or not.',
+    open: 'People may approach, and no barricade far enough out[ ({requiredInches:least})] nor attendant keeps them off. Set one and enter it in section 9.',
   },
   'surroundings.egress-dark': {
     title: 'Emergency lighting out of service',
     open: 'Emergency lighting goes out while people are in the building. Tell whoever runs it and set up what stands in; enter both in section 3.',
+    'open/toldTo':
+      'Emergency lighting goes out, and nobody who runs the building is named as told. Tell them, then enter who in section 3.',
+    'open/interim':
+      'Emergency lighting goes out, and nothing is named that stands in for it. Set up lights, a walking watch, or send people out; enter it in section 3.',
     caution:
       'Emergency lighting is out of service until it is restored and tested. Keep what stands in for it running until then.',
   },
   'surroundings.lift-unsafe': {
     title: 'Lift not in order',
-    stop: 'On the lift someone is not tied off, or its operator is not trained. Put that right before it rises.',
-    open: 'Fall protection or the training of the lift’s operator is not answered. Answer both in section 9.',
+    stop: 'On the lift someone wears no fall protection. Tie off before it rises.',
+    'stop/operatorTrained': 'The operator of the lift is not trained for it. Put one there who is.',
+    open: 'Not said whether fall protection is worn and tied off on the lift. Answer it in section 9.',
+    'open/operatorTrained':
+      'Not said whether the operator of the lift is trained. Answer it in section 9.',
   },
   'surroundings.overhead-line': {
     title: 'Overhead line near',
     stop: 'An overhead line is nearer than 10 ft. Stay 10 ft away with everything at its longest, or have the utility deal with the line.',
-    open: 'Outdoors or not, and how near overhead lines are, is not answered. Look up, then answer in section 9.',
+    open: 'How near overhead lines are is not answered. Look up, then answer in section 9.',
+    'open/outdoors': 'Not said whether the work is outdoors. Answer it in section 9.',
   },
   'surroundings.ceiling-content': {
     title: 'Asbestos or PCBs',
@@ -354,11 +428,15 @@ export const findings = {
   'crew.lead-unqualified': {
     title: 'Lead is not qualified',
     stop: 'The lead[, {who},] is not a qualified person. Name one who is.',
-    open: 'Not exactly one person leads, or whether the lead is qualified is not answered. Name one qualified lead in section 10.',
+    open: 'Not exactly one person leads. Name one qualified lead in section 10.',
+    'open/qualified':
+      'Whether the lead[, {who},] is qualified is not answered. Answer it in section 10.',
+    'open/qualifiedThrough':
+      'Until when the lead[, {who},] is qualified is not answered. Enter the date in section 10.',
   },
   'crew.training-lapsed': {
     title: 'Training lapsed',
-    stop: 'The training of {who} has lapsed[ ({through})]. They count as not qualified until it is renewed.',
+    stop: 'The training of {who} has lapsed[ ({qualifiedThrough})]. They count as not qualified until it is renewed.',
     open: 'Until when {who} is qualified is not answered. Enter the date in section 10.',
   },
   'crew.alone': {
@@ -373,7 +451,7 @@ export const findings = {
   },
   'crew.emergency-plan': {
     title: 'Emergency plan',
-    open: '{field}: not named. Fill it in in section 10.',
+    open: '{field}: not named. Write it in section 10.',
   },
   'crew.rescue-untrained': {
     title: 'Nobody trained in rescue',
@@ -381,7 +459,7 @@ export const findings = {
   },
   'window.too-long': {
     title: 'More than 12 hours',
-    stop: 'The work is planned for more than 12 hours[ ({hours:hours})]. Split it into worksheets of 12 hours or less.',
+    stop: 'The work is planned for more than 12 hours[ ({minutes:minutes})]. Split it into worksheets of 12 hours or less.',
   },
   'window.reversed': {
     title: 'Ends before it starts',
@@ -393,7 +471,9 @@ export const findings = {
   },
   'window.shift-change': {
     title: 'Shift change',
-    open: 'Whether the work runs into another shift, or who then takes over the locks and tests again, is not answered. Answer both in section 1.',
+    open: 'The work runs into another shift, and who takes over the locks and tests again is not named. Write it in section 1.',
+    'open/crossesShift':
+      'Not said whether the work runs into another shift. Answer it in section 1.',
   },
   'lamp.line-voltage-lampholder': {
     title: 'Lampholder at line voltage',
@@ -407,7 +487,9 @@ export const findings = {
   },
   'closeout.locks-left': {
     title: 'Locks left',
-    open: 'Restored or left locked, and whether each lock is off, is not answered. Each lock comes off by its owner; then mark it.',
+    open: 'Restored or left locked is not answered. Look at the device and the locks, then answer.',
+    'open/locksRemoved':
+      'The circuit is restored, and not every lock is marked as off. Each lock comes off by its owner; then mark it.',
     caution: 'It stays locked. Write in the notes who holds the locks.',
   },
   'closeout.covers-off': {
@@ -417,7 +499,11 @@ export const findings = {
   },
   'closeout.egress-untested': {
     title: 'Emergency lighting not tested',
-    open: 'The emergency lights are not tested after the work. Run them on battery for at least 30 s, or see them lit on their branch, and enter it.',
+    open: 'The emergency lights are not tested after the work. Test them, then enter it.',
+    'open/egressTestedSeconds':
+      'The emergency lights are not run on battery after the work[, or only {seconds:s}]. Run them for at least 30 s and enter the time.',
+    'open/egressLit':
+      'The emergency lights are not seen lit on their own branch after the work. Look at them there, then mark it.',
   },
   unanswered: {
     title: 'Not answered',

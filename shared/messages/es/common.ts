@@ -155,6 +155,7 @@ export const common: Words<typeof en> = {
     other: 'Esto no está bien.',
   },
   fallback: {
+    sentence: 'Aquí habla una regla sin palabras en esta versión. Cargue la página otra vez.',
     way: 'Una fuente',
     way_number: (n: number) => `Fuente ${n}`,
     who: 'Alguien',
@@ -166,7 +167,5 @@ export const common: Words<typeof en> = {
     item: 'Un equipo',
     topic: 'un tema',
     field: 'Un campo',
-    requiredClass: 'la clase que se pide',
-    amount: 'más de lo admitido',
   },
 };

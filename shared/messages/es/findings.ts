@@ -11,7 +11,8 @@ export const findings: Words<typeof en> = {
   'supply.voltage-not-of-system': {
     title: 'La tensión del circuito no es del sistema',
     stop: '[{volts:V} ]no es tensión de circuito de este sistema[ ({system})]. Corrija el sistema o la tensión; 120 V junto a 480Y/277 V viene de un transformador y es otro sistema.',
-    open: 'Todavía no se pueden comparar el sistema y la tensión del circuito. Léalos en el tablero y conteste en la sección 2.',
+    open: 'Falta la tensión del circuito. Léala en el tablero y conteste en la sección 2.',
+    'open/system': 'Falta el sistema. Léalo en el tablero y conteste en la sección 2.',
   },
   'supply.readings-do-not-fit': {
     title: 'Las lecturas no corresponden al sistema',
@@ -42,7 +43,9 @@ export const findings: Words<typeof en> = {
   'sources.egress-unknown': {
     title: 'No se sabe qué alimenta la emergencia',
     stop: 'Nadie sabe de dónde se alimenta el alumbrado de emergencia. Averígüelo antes de abrir algo: pilotos de carga, tableros de emergencia, planos del edificio.',
-    open: 'Falta contestar de dónde se alimenta el alumbrado de emergencia, o dos respuestas se contradicen. Busque pilotos de carga y tableros de emergencia, y conteste en la sección 3.',
+    open: 'Dice que no hay ninguna y también indica una. Vuelva a ver y deje solo una de las dos en la sección 3.',
+    'open:unanswered':
+      'Falta contestar de dónde se alimenta el alumbrado de emergencia. Busque pilotos de carga y tableros de emergencia, y conteste en la sección 3.',
   },
   'sources.egress-not-listed': {
     title: 'Falta la fuente de emergencia',
@@ -61,26 +64,38 @@ export const findings: Words<typeof en> = {
   'sources.not-locked': {
     title: 'No está bloqueada como se debe',
     stop: '{way} no se mantiene abierta como se debe[ (ahora: {held})]. Ponga candado y etiqueta. La etiqueta sola necesita una segunda medida; el candado solo sirve para un dispositivo en un turno; tenerla en la mano, solo para clavija o conector de batería.',
-    open: '{way}: falta decir con qué se mantiene abierta, o el número del candado. Anote los dos en la sección 3.',
+    open: '{way}: falta decir con qué se mantiene abierta. Ponga candado y etiqueta y anótelo en la sección 3.',
+    'open/openedAt':
+      '{way} está en manos de quien trabaja y falta decir dónde se abre. Elíjalo en la sección 3.',
+    'open/lockNumber':
+      '{way}: falta el número del candado. Léalo en el candado y anótelo en la sección 3.',
   },
   'sources.battery-connected': {
     title: 'La batería sigue conectada',
     stop: '{way} sigue conectada. Su salida puede tener tensión de línea con todos los termomagnéticos abiertos. Separe el conector en la luminaria y márquelo aquí; si no se puede separar, esta hoja no sigue.',
-    open: '{way}: no está marcada como separada, o falta en la lista la batería que se cambia. Póngala en la lista, separe su conector y márquelo en la sección 3.',
+    open: 'Se va a cambiar una unidad de batería y no hay ninguna en la lista. Agréguela en la sección 3 y separe su conector.',
+    'open/openedAt':
+      '{way}: no está marcada como separada. Separe el conector en la luminaria y márquelo en la sección 3.',
   },
   'sources.by-unqualified': {
     title: 'Bloquea o mide alguien sin calificar',
-    stop: '{who} bloquea o mide y no es persona calificada de esta cuadrilla. Encárguelo a quien sí lo es.',
-    open: 'No se ha dicho quién bloquea[ {way}] o quién mide, o si es persona calificada. Nombre a una de esta cuadrilla.',
+    stop: '{who} bloquea o mide[ la {way}] y no es persona calificada de esta cuadrilla. Encárguelo a quien sí lo es.',
+    open: 'Falta decir si {who}, que bloquea o mide[ la {way}], es persona calificada. Conteste en la sección 10.',
+    'open:unanswered':
+      'No se ha dicho quién abre y bloquea, o quién mide[: {way}]. Nombre a una persona calificada de esta cuadrilla.',
   },
   'sources.traveler-unlisted': {
     title: 'Falta el puente de tres vías',
-    open: 'Hay apagadores en dos o más lugares, o falta decir cómo se enciende, y no hay puente de tres vías en la lista. Camine hasta cada apagador y agréguelo, o conteste en la sección 2.',
+    open: 'Hay apagadores en dos o más lugares y no hay puente de tres vías en la lista. Camine hasta cada apagador y agréguelo en la sección 3.',
+    'open:unanswered':
+      'Falta decir cómo se enciende, así que puede faltar un puente de tres vías. Recorra el área y conteste en la sección 2.',
   },
   'sources.shared-neutral': {
     title: 'Neutro compartido',
     stop: '{way}: no se abren todas las fases que comparten el neutro. Ábralas y bloquéelas todas; un neutro abierto puede quedar a tensión de línea.',
-    open: 'El neutro es compartido y sus fases no están todas en la lista y marcadas como abiertas. Agregue el neutro compartido en la sección 3 y diga si todas sus fases se abren.',
+    open: 'El neutro es compartido y no está en la lista. Agréguelo en la sección 3 con todas sus fases.',
+    'open/allPhasesOpened':
+      '{way}: falta decir si se abren todas las fases que comparten el neutro. Rastréelas y conteste en la sección 3.',
   },
   'sources.opened-before-transfer': {
     title: 'Se abre antes de la transferencia',
@@ -105,18 +120,23 @@ export const findings: Words<typeof en> = {
   'sources.control-unlisted': {
     title: 'Falta el cableado de control',
     open: 'El encendido es automático o no se sabe, y no hay cableado de control en la lista. Encuentre qué alimenta el sensor, el relevador o el par de atenuación y agréguelo en la sección 3.',
+    'open:unanswered':
+      'Falta decir cómo se enciende, así que puede faltar cableado de control. Conteste en la sección 2.',
   },
   'sources.stored-energy': {
     title: 'Energía almacenada',
-    open: 'La energía almacenada no se ha contestado o no está descargada. Espere, descargue y mida la salida del driver, balastro o batería, y anótelo con la comprobación.',
+    open: 'La energía almacenada no está descargada. Espere, descargue y mida la salida del driver, balastro o batería, y anótelo con la comprobación.',
+    'open:unanswered':
+      'Falta contestar la energía almacenada. Mida la salida del driver, balastro o batería, descárguela y anótelo con la comprobación.',
   },
   'sources.not-everyone-locked': {
     title: 'No todos han puesto candado',
-    open: '{way}: no todos los que trabajan en el circuito tienen su candado[ (falta: {who})]. Cada quien pone el suyo, en el dispositivo o en la caja de bloqueo de grupo.',
+    open: '{way}: no todos los que trabajan en el circuito tienen su candado[ (falta: {names})]. Cada quien pone el suyo, en el dispositivo o en la caja de bloqueo de grupo.',
   },
   'decision.unjustified': {
     title: 'Energizado sin razón admitida',
     stop: 'Se planea trabajo energizado sin una razón admitida[ para esta tarea ({task})]. Corte la energía, o dé una razón que el reglamento admita.',
+    open: 'Se planea trabajo energizado y las razones admitidas dependen de la tarea. Elija la tarea en la sección 1.',
   },
   'decision.explanation-missing': {
     title: 'Falta la explicación',
@@ -125,7 +145,9 @@ export const findings: Words<typeof en> = {
   'decision.below-fifty-not-so': {
     title: 'No todo está abajo de 50 V',
     stop: 'Se trabaja o queda expuesto a 50 V o más[ ({volts:V})]. Entonces estar abajo de 50 V no es razón; corte la energía.',
-    open: 'La razón es que está abajo de 50 V y faltan tensiones. Anote la mayor que se trabaja y si hay algo mayor expuesto.',
+    open: 'La razón es que está abajo de 50 V y falta la mayor tensión que se trabaja. Anótela en la sección 2.',
+    'open/higherVoltsExposed':
+      'La razón es que está abajo de 50 V y falta decir si hay algo mayor expuesto. Véalo y conteste en la sección 2.',
   },
   'decision.testing-is-not-repair': {
     title: 'Medir no es razón para reparar energizado',
@@ -133,20 +155,37 @@ export const findings: Words<typeof en> = {
   },
   'decision.infeasible-not-admitted': {
     title: 'Motivo no admitido',
-    stop: 'Ese motivo no impide cortar la energía. La comodidad, los inquilinos, las ventas perdidas y el tiempo extra no se admiten. Planee el corte.',
+    stop: 'Ese motivo no impide cortar la energía. La comodidad, los inquilinos, las ventas perdidas y el tiempo extra no se admiten, y medir no es motivo para reparar. Planee el corte.',
     open: 'Falta contestar por qué no se puede sin energía. Elíjalo en la sección 4.',
+    'open/task': 'El motivo es una medición y falta la tarea. Elija la tarea en la sección 1.',
     caution:
       'El motivo es un proceso industrial continuo. El alumbrado de un edificio casi nunca es parte de uno. Que lo vea el supervisor.',
   },
   'decision.alternative-possible': {
     title: 'Hay otra manera',
     stop: 'Se puede poner luz temporal, así que la oscuridad no es razón. Póngala y corte la energía.',
-    open: 'No se han preguntado todas las otras maneras: quién negó el corte, cuál peligro, si se puede poner luz temporal. Contéstelo en la sección 4.',
+    open: 'Todavía no se descarta otra manera. Conteste en la sección 4.',
+    'open/outageRefusedBy':
+      'No se indica quién administra el edificio y negó el corte. Pregúntele y anote quién lo negó.',
+    'open/hazard':
+      'Falta decir qué peligro mayor traería cortar la energía. Elíjalo en la sección 4.',
+    'open/temporaryLight':
+      'Falta decir si se puede poner luz temporal. Véalo y conteste en la sección 4.',
   },
   'permit.missing': {
     title: 'Permiso de trabajo energizado',
-    stop: 'El permiso vence antes que el trabajo, o quien lo firma es de la cuadrilla. Consiga uno que alcance, firmado por alguien de fuera.',
+    stop: 'El permiso no vale para este trabajo. Consiga uno que valga.',
+    'stop/approvedBy':
+      'El permiso lo firma alguien de la cuadrilla[, {who}]. Que lo firme alguien de fuera.',
+    'stop/validUntil':
+      'El permiso vence antes de que termine el trabajo. Consiga uno que alcance, o termine antes.',
     open: 'Se requiere permiso de trabajo energizado. Anote su número, quién lo firmó y hasta cuándo vale.',
+    'open/number':
+      'Se requiere permiso de trabajo energizado y falta su número. Consiga el permiso y anótelo.',
+    'open/approvedBy':
+      'Se requiere permiso de trabajo energizado y falta quién lo firmó. Anote su nombre.',
+    'open/validUntil':
+      'Se requiere permiso de trabajo energizado y falta hasta cuándo vale. Anote fecha y hora.',
   },
   'absence.source-not-opened': {
     title: 'Apertura sin confirmar',
@@ -160,16 +199,28 @@ export const findings: Words<typeof en> = {
   },
   'absence.meter-category': {
     title: 'Medidor no apto para este lugar',
-    stop: 'El probador[ ({category}, {ratedVolts:V})] no es apto para este lugar[: {requiredCategory:category}, {requiredVolts:V} o más]. Use uno que lo sea, con sus cables.',
+    stop: 'El probador no es apto para este lugar. Use uno que lo sea, con sus cables.',
+    'stop/category':
+      'El probador[, {category},] no es apto para este lugar. La instalación fija pide CAT III o IV, la acometida CAT IV, también los cables.',
+    'stop/ratedVolts':
+      'El probador es[ de {ratedVolts:V},] de menos tensión que la alimentación[, {volts:V} entre fases]. Use uno que la soporte, con sus cables.',
     open: 'Falta la categoría o la tensión nominal del probador. Léalas en el medidor y los cables, y anote la menor.',
+    'open/atService':
+      'No se ha dicho si es en la acometida, donde el medidor debe ser CAT IV. Conteste en la sección 2.',
   },
   'absence.not-proved': {
     title: 'Probador sin verificar antes y después',
     open: 'El probador no se verificó en una fuente viva conocida antes y después de medir. Verifíquelo y marque las dos.',
+    'open/provedBefore':
+      'El probador no se verificó en una fuente viva conocida antes de medir. Verifíquelo, mida y márquelo.',
+    'open/provedAfter':
+      'El probador no se verificó en una fuente viva conocida después de medir. Verifíquelo otra vez y márquelo; si falla, las lecturas no valen.',
   },
   'absence.pairs-missing': {
     title: 'Faltan lecturas',
     open: '{point}: faltan lecturas[ ({pairs})]. Mida cada par en cada punto de trabajo y anote cada lectura.',
+    'open/pointsOfWork':
+      'Falta decir cuántos puntos de trabajo hay, así que ninguna prueba está completa. Cuéntelos y conteste en la sección 1.',
   },
   'absence.voltage-present': {
     title: 'Hay tensión',
@@ -186,11 +237,11 @@ export const findings: Words<typeof en> = {
   },
   'absence.source-not-tested': {
     title: 'Una fuente sin medir',
-    open: '{way}: sus conductores no se han medido[ en {points}]. Mida cada uno a tierra y a cada fase en cada punto al que llega.',
+    open: '{way}: sus conductores no se han medido[ en {point}][ contra {to:conductor}]. Mida cada uno a tierra y a cada fase en cada punto al que llega.',
   },
   'absence.dc-not-tested': {
     title: 'Falta medir CD',
-    open: '{way}: no hay lectura de CD[ en {points}]. La escala de CA no ve una batería ni la salida de un driver. Cambie a CD y mida.',
+    open: '{way}: no hay lectura de CD[ en {point}]. La escala de CA no ve una batería ni la salida de un driver. Cambie a CD y mida.',
   },
   'absence.leads-not-inspected': {
     title: 'Cables sin revisar',
@@ -198,8 +249,9 @@ export const findings: Words<typeof en> = {
   },
   'shock.unqualified-inside': {
     title: 'Alguien sin calificar se acerca demasiado',
-    stop: '{who} no es persona calificada y entra a un límite de choque[ ({closest})]. Que se quede fuera del límite limitado, o póngale una escolta calificada donde se admite.',
-    open: '{who} entra a un límite de choque y falta decir si es persona calificada. Conteste en la sección 10.',
+    stop: '{who} no es persona calificada y se acerca demasiado[: {closest}]. Que se quede fuera del límite limitado, o póngale una escolta calificada donde se admite.',
+    open: '{who} se acerca[: {closest}], y falta decir si es persona calificada. Conteste en la sección 10.',
+    'open:unanswered': 'Falta decir qué tanto se acerca {who}. Conteste en la sección 10.',
   },
   'shock.gloves-missing': {
     title: 'Faltan guantes dieléctricos',
@@ -208,7 +260,7 @@ export const findings: Words<typeof en> = {
   },
   'shock.gloves-class': {
     title: 'Clase de guantes insuficiente',
-    stop: 'Los guantes de {who}[, clase {gloveClass},] no bastan[ para {volts:V}]. Use clase {requiredClass} o mejor.',
+    stop: 'Los guantes de {who}[, clase {class},] no bastan[ para {volts:V}]. Use un par de clase mayor; la sección 8 la indica.',
     open: 'Falta la clase de los guantes de {who}. Léala en el puño.',
   },
   'shock.gloves-overdue': {
@@ -227,8 +279,12 @@ export const findings: Words<typeof en> = {
   },
   'shock.grounded-surface': {
     title: 'Metal a tierra al alcance',
-    stop: '[{kind:surfaceKind}: ]hay metal a tierra al alcance, sin cubrir ni libre como pide este trabajo. Cúbralo con manta dieléctrica; en plataforma elevadora use una aislante.',
+    stop: '[{kind:surfaceKind}: ]hay metal a tierra al alcance, sin cubrir ni libre como pide este trabajo. Cúbralo con manta dieléctrica, o que solo lo toquen manos enguantadas y puntas donde se admite.',
+    'stop/access':
+      'La plataforma elevadora no es aislante y su canasta es metal a tierra al alcance. Use una aislante, o corte la energía.',
     open: 'Falta decir qué metal a tierra está al alcance. Busque retícula, ducto, unicanal y conduit, y conteste en la sección 9.',
+    'open/access':
+      'Falta decir si la plataforma elevadora es aislante. Lea su placa y conteste en la sección 9.',
   },
   'shock.conductive-articles': {
     title: 'Metal en el cuerpo',
@@ -276,16 +332,17 @@ export const findings: Words<typeof en> = {
   },
   'arc.rating-low': {
     title: 'Clasificación de arco insuficiente',
-    stop: 'La ropa[, {rating:cal},] queda abajo de lo requerido[, {requiredRating:cal}]. Todos dentro del límite de arco se cambian o se quedan fuera.',
-    open: 'Falta la clasificación de arco de la ropa[; se requieren {requiredRating:cal}]. Lea la menor en las prendas.',
+    stop: 'La ropa[, {rating:cal},] queda abajo de lo requerido[, {required:cal}]. Todos dentro del límite de arco se cambian o se quedan fuera.',
+    open: 'Falta la clasificación de arco de la ropa[; se requieren {required:cal}]. Lea la menor en las prendas.',
   },
   'arc.task-does-not-fit': {
     title: 'La tarea de arco no corresponde',
-    open: 'La tarea de arco elegida[ ({arcFlashTask})] es más leve que el trabajo[ ({floor:arcFlashTask})]. Elija la que corresponde; mientras, cuenta la más estricta.',
+    open: 'La tarea de arco elegida[ ({task:arcFlashTask})] es más leve que el trabajo[ ({floor:arcFlashTask})]. Elija la que corresponde; mientras, cuenta la más estricta.',
   },
   'arc.bystander-inside': {
     title: 'Alguien sin protección dentro del límite de arco',
-    stop: '{who} está dentro del límite de arco eléctrico[ ({boundary:least})] sin ropa con clasificación de arco. Vístalo para eso o que se quede fuera.',
+    stop: '{who} está dentro del límite de arco eléctrico sin ropa con clasificación de arco. Debe vestirla o quedarse fuera.',
+    open: 'Falta decir qué tanto se acerca {who}, que no usa ropa con clasificación de arco. Conteste en la sección 10.',
   },
   'equipment.not-at-hand': {
     title: 'Equipo que no está a la mano',
@@ -305,13 +362,19 @@ export const findings: Words<typeof en> = {
   },
   'surroundings.ladder-top': {
     title: 'Parado muy arriba en la escalera',
-    stop: 'El peldaño[, {standing:feet},] queda muy arriba en esta escalera[; a lo más {highest:feet}]. Párese más abajo o use una más alta.',
-    open: 'Falta el tamaño de la escalera o el peldaño donde se para. Anote los dos en la sección 9.',
+    stop: 'El peldaño[, a {standingLevelFeet:feet},] queda muy arriba en esta escalera[; a lo más {limit:feet}]. Párese más abajo o use una más alta.',
+    open: 'Falta el tamaño de la escalera. Léalo en la escalera y anótelo en la sección 9.',
+    'open/standingLevelFeet': 'Falta la altura del peldaño donde se para. Anótela en la sección 9.',
   },
   'surroundings.ladder-short': {
     title: 'Escalera corta o mal puesta',
-    stop: 'La escalera es corta para este techo[; se necesita de {required:feet}], o no está trabada, a nivel y lejos de puertas y paso. Use una más alta, una plataforma o un elevador, y colóquela bien.',
-    open: 'Falta el tamaño de la escalera, la altura del techo o cómo está puesta. Anótelo en la sección 9.',
+    stop: 'La escalera es corta para este techo[; se necesita de {smallestFeet:feet}]. Use una más alta, una plataforma o un elevador.',
+    'stop/placed':
+      'La escalera no está abierta y trabada, a nivel y lejos de puertas y paso. Colóquela bien antes de que alguien suba.',
+    open: 'Falta el tamaño de la escalera. Léalo en la escalera y anótelo en la sección 9.',
+    'open/ceilingHeightFeet': 'Falta la altura del techo. Mídala y anótela en la sección 9.',
+    'open/placed':
+      'No se ha dicho si la escalera está trabada, a nivel y lejos de puertas y paso. Revísela y conteste en la sección 9.',
   },
   'surroundings.dark': {
     title: 'Luz insuficiente',
@@ -327,24 +390,33 @@ export const findings: Words<typeof en> = {
   },
   'surroundings.barricade': {
     title: 'Barricada',
-    stop: 'La barricada[, a {barricade:inches},] está más cerca de lo debido[: {required:least}]. Aléjela, haya vigía o no.',
-    open: 'Puede acercarse gente y no hay barricada a la distancia debida[ ({required:least})] ni vigía que lo impida. Ponga una y anótela en la sección 9.',
+    stop: 'La barricada[, a {inches:inches},] está más cerca de lo debido[: {requiredInches:least}]. Aléjela, haya vigía o no.',
+    open: 'Puede acercarse gente y no hay barricada a la distancia debida[ ({requiredInches:least})] ni vigía que lo impida. Ponga una y anótela en la sección 9.',
   },
   'surroundings.egress-dark': {
     title: 'Alumbrado de emergencia fuera de servicio',
     open: 'El alumbrado de emergencia se apaga con gente en el edificio. Avise a quien lo administra y ponga lo que lo suple; anote los dos en la sección 3.',
+    'open/toldTo':
+      'El alumbrado de emergencia se apaga y no se indica a quién del edificio se avisó. Avise y anote a quién en la sección 3.',
+    'open/interim':
+      'El alumbrado de emergencia se apaga y no se indica qué lo suple. Ponga luces, rondas a pie o saque a la gente; anótelo en la sección 3.',
     caution:
       'El alumbrado de emergencia queda fuera de servicio hasta restablecerlo y probarlo. Mantenga hasta entonces lo que lo suple.',
   },
   'surroundings.lift-unsafe': {
     title: 'Plataforma elevadora con falta',
-    stop: 'En la plataforma alguien no está amarrado, o su operador no está capacitado. Corríjalo antes de que suba.',
-    open: 'Falta contestar el arnés o la capacitación del operador de la plataforma. Conteste los dos en la sección 9.',
+    stop: 'En la plataforma alguien no lleva arnés amarrado. Amárrese antes de que suba.',
+    'stop/operatorTrained':
+      'El operador de la plataforma no está capacitado. Ponga a quien sí lo esté.',
+    open: 'No se ha dicho si en la plataforma se usa arnés amarrado. Conteste en la sección 9.',
+    'open/operatorTrained':
+      'No se ha dicho si el operador de la plataforma está capacitado. Conteste en la sección 9.',
   },
   'surroundings.overhead-line': {
     title: 'Línea aérea cercana',
     stop: 'Hay una línea aérea a menos de 10 ft. Quédese a 10 ft con todo extendido, o que la compañía suministradora la atienda.',
-    open: 'Falta decir si es a la intemperie y qué tan cerca hay líneas aéreas. Mire hacia arriba y conteste en la sección 9.',
+    open: 'Falta decir qué tan cerca hay líneas aéreas. Mire hacia arriba y conteste en la sección 9.',
+    'open/outdoors': 'No se ha dicho si el trabajo es a la intemperie. Conteste en la sección 9.',
   },
   'surroundings.ceiling-content': {
     title: 'Asbesto o bifenilos (PCB)',
@@ -354,11 +426,15 @@ export const findings: Words<typeof en> = {
   'crew.lead-unqualified': {
     title: 'El encargado no está calificado',
     stop: 'El encargado[, {who},] no es persona calificada. Nombre a quien sí lo es.',
-    open: 'No hay exactamente un encargado, o falta decir si está calificado. Nombre a un solo encargado calificado en la sección 10.',
+    open: 'No hay exactamente un encargado. Nombre a un solo encargado calificado en la sección 10.',
+    'open/qualified':
+      'Falta decir si el encargado[, {who},] está calificado. Conteste en la sección 10.',
+    'open/qualifiedThrough':
+      'Falta hasta cuándo está calificado el encargado[, {who}]. Anote la fecha en la sección 10.',
   },
   'crew.training-lapsed': {
     title: 'Capacitación vencida',
-    stop: 'La capacitación de {who} ya venció[ ({through})]. No cuenta como persona calificada hasta renovarla.',
+    stop: 'La capacitación de {who} ya venció[ ({qualifiedThrough})]. No cuenta como persona calificada hasta renovarla.',
     open: 'Falta hasta cuándo está calificada esta persona: {who}. Anote la fecha en la sección 10.',
   },
   'crew.alone': {
@@ -381,7 +457,7 @@ export const findings: Words<typeof en> = {
   },
   'window.too-long': {
     title: 'Más de 12 horas',
-    stop: 'El trabajo está planeado para más de 12 horas[ ({hours:hours})]. Divídalo en hojas de 12 horas o menos.',
+    stop: 'El trabajo está planeado para más de 12 horas[ ({minutes:minutes})]. Divídalo en hojas de 12 horas o menos.',
   },
   'window.reversed': {
     title: 'Termina antes de empezar',
@@ -393,7 +469,9 @@ export const findings: Words<typeof en> = {
   },
   'window.shift-change': {
     title: 'Cambio de turno',
-    open: 'Falta decir si el trabajo pasa a otro turno, o quién recibe los candados y vuelve a medir. Conteste los dos en la sección 1.',
+    open: 'El trabajo pasa a otro turno y no se indica quién recibe los candados y vuelve a medir. Anótelo en la sección 1.',
+    'open/crossesShift':
+      'No se ha dicho si el trabajo pasa a otro turno. Conteste en la sección 1.',
   },
   'lamp.line-voltage-lampholder': {
     title: 'Portalámparas con tensión de línea',
@@ -407,7 +485,9 @@ export const findings: Words<typeof en> = {
   },
   'closeout.locks-left': {
     title: 'Quedan candados',
-    open: 'Falta decir si se restableció o queda con candado, y si cada candado se quitó. Cada quien quita el suyo; luego márquelo.',
+    open: 'Falta decir si se restableció o queda con candado. Vea el dispositivo y los candados, y conteste.',
+    'open/locksRemoved':
+      'El circuito se restableció y no todos los candados están marcados como quitados. Cada quien quita el suyo; luego márquelo.',
     caution: 'Queda con candado. Anote quién tiene los candados.',
   },
   'closeout.covers-off': {
@@ -417,7 +497,11 @@ export const findings: Words<typeof en> = {
   },
   'closeout.egress-untested': {
     title: 'Alumbrado de emergencia sin probar',
-    open: 'Las luces de emergencia no se han probado después del trabajo. Déjelas con batería al menos 30 s, o véalas encendidas en su circuito, y anótelo.',
+    open: 'Las luces de emergencia no se han probado después del trabajo. Pruébelas y anótelo.',
+    'open/egressTestedSeconds':
+      'Las luces de emergencia no se han probado con batería después del trabajo[, o solo {seconds:s}]. Déjelas al menos 30 s y anote el tiempo.',
+    'open/egressLit':
+      'Las luces de emergencia no se han visto encendidas en su propio circuito después del trabajo. Véalas y márquelo.',
   },
   unanswered: {
     title: 'Sin respuesta',
