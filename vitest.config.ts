@@ -57,6 +57,7 @@ export default defineConfig({
         define: { __DEV__: 'true' },
         test: {
           name: 'components',
+          testTimeout: 30_000,
           include: ['tests/components/**/*.test.{ts,tsx}'],
           environment: 'jsdom',
           setupFiles: ['tests/support/componentsSetup.ts'],
