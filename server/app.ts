@@ -12,6 +12,7 @@ import { requestId } from './middleware/requestId';
 import { requestLog } from './middleware/requestLog';
 import { endStaleSession, passport } from './passport';
 import { assessmentsRouter } from './routes/assessments';
+import { attachmentsRouter } from './routes/attachments';
 import { healthRouter } from './routes/health';
 import { sessionRouter } from './routes/session';
 import { verifyRouter } from './routes/verify';
@@ -74,6 +75,7 @@ function buildApi(): express.Router {
   api.use('/session', sessionRouter);
   api.use('/worksheets', worksheetsRouter);
   api.use('/assessments', assessmentsRouter);
+  api.use('/attachments', attachmentsRouter);
   api.use('/verify', verifyRouter);
   api.use(notFoundHandler);
   return api;

@@ -97,6 +97,12 @@ export const answerSchema = z.strictObject({ id: id.optional(), text: requiredTe
 export const reasonSchema = z.strictObject({ reason: requiredText(2000) });
 export const closeSchema = z.strictObject({ closeOut: closeOutSchema, pin });
 export const copySchema = z.strictObject({ id: id.optional() });
+/** The fields beside the file of an upload. */
+export const attachmentInputSchema = z.strictObject({
+  id: id.optional(),
+  section: z.enum(ATTACHMENT_SECTIONS),
+  caption: text().default(''),
+});
 export const assessSchema = z.strictObject({
   content: worksheetContentSchema,
   stage: z.enum(['plan', 'work', 'close-out']).optional(),

@@ -3,6 +3,7 @@ import type { Request, Response } from 'express';
 import {
   answerSchema,
   askSchema,
+  attachmentInputSchema,
   closeSchema,
   copySchema,
   createWorksheetSchema,
@@ -14,6 +15,7 @@ import {
 import { currentUser } from '../currentUser';
 import type { CurrentUser } from '../currentUser';
 import { requireUser } from '../middleware/requireUser';
+import { upload } from '../middleware/upload';
 import type { Worksheet } from '../models/Worksheet';
 import { parse, parseId } from '../parse';
 import {
@@ -26,6 +28,7 @@ import {
   mayVoid,
 } from '../policies/worksheet';
 import {
+  presentAttachment,
   presentProof,
   presentQuestion,
   presentSignature,
@@ -33,7 +36,8 @@ import {
 } from '../presenters/worksheet';
 import { presentEvent, presentRevision, presentRevisionDetail } from '../presenters/history';
 import { presentWorksheetRow } from '../presenters/worksheetRow';
-import { notAllowed, notFound, preconditionRequired } from '../problem';
+import { invalidField, notAllowed, notFound, preconditionRequired } from '../problem';
+import { addAttachment } from '../services/addAttachment';
 import { answerQuestion, findQuestion } from '../services/answerQuestion';
 import { askQuestion } from '../services/askQuestion';
 import type { ReasonedService } from '../services/changeState';
@@ -193,4 +197,14 @@ worksheetsRouter.get('/:worksheetId/events', async (req, res) => {
   const { worksheet } = await worksheetFor(req);
   const { events, people } = await listEvents(worksheet);
   res.json({ items: events.map((event) => presentEvent(event, people)) });
+});
+
+worksheetsRouter.post('/:worksheetId/attachments', async (req, res) => {
+  const { actor, worksheet } = await worksheetFor(req, isLead);
+  const file = await upload(req, res);
+  const body = parse(attachmentInputSchema, req.body ?? {});
+  if (file === undefined) throw invalidField('#/file', 'required', 'Send the photo as `file`.');
+  const photo = { ...body, file: file.buffer };
+  const { row, created } = await addAttachment(actor, worksheet, photo);
+  res.status(created ? 201 : 200).json(presentAttachment(row));
 });
