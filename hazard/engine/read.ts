@@ -94,10 +94,10 @@ export function notEmpty<T>(list: List<T>): List<T> {
   return list.values.length === 0 ? NO_LIST : list;
 }
 
-/** A list of objects. A member of another type is an object that answers nothing. */
+/** A list of objects. A member of another type, or a gap, answers nothing. */
 export function readObjects<T>(value: unknown, read: (of: Fields) => T): List<T> {
   return Array.isArray(value)
-    ? { isAnswered: true, values: value.map((member) => read(fields(member))) }
+    ? { isAnswered: true, values: Array.from(value, (member) => read(fields(member))) }
     : NO_LIST;
 }
 
