@@ -12,6 +12,7 @@ import * as user from '@/shared/user';
 import { closeOutSchema, proofSchema, worksheetContentSchema } from '@/shared/worksheet';
 import { en } from '@/shared/messages/en/index';
 import { es } from '@/shared/messages/es/index';
+import { figure } from '@/shared/messages/template';
 import {
   citationWords,
   enumWord,
@@ -36,6 +37,7 @@ const SAMPLES: readonly unknown[][] = [
   ['X', 1, 'X', 1],
   ['X', 2, 'X', 2],
   [true, true, true, true],
+  ['', '', '', ''],
   [{ editions: 'E', contact: '911', place: 'D' }],
   [['X', 'X']],
 ];
@@ -48,7 +50,8 @@ function textsOf(words: unknown, path = ''): [string, string][] {
     return SAMPLES.flatMap((args) => {
       try {
         const texts = textsOf(write(...args), path);
-        return texts.some(([, text]) => /undefined|NaN|true|\[object/.test(text)) ? [] : texts;
+        const hasHole = /undefined|NaN|true|\[object/;
+        return args[0] === '' || texts.some(([, text]) => hasHole.test(text)) ? [] : texts;
       } catch {
         return []; // This function takes something else.
       }
@@ -388,6 +391,12 @@ describe('findingWords', () => {
     expect(text('surroundings.barricade', '/surroundings/barricadeInches', barricade)).toContain(
       'at 1 ft 8 in, is nearer than it must be: 3 ft 6 in.',
     );
+  });
+
+  it('writes a figure without a unit, or of a unit that is not known, as a plain number', () => {
+    expect(figure('en-US', 2.5, undefined, 'feet')).toBe('2.5');
+    expect(figure('en-US', 2.5, 'furlongs', 'feet')).toBe('2.5');
+    expect(figure('en-US', 208, 'V', 'metric')).toBe('208\u00a0V');
   });
 
   it('names the person of the gloves by number where no name is given', () => {

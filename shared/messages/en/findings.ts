@@ -205,7 +205,7 @@ export const findings = {
     'stop/category':
       'The tester[, {category},] is not rated for this place. Fixed wiring needs CAT III or IV, a service CAT IV, leads included.',
     'stop/ratedVolts':
-      'The tester is rated[ {ratedVolts:V}] below the supply here[, {volts:V} phase to phase]. Use one rated for it, leads included.',
+      'The tester is rated[ {ratedVolts:V},] below the supply here[, {volts:V} phase to phase]. Use one rated for it, leads included.',
     open: 'Category or rated voltage of the tester is not answered. Read both off the meter and the leads, and enter the lowest.',
     'open/atService':
       'Not said whether this is at the service, where a meter needs CAT IV. Answer it in section 2.',
