@@ -155,6 +155,12 @@ describeRule('absence.pairs-missing', '70E 120.6(7); FACE 86-35', [
   ],
   [
     'O work',
+    'a third point that is not complete',
+    { [SEVENTH]: reading(0, { point: 'A3' }) },
+    ['open /proof/readings'],
+  ],
+  [
+    'O work',
     'none read',
     { 'proof/readings': [] },
     ['open /proof/readings', '?open /proof/readings'],

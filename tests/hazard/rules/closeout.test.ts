@@ -60,6 +60,12 @@ describeRule('closeout.locks-left', '1910.333(b)(2)(v)(C)', [
     ['open /closeOut/restored'],
     ['closeout.*'],
   ),
+  [
+    'W close',
+    'mode not answered: the rules of the off path',
+    { 'decision/mode': gone, [REMOVED]: false },
+    ['open /closeOut/locksRemoved'],
+  ],
   ...onEach(['T close', 'W close'], 'not asked', { [REMOVED]: gone, [RESTORED]: gone }, []),
   ...onEach(['T close', 'W close'], 'not asked, no', { [REMOVED]: false, [RESTORED]: false }, []),
 ]);

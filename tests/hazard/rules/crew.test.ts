@@ -3,7 +3,6 @@ import { BELOW_FIFTY, SECOND_QUALIFIED } from '../../support/ruleEdits';
 import type { Edits, RuleRow } from '../../support/ruleTable';
 import { ALL, describeRule, eachValue, ENERGIZED, gone, onEach } from '../../support/ruleTable';
 
-
 describeRule('crew.lead-unqualified', '1910.332(b)(3), 1910.333(c)(2)', [
   ...onEach(ALL, 'one qualified lead', {}, []),
   ...eachValue(
@@ -112,6 +111,12 @@ describeRule('crew.briefing-open', '70E-2024 110.3(I)', [
     ['W'],
     'briefing/topics',
     [gone, [], 'x'],
+    BRIEFING_TOPICS.map(() => 'open'),
+  ),
+  ...onEach(
+    ['W'],
+    'a foreign topic: the list is not answered',
+    { 'briefing/topics': [...BRIEFING_TOPICS, 'moon'] },
     BRIEFING_TOPICS.map(() => 'open'),
   ),
   ...eachValue(

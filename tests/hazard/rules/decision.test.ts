@@ -57,6 +57,18 @@ describe('decision.unjustified (1910.333(a)(1); 70E 110.2(B))', () => {
     },
   );
 
+  it.each(REASONS)('a task that is not answered makes no stop of %s', (reason) => {
+    const result = assessBase('W', {
+      'job/task': gone,
+      'decision/reason': reason,
+      'decision/infeasibleBecause': 'can only be tested energized',
+      'supply/workVolts': 24,
+      'supply/higherVoltsExposed': false,
+    });
+    expect(result.findings.filter(({ severity }) => severity === 'stop')).toEqual([]);
+    expect(result.verdict).toBe('open');
+  });
+
   it('asks for no reason with the circuit off', () => {
     expect(found(assessBase('O'), 'decision.unjustified')).toEqual([]);
   });

@@ -107,6 +107,19 @@ describeRule('shock.gloves-missing', '1910.137, 1910.335(a)(1)', [
     [],
     ['crew.rescue-untrained'],
   ),
+  ...onEach(
+    ALL,
+    'two inside, only the helper has a set',
+    {
+      ...SECOND_QUALIFIED,
+      'crew/1/closest': 'restricted',
+      'crew/1/arcRated': true,
+      'crew/1/gloves': SET,
+      [GLOVES]: gone,
+    },
+    ['stop'],
+    ['crew.rescue-untrained'],
+  ),
   ['T', 'nobody inside', { ...FAR, [GLOVES]: gone }, []],
   ['W', 'below 50 V', { ...BELOW_FIFTY, [GLOVES]: gone }, []],
 ]);
@@ -159,7 +172,7 @@ describeRule('shock.gloves-overdue', '1910.137 Table I-5', [
   [
     'O',
     "the crew's own set",
-    { [GLOVES]: gone, 'crew/0/gloves': { ...SET, lastTestedOn: '2026-01-01' } },
+    { [GLOVES]: gone, 'crew/0/gloves': { ...SET, lastTestedOn: '2025-10-01' } },
     ['stop /crew/0/gloves*'],
   ],
 ]);
@@ -207,6 +220,9 @@ describeRule('shock.grounded-surface', '1910.333(a)(2), 1910.335(a)(2)(ii); FACE
   ]),
   ...onEach(ALL, 'looked, none', { [SURFACES]: [] }, []),
   ...eachValue(ALL, SURFACES, [gone, '', {}], ['open /surroundings/groundedSurfaces']),
+  ...onEach(ALL, 'what is no surface counts as {}', { [SURFACES]: [{ inReach: false }, 5] }, [
+    'stop /surroundings/groundedSurfaces/1*',
+  ]),
   ...onEach(
     ALL,
     'the second of three',

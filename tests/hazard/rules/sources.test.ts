@@ -403,6 +403,13 @@ describeRule('sources.traveler-unlisted', 'common practice', [
     ['open'],
     ['sources.control-unlisted'],
   ),
+  ...eachValue(
+    DIMMED,
+    'supply/switching',
+    [['one place', 'moon']],
+    ['open'],
+    ['sources.control-unlisted'],
+  ),
   ...eachValue(['T'], 'supply/switching', [gone, []], [], ['supply.unanswered']),
   ...onEach(['T'], 'testing', { 'sources/2': gone }, []),
 ]);

@@ -128,6 +128,12 @@ describeRule('supply.readings-do-not-fit', 'ANSI C84.1', [
   ...onEach(ALL, 'zeros', { 'supply/readings': { phaseToPhase: [0], phaseToNeutral: [0] } }, [
     'stop /supply/readings*',
   ]),
+  ...onEach(
+    ALL,
+    'a foreign member does not hide what does not fit',
+    { 'supply/readings': { phaseToPhase: [480, 'x'] } },
+    ['stop /supply/readings*'],
+  ),
   ['O', 'the system is not answered', { 'supply/system': gone }, ['open /supply*'], ['*']],
   [
     'O',
@@ -183,6 +189,9 @@ describeRule('supply.colors-do-not-fit', 'common practice; NEC 210.5(C)', [
     { 'supply/conductorColors': ['black', 'brown', 'green', 'yellow'] },
     ['caution /supply/conductorColors*', 'caution /supply/conductorColors*'],
   ),
+  ...onEach(ALL, 'beside a foreign member', { 'supply/conductorColors': ['moon', 'brown'] }, [
+    'caution /supply/conductorColors*',
+  ]),
   ...onEach(ALL, 'no colors', { 'supply/conductorColors': gone }, []),
 ]);
 
@@ -212,6 +221,7 @@ describeRule('supply.tripped', '1910.334(b)(2)', [
   ['O close', 'left open', { 'supply/tripped': 'cause not found', 'closeOut/restored': false }, []],
   ['O close', 'restored, not answered', { 'supply/tripped': gone }, ['open /supply/tripped']],
   ['O close', 'no trip', {}, []],
+  ['W close', 'restored, not repaired', { 'supply/tripped': 'cause not found' }, ['stop']],
 ]);
 
 describe('expected load (single phase, power factor 1)', () => {

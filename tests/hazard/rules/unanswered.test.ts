@@ -452,3 +452,68 @@ describe('a word outside its enumeration is not an answer (convention 1)', () =>
     expect(assessBase('O', { 'job/pointsOfWork': pointsOfWork }).verdict).toBe('ready');
   });
 });
+
+/** Where an answer left out may be a stop: it counts as the worse case, or its other half is there. */
+const MAY_STOP =
+  /^\/(crew\/0\/arcRated|decision\/reason|surroundings\/groundedSurfaces\/0(\/covered|\/keptClear)?)$/;
+
+describe('an answer left out is never a stop (convention 2)', () => {
+  it.each(LEAVES.filter(([, pointer]) => !MAY_STOP.test(pointer)))(
+    '%s: %s, a %s',
+    (base, pointer) => {
+      const isMember = /\/\d+$/.test(pointer);
+      const result = assessBase(base, { [pointer.slice(1)]: isMember ? {} : gone });
+      const stops = result.findings.filter(({ severity }) => severity === 'stop');
+      expect(stops.map(({ code }) => code)).toEqual([]);
+    },
+  );
+});
+
+/** The same numbers for the same seed. */
+function numbers(seed: number): (below: number) => number {
+  let state = seed;
+  return (below) => {
+    state = (state * 1_103_515_245 + 12_345) % 2_147_483_648;
+    return Math.floor((state / 2_147_483_648) * below);
+  };
+}
+
+describe('no content makes assess throw, or answer twice differently', () => {
+  const POOL: unknown[] = [
+    undefined,
+    null,
+    '',
+    'x',
+    'none',
+    'restricted',
+    'energized',
+    'testing',
+    0,
+    -1,
+    1,
+    50,
+    480,
+    1e9,
+    NaN,
+    Infinity,
+    true,
+    false,
+    [],
+    {},
+    [null],
+    [{}],
+    ['x'],
+  ];
+  it.each(Array.from({ length: 120 }, (_value, index) => index + 1))('seed %s', (seed) => {
+    const next = numbers(seed * 7919);
+    const base = EVERY_BASE[next(EVERY_BASE.length)] ?? 'O';
+    const own = LEAVES.filter(([of]) => of === base);
+    const edits = Object.fromEntries(
+      Array.from({ length: 8 }, () => [
+        own[next(own.length)]?.[1].slice(1) ?? 'notes',
+        POOL[next(POOL.length)],
+      ]),
+    );
+    expect(assessBase(base, edits)).toEqual(assessBase(base, edits));
+  });
+});

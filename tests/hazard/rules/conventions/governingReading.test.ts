@@ -39,6 +39,7 @@ describe('the governing reading (convention 9)', () => {
     ['a retest at another point', [{ volts: 120 }, { volts: 0, point: 'A2', ...low }], 1, 0],
     ['a retest of direct current', [{ volts: 120 }, { volts: 0, current: 'dc', ...low }], 1, 0],
     ['a retest of a source', [{ volts: 120 }, { volts: 0, sourceId: 's1', ...low }], 1, 0],
+    ['a retest without a figure settles nothing', [{ volts: 120 }, { volts: NaN, ...low }], 1, 0],
     ['negative, by magnitude', [{ volts: -120 }], 1, 0],
     ['negative and smaller positive', [{ volts: -60 }, { volts: 20 }], 1, 0],
     ['stray, negative', [{ volts: -4 }], 0, 1],
