@@ -205,6 +205,32 @@ describe('coverage of every value', () => {
   });
 });
 
+describe('field errors', () => {
+  it('has words for each code that the schemas give', () => {
+    const bad: [z.ZodType, unknown][] = [
+      [worksheetContentSchema, { nothing: 1 }],
+      [worksheetContentSchema, { job: { area: 1 } }],
+      [worksheetContentSchema, { job: { pointsOfWork: 41 } }],
+      [worksheetContentSchema, { job: { pointsOfWork: 0 } }],
+      [worksheetContentSchema, { job: { startsAt: 'soon' } }],
+      [worksheetContentSchema, { job: { task: 'rest' } }],
+      [worksheetContentSchema, { job: { area: '\u0000' } }],
+      [record.reasonSchema, { reason: ' ' }],
+      [record.strokesSchema, [[[1, 1]]]],
+      [register.siteInputSchema, { name: 'A', timeZone: 'Nowhere' }],
+      [user.newPin, '123456'],
+    ];
+    const known = [...Object.keys(en.common.fieldErrors), 'unrecognized_keys'];
+    for (const [schema, value] of bad) {
+      const issues = schema.safeParse(value).error?.issues ?? [];
+      expect(issues).not.toEqual([]);
+      for (const issue of issues) {
+        expect(known).toContain(issue.code === 'custom' ? issue.params?.['code'] : issue.code);
+      }
+    }
+  });
+});
+
 describe('both languages', () => {
   it('have the same keys', () => {
     const paths = (texts: [string, string][]) => [...new Set(texts.map(([path]) => path))];
