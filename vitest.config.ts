@@ -36,7 +36,7 @@ export default defineConfig({
             {
               find: /^react-native-svg$/,
               replacement: path.resolve(
-                __dirname,
+                import.meta.dirname,
                 'node_modules/react-native-svg/lib/module/ReactNativeSVG.web.js',
               ),
             },

@@ -48,7 +48,8 @@ function useExample() {
         name: account.figure.arcFlash,
         pair: arcFlash.arcFlashBoundary,
       });
-      citations.push(...arcFlash.citations);
+      // Of all that likelihood and clothing rest on, only the table that the distance is from.
+      citations.push(...arcFlash.citations.filter(({ table }) => table.includes('(C)(15)(a)')));
     }
     if (barricade)
       lines.push({ zone: 'barricade', name: account.figure.barricade, pair: barricade });
@@ -89,33 +90,34 @@ export function ExampleFigure() {
   const { colors } = useTheme();
   const { assessment, lines, citations } = useExample();
   return (
-    <View style={styles.figure}>
-      <Section assessment={assessment} />
-      <View style={styles.legend}>
-        <Text variant="value">{account.figure.title}</Text>
-        {lines.map(({ zone, name, pair }) => (
-          <View key={zone} style={[styles.line, { borderTopColor: colors.hair }]}>
-            <ZoneSwatch zone={zone} />
-            <View>
-              <Text variant="signal" style={styles.distance}>
-                {distance(pair, units)}
-              </Text>
-              <Text variant="note">{name}</Text>
+    <View style={styles.all}>
+      <View style={styles.figure}>
+        <Section assessment={assessment} />
+        <View style={styles.legend}>
+          <Text variant="value">{account.figure.title}</Text>
+          {lines.map(({ zone, name, pair }) => (
+            <View key={zone} style={[styles.line, { borderTopColor: colors.hair }]}>
+              <ZoneSwatch zone={zone} />
+              <View>
+                <Text variant="signal" style={styles.distance}>
+                  {distance(pair, units)}
+                </Text>
+                <Text variant="note">{name}</Text>
+              </View>
             </View>
-          </View>
-        ))}
-        <View style={[styles.source, { borderTopColor: colors.hair }]}>
-          <Citation lead={account.figure.example} citation={citations} confidence={false} />
+          ))}
         </View>
       </View>
+      <Citation lead={account.figure.example} citation={citations} />
     </View>
   );
 }
 
 const styles = StyleSheet.create({
+  all: { gap: space.sm },
   figure: { flexDirection: 'row', alignItems: 'flex-start', gap: space.xl },
   section: { flex: 1, minWidth: 0, overflow: 'hidden' },
-  legend: { width: 236 },
+  legend: { width: 200 },
   line: {
     flexDirection: 'row',
     alignItems: 'center',
@@ -125,5 +127,4 @@ const styles = StyleSheet.create({
     paddingTop: space.xs,
   },
   distance: { fontSize: 22, lineHeight: 26 },
-  source: { borderTopWidth: 1, marginTop: space.xs, paddingTop: space.sm },
 });

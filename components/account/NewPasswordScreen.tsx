@@ -8,6 +8,7 @@ import {
   Button,
   describeFault,
   ErrorSummary,
+  Form,
   Notice,
   PinField,
   Text,
@@ -102,36 +103,38 @@ export function NewPasswordScreen(props: Props) {
   }
   return (
     <SignedOutFrame title={words.title}>
-      <Text>{words.body}</Text>
-      {form.tried && !form.save.isPending && <ErrorSummary faults={form.faults} />}
-      <TextField
-        id="password"
-        label={account.newPassword}
-        hint={account.passwordHint}
-        value={form.password}
-        onChangeText={form.setPassword}
-        error={form.passwordError}
-        secure
-        exact
-        autoComplete="new-password"
-      />
-      {form.withPin && (
-        <PinField
-          id="pin"
-          label={account.newPin}
-          hint={account.pinHint}
-          value={form.pin}
-          onChange={form.setPin}
-          error={form.pinError}
+      <Form label={words.title}>
+        <Text>{words.body}</Text>
+        {form.tried && !form.save.isPending && <ErrorSummary faults={form.faults} />}
+        <TextField
+          id="password"
+          label={account.newPassword}
+          hint={account.passwordHint}
+          value={form.password}
+          onChangeText={form.setPassword}
+          error={form.passwordError}
+          secure
+          exact
+          autoComplete="new-password"
         />
-      )}
-      <Button
-        kind="primary"
-        large
-        label={words.save}
-        onPress={form.submit}
-        busy={form.save.isPending}
-      />
+        {form.withPin && (
+          <PinField
+            id="pin"
+            label={account.newPin}
+            hint={account.pinHint}
+            value={form.pin}
+            onChange={form.setPin}
+            error={form.pinError}
+          />
+        )}
+        <Button
+          kind="primary"
+          large
+          label={words.save}
+          onPress={form.submit}
+          busy={form.save.isPending}
+        />
+      </Form>
     </SignedOutFrame>
   );
 }

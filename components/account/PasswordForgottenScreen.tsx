@@ -3,7 +3,7 @@ import { useState } from 'react';
 import { z } from 'zod';
 import { json, request } from '../api/request';
 import { useMessages } from '../i18n/useMessages';
-import { Button, describeFault, ErrorSummary, Notice, Text, TextField } from '../ui';
+import { Button, describeFault, ErrorSummary, Form, Notice, Text, TextField } from '../ui';
 import { SignedOutFrame } from './SignedOutFrame';
 
 /** The answer is the same whether the e-mail is known or not. */
@@ -33,7 +33,7 @@ export function PasswordForgottenScreen() {
           {account.reset.sent}
         </Notice>
       ) : (
-        <>
+        <Form label={account.reset.title}>
           <Text>{account.reset.body}</Text>
           {ask.isError && (
             <ErrorSummary faults={[{ message: describeFault(ask.error, messages) }]} />
@@ -56,7 +56,7 @@ export function PasswordForgottenScreen() {
             onPress={handleSubmit}
             busy={ask.isPending}
           />
-        </>
+        </Form>
       )}
       <Button kind="quiet" icon="left" label={account.reset.toSignIn} href="/sign-in" />
     </SignedOutFrame>

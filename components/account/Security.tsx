@@ -1,13 +1,12 @@
 import { useState } from 'react';
-import { View } from 'react-native';
 import { isProblem } from '../api/ApiProblem';
 import { useUser } from '../api/session';
 import { useMessages } from '../i18n/useMessages';
-import { space } from '../theme/tokens';
 import {
   Button,
   describeFault,
   ErrorSummary,
+  Form,
   Notice,
   PinField,
   Section,
@@ -54,7 +53,7 @@ function PasswordForm({ onDone, onCancel }: FormProps) {
   }
 
   return (
-    <View style={{ gap: space.md }}>
+    <Form label={account.changePassword}>
       {tried && !change.isPending && <ErrorSummary faults={faults} />}
       <TextField
         id="current-password"
@@ -79,7 +78,7 @@ function PasswordForm({ onDone, onCancel }: FormProps) {
       />
       <Button kind="primary" label={account.save} onPress={handleSave} busy={change.isPending} />
       <Button label={account.cancel} onPress={onCancel} />
-    </View>
+    </Form>
   );
 }
 
@@ -110,7 +109,7 @@ function PinForm({ onDone, onCancel }: FormProps) {
   }
 
   return (
-    <View style={{ gap: space.md }}>
+    <Form label={account.changePin}>
       {tried && !change.isPending && <ErrorSummary faults={faults} />}
       <TextField
         id="pin-password"
@@ -135,7 +134,7 @@ function PinForm({ onDone, onCancel }: FormProps) {
       </Text>
       <Button kind="primary" label={account.save} onPress={handleSave} busy={change.isPending} />
       <Button label={account.cancel} onPress={onCancel} />
-    </View>
+    </Form>
   );
 }
 

@@ -4,7 +4,7 @@ import { useSession, useSignIn } from '../api/session';
 import { isProblem } from '../api/ApiProblem';
 import type { Messages } from '@/shared/messages';
 import { useMessages } from '../i18n/useMessages';
-import { Button, describeFault, ErrorSummary, TextField, type FieldFault } from '../ui';
+import { Button, describeFault, ErrorSummary, Form, TextField, type FieldFault } from '../ui';
 import { SignedOutFrame } from './SignedOutFrame';
 
 /** Only a path of our own is followed after sign-in, never another site. */
@@ -51,36 +51,38 @@ export function SignInScreen({ to }: { to?: string }) {
 
   return (
     <SignedOutFrame title={account.signIn} purpose foot={account.fromOffice}>
-      {tried && !signIn.isPending && <ErrorSummary faults={faults} />}
-      <TextField
-        id="email"
-        label={account.email}
-        value={email}
-        onChangeText={setEmail}
-        error={emailError}
-        exact
-        inputMode="email"
-        autoComplete="username"
-        onSubmitEditing={handleSubmit}
-      />
-      <TextField
-        id="password"
-        label={account.password}
-        value={password}
-        onChangeText={setPassword}
-        error={passwordError}
-        secure
-        exact
-        autoComplete="current-password"
-        onSubmitEditing={handleSubmit}
-      />
-      <Button
-        kind="primary"
-        large
-        label={account.signIn}
-        onPress={handleSubmit}
-        busy={signIn.isPending}
-      />
+      <Form label={account.signIn}>
+        {tried && !signIn.isPending && <ErrorSummary faults={faults} />}
+        <TextField
+          id="email"
+          label={account.email}
+          value={email}
+          onChangeText={setEmail}
+          error={emailError}
+          exact
+          inputMode="email"
+          autoComplete="username"
+          onSubmitEditing={handleSubmit}
+        />
+        <TextField
+          id="password"
+          label={account.password}
+          value={password}
+          onChangeText={setPassword}
+          error={passwordError}
+          secure
+          exact
+          autoComplete="current-password"
+          onSubmitEditing={handleSubmit}
+        />
+        <Button
+          kind="primary"
+          large
+          label={account.signIn}
+          onPress={handleSubmit}
+          busy={signIn.isPending}
+        />
+      </Form>
       <Button kind="quiet" label={account.forgotten} href="/password-forgotten" />
     </SignedOutFrame>
   );

@@ -128,7 +128,7 @@ export function SignedOutFrame({ title, purpose = false, foot, children }: Props
 const styles = StyleSheet.create({
   page: { flexGrow: 1, minHeight: '100%' },
   wide: { flexDirection: 'row', alignItems: 'stretch' },
-  left: { flex: 2, minWidth: 0, paddingHorizontal: 56, paddingVertical: 40, gap: space.xl },
+  left: { flex: 2, minWidth: 0, paddingHorizontal: 56, paddingVertical: 36, gap: space.lg },
   right: {
     flex: 1,
     minWidth: 400,
@@ -140,7 +140,7 @@ const styles = StyleSheet.create({
     justifyContent: 'space-between',
   },
   formWide: { gap: space.lg, flex: 1, paddingTop: space.xxl },
-  figure: { paddingTop: space.xl, flex: 1 },
+  figure: { paddingTop: space.lg, flex: 1 },
   wideFoot: { paddingTop: space.lg },
   column: {
     width: '100%',
@@ -152,12 +152,12 @@ const styles = StyleSheet.create({
   columnTablet: { maxWidth: 560 },
   language: { alignSelf: 'flex-end' },
   purpose: { gap: space.sm, paddingTop: space.xs },
-  purposeWide: { gap: space.lg },
+  purposeWide: { gap: space.md },
   brand: { gap: space.xs },
   brandWide: { flexDirection: 'row', alignItems: 'center', gap: space.lg },
   name: { fontSize: 44, lineHeight: 52, letterSpacing: -0.22 },
   nameWide: { fontSize: 52, lineHeight: 60, letterSpacing: -0.26 },
-  taglineWide: { fontSize: 26, lineHeight: 36, maxWidth: 640 },
+  taglineWide: { fontSize: 24, lineHeight: 32, maxWidth: 640 },
   form: { gap: space.md, paddingTop: space.lg, marginTop: space.xxs },
   foot: { marginTop: 'auto' },
 });

@@ -21,6 +21,7 @@ export { Facts, type Fact } from './Facts';
 export { describeFault, referenceOf } from './faults';
 export { Field, fieldAria, type FieldProps } from './Field';
 export { focusField } from './focusField';
+export { Form } from './Form';
 export { Header, type BackLink } from './Header';
 export { Icon, Mark } from './Icon';
 export { iconPaths, markLine, type IconName } from './icons';

@@ -6,7 +6,7 @@ import sharp from 'sharp';
  * Draws the pictures of the app's icon from the mark. Run by hand when the
  * mark changes; the pictures are kept in the repository.
  */
-const root = path.resolve(__dirname, '../..');
+const root = path.resolve(import.meta.dirname, '../..');
 const INK = '#1B1916';
 const PAPER = '#F6F1E6';
 
