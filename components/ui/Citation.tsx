@@ -1,6 +1,7 @@
 import { Fragment } from 'react';
 import type { Citation as CitationData } from '@/hazard/types';
-import { useMessages } from '../i18n/useMessages';
+import { citationPlace, citationWords } from '@/shared/messages';
+import { useLocale } from '../i18n/preferences';
 import { Text } from './Text';
 
 /** 0.13 em between `)` and `(`: Barlow's parentheses touch where they meet. */
@@ -27,20 +28,12 @@ interface Props {
   lead?: string;
 }
 
-function where({ standard, edition, table }: CitationData): string {
-  const name = edition === '' ? standard : `${standard}-${edition}`;
-  return [name, table].filter((part) => part !== '').join(' ');
-}
-
 /** Where a figure or a rule comes from, and in words how it was checked. */
 export function Citation({ citation, confidence = true, lead }: Props) {
-  const { ui } = useMessages();
+  const locale = useLocale();
   const all = 'standard' in citation ? [citation] : citation;
-  const lines = all.map((each) => {
-    const place = where(each);
-    const word = ui.confidence[each.confidence];
-    return confidence && place !== word ? `${place}. ${word}` : place;
-  });
+  const words = confidence ? citationWords : citationPlace;
+  const lines = all.map((each) => words(locale, each));
   const text = [...new Set(lines)].join('. ');
   return (
     <Text variant="cite" color="ink2">

@@ -21,16 +21,17 @@ function placeOf({ standard, edition, table }: Citation, ownRule: string): strin
     : `${standard}, ${edition}, ${table}`;
 }
 
-/**
- * Where a figure or a rule comes from and how it was checked:
- * `NFPA 70E-2024 Table 130.5(C). From memory, to be checked`.
- */
-export function citationWords(locale: Locale, citation: Citation): string {
-  const { citations } = messages(locale);
-  const printed = placeOf(citation, citations.ownRule);
+/** Where a figure or a rule comes from: `NFPA 70E-2024 Table 130.5(C)`. */
+export function citationPlace(locale: Locale, citation: Citation): string {
+  const printed = placeOf(citation, messages(locale).citations.ownRule);
   const place =
     locale === 'es-MX'
       ? citationParts.reduce((text, { from, to }) => text.replaceAll(from, to), printed)
       : printed;
-  return noBreak(`${place}. ${enumWord(locale, 'confidence', citation.confidence)}`);
+  return noBreak(place);
+}
+
+/** The same, and how it was checked: `NFPA 70E-2024 Table 130.5(C). From memory, to be checked`. */
+export function citationWords(locale: Locale, citation: Citation): string {
+  return `${citationPlace(locale, citation)}. ${enumWord(locale, 'confidence', citation.confidence)}`;
 }

@@ -1,6 +1,6 @@
 export { messages } from './languages';
 export type { Messages } from './languages';
-export { citationWords } from './citationWords';
+export { citationPlace, citationWords } from './citationWords';
 export { enumWord } from './enumWord';
 export type { EnumGroup } from './enumWord';
 export { fieldLabel, findingWords, itemWords, sectionNumberOf } from './findingWords';
