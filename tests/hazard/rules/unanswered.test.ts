@@ -465,8 +465,8 @@ describe('an answer left out is never a stop (convention 2)', () => {
       const result = assessBase(base, { [pointer.slice(1)]: isMember ? {} : gone });
       const stops = result.findings.filter(({ severity }) => severity === 'stop');
       // Testing without a task is a worksheet of the W path: there a surface kept clear is not enough.
-    const isOtherPath = base === 'T' && ['/job', '/job/task'].includes(pointer);
-    expect(stops.map(({ code }) => code)).toEqual(isOtherPath ? ['shock.grounded-surface'] : []);
+      const isOtherPath = base === 'T' && ['/job', '/job/task'].includes(pointer);
+      expect(stops.map(({ code }) => code)).toEqual(isOtherPath ? ['shock.grounded-surface'] : []);
     },
   );
 });
