@@ -98,6 +98,9 @@ const OTHERS: DemoPerson[] = [
   },
 ];
 
+/** Everyone of the invented company. */
+export const DEMO_PEOPLE: readonly DemoPerson[] = [...DEMO_ACCOUNTS, ...OTHERS];
+
 /** True where the database holds accounts whose passwords everybody knows. */
 export async function hasDemo(): Promise<boolean> {
   return (await User.count({ where: { demo: true } })) > 0;
@@ -141,7 +144,7 @@ async function seedRegister(): Promise<void> {
   const stamps = { createdAt: now, updatedAt: now };
   const passwordHash = await hashSecret(DEMO_PASSWORD);
   const people = await Promise.all(
-    [...DEMO_ACCOUNTS, ...OTHERS].map(async (person) => ({
+    DEMO_PEOPLE.map(async (person) => ({
       ...person,
       id: v7(),
       pinHash: await hashSecret(person.pin),
