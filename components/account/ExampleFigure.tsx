@@ -78,7 +78,12 @@ function Section({ assessment }: Pick<ReturnType<typeof useExample>, 'assessment
       onLayout={(event) => setWidth(Math.floor(Math.min(WIDEST, event.nativeEvent.layout.width)))}
       style={[styles.section, { height: made === null ? 360 : made.floor + 3 }]}
     >
-      {made && <DrawingView drawing={made.drawing} />}
+      {made && (
+        // Its own height, or the browser would shrink the whole drawing into the part that is shown.
+        <View style={{ height: made.drawing.height, flexShrink: 0 }}>
+          <DrawingView drawing={made.drawing} />
+        </View>
+      )}
     </View>
   );
 }

@@ -5,7 +5,7 @@ import { rule, space } from '../theme/tokens';
 import { useTheme } from '../theme/useTheme';
 import { ListRow, Text } from '../ui';
 import { links } from './links';
-import { placeWords, rowMark, rowState, taskWords } from './rowWords';
+import { inSentence, placeWords, rowMark, rowState, taskWords } from './rowWords';
 import type { Waiting } from './waiting';
 import type { ReactNode } from 'react';
 
@@ -62,7 +62,7 @@ export function RowList({ rows }: { rows: readonly WorksheetRow[] }) {
           <ListRow
             first={index === 0}
             mark={rowMark(row)}
-            title={`${row.number}, ${taskWords(row, messages)}`}
+            title={`${row.number}, ${inSentence(taskWords(row, messages))}`}
             note={`${placeWords(row, messages)}. ${rowState(row, messages)}`}
             href={links.worksheet(row.id)}
           />

@@ -12,7 +12,6 @@ import {
   LoadingScreen,
   Notice,
   OfflineScreen,
-  PlacesList,
   ProblemScreen,
   SavedState,
   Screen,
@@ -123,7 +122,7 @@ export function HomeScreen() {
 
   const rows = list.data.items;
   const zone = rows[0]?.timeZone ?? deviceZone();
-  const sentAt = timeText(new Date(list.dataUpdatedAt).toISOString(), deviceZone());
+  const readAt = timeText(new Date(list.dataUpdatedAt).toISOString(), deviceZone());
   const waits = <Waits items={waitsFor(user, rows, messages)} />;
   const days = <Days groups={homeGroups(rows, now)} />;
   const mayBegin = user.role === 'lead' || user.role === 'supervisor';
@@ -137,9 +136,9 @@ export function HomeScreen() {
       head={
         <View style={styles.kept}>
           <SavedState icon={kept > 0 ? 'kept' : 'sent'}>
-            {`${kept > 0 ? home.keptHere(kept) : home.allSent}. ${home.lastSent(sentAt)}`}
+            {`${kept > 0 ? home.keptHere(kept) : home.allSent}. ${home.asOf(readAt)}`}
           </SavedState>
-          {list.isError && <Notice icon="clock">{home.asLastSeen(sentAt)}</Notice>}
+          {list.isError && <Notice icon="clock">{home.asLastSeen(readAt)}</Notice>}
         </View>
       }
     >
@@ -154,7 +153,6 @@ export function HomeScreen() {
           {days}
         </>
       )}
-      <PlacesList current="home" />
     </Screen>
   );
 }

@@ -54,3 +54,18 @@ export function placeWords(row: WorksheetRow, { home }: Messages): string {
 export function endWords(row: WorksheetRow, { home }: Messages): string | undefined {
   return row.endsAt === null ? undefined : home.until(timeText(row.endsAt, row.timeZone));
 }
+
+/** A task inside a sentence: `replace a lamp`. No task begins with a name or an abbreviation. */
+export function inSentence(words: string): string {
+  return words.charAt(0).toLowerCase() + words.slice(1);
+}
+
+/** Why it was stopped or returned, quoted; a ready reason in the reader's language. */
+export function reasonWords(
+  row: WorksheetRow,
+  { enumerations, home }: Messages,
+): string | undefined {
+  if (row.reason === null || row.reason === '') return undefined;
+  const ready = enumerations.stopReason as Readonly<Record<string, string>>;
+  return home.quoted(ready[row.reason] ?? row.reason);
+}

@@ -5,7 +5,7 @@ import type { WorksheetRow } from '@/shared/record';
 import type { SessionUser } from '@/shared/user';
 import type { IconName, MarkState } from '../ui';
 import { links } from './links';
-import { endWords, placeWords, taskWords } from './rowWords';
+import { endWords, inSentence, placeWords, reasonWords, taskWords } from './rowWords';
 
 /** One thing that only this person can move on. */
 export interface Waiting {
@@ -26,12 +26,11 @@ interface Asked {
 }
 
 const note = ({ row, words }: Asked, ...more: (string | undefined)[]) => {
-  const about = [row.number, taskWords(row, words), placeWords(row, words)].join(', ');
+  const about = [row.number, inSentence(taskWords(row, words)), placeWords(row, words)].join(', ');
   return [about, ...more].filter((part) => part !== undefined && part !== '').join('. ');
 };
 
-const quoted = ({ row, words }: Asked) =>
-  row.reason === null || row.reason === '' ? undefined : words.home.quoted(row.reason);
+const quoted = ({ row, words }: Asked) => reasonWords(row, words);
 
 function forLead(asked: Asked): Waiting[] {
   const { row, words } = asked;

@@ -163,6 +163,7 @@ const styles = StyleSheet.create({
     flexDirection: 'row',
     flexWrap: 'wrap',
     alignSelf: 'stretch',
+    alignContent: 'stretch',
     columnGap: space.xs,
   },
   place: {

@@ -8,30 +8,29 @@ import { Icon } from './Icon';
 import { useShell } from './shell';
 import { Text } from './Text';
 
-/** On a phone the places of a supervisor or of the safety office stand below the page as lines. */
-export function PlacesList({ current }: { current?: string }) {
+/** On a phone the places that the header has no room for stand below the page as lines. */
+export function PlacesList({ hidden }: { hidden: readonly string[] }) {
   const { places } = useShell();
   const { isPhone } = useBreakpoint();
   const { colors } = useTheme();
   const { ui } = useMessages();
-  if (!isPhone || places.length < 2) return null;
+  const shown = places.filter((place) => !hidden.includes(place.key));
+  if (!isPhone || shown.length === 0) return null;
   return (
     <View role="navigation" aria-label={ui.menu}>
-      {places
-        .filter((place) => place.key !== current)
-        .map((place) => (
-          <Link key={place.key} href={place.href} asChild>
-            <Pressable
-              role="link"
-              style={StyleSheet.flatten([styles.row, { borderTopColor: colors.hair }])}
-            >
-              <Text variant="strong" color="blue">
-                {place.label}
-              </Text>
-              <Icon name="right" color="blue" size={22} />
-            </Pressable>
-          </Link>
-        ))}
+      {shown.map((place) => (
+        <Link key={place.key} href={place.href} asChild>
+          <Pressable
+            role="link"
+            style={StyleSheet.flatten([styles.row, { borderTopColor: colors.hair }])}
+          >
+            <Text variant="strong" color="blue">
+              {place.label}
+            </Text>
+            <Icon name="right" color="blue" size={22} />
+          </Pressable>
+        </Link>
+      ))}
     </View>
   );
 }

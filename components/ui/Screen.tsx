@@ -6,6 +6,7 @@ import { useTheme } from '../theme/useTheme';
 import { useMessages } from '../i18n/useMessages';
 import { CautionFoot } from './CautionFoot';
 import { Header, type BackLink } from './Header';
+import { PlacesList } from './PlacesList';
 import { ScreenFrame } from './ScreenFrame';
 import { Text } from './Text';
 import { useDocumentTitle } from './useDocumentTitle';
@@ -36,6 +37,9 @@ export interface ScreenProps {
   caution?: 'short' | 'none';
   children?: ReactNode;
 }
+
+/** Home leads to the archive by its own words. */
+const placesHidden = (place: string) => (place === 'home' ? ['home', 'archive'] : [place]);
 
 const WIDTHS = { column: layout.column, helper: layout.helper, full: undefined } as const;
 
@@ -87,6 +91,7 @@ export function Screen(props: ScreenProps) {
           {hideTitle !== true && <TitleRow {...props} />}
           {props.head}
           {props.children}
+          {props.place !== undefined && <PlacesList hidden={placesHidden(props.place)} />}
         </View>
         {caution !== 'none' && (
           <View style={[styles.foot, { borderTopColor: colors.ink }]}>

@@ -29,7 +29,7 @@ export const home = {
   keptHere: (count: number) =>
     count === 1 ? '1 kept here, not sent' : `${count} kept here, not sent`,
   allSent: 'All sent',
-  lastSent: (time: string) => `Last sent ${time}`,
+  asOf: (time: string) => `As of ${time}`,
   asLastSeen: (time: string) => `No answer from the server. Shown as of ${time}.`,
   number: (number: string) => `Worksheet ${number}`,
   noTask: 'Task not named',

@@ -32,7 +32,7 @@ export const home: Words<typeof en> = {
   keptHere: (count) =>
     count === 1 ? '1 guardada aquí, sin enviar' : `${count} guardadas aquí, sin enviar`,
   allSent: 'Todo enviado',
-  lastSent: (time) => `Último envío ${time}`,
+  asOf: (time) => `Hasta las ${time}`,
   asLastSeen: (time) => `El servidor no responde. Se muestra lo de las ${time}.`,
   number: (number) => `Hoja ${number}`,
   noTask: 'Tarea sin nombrar',

@@ -28,7 +28,7 @@ it('a mark is never without its word, in either language', () => {
       </PreferencesProvider>,
     );
     expect(container.querySelectorAll('svg')).toHaveLength(MARK_STATES.length);
-    const words = [...container.querySelectorAll('[dir="auto"]')].map(
+    const words = Array.from(container.querySelectorAll('[dir="auto"]')).map(
       (element) => element.textContent,
     );
     expect(words.filter((word) => word === '')).toEqual([]);
