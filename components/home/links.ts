@@ -1,14 +1,14 @@
 import type { Href } from 'expo-router';
 
+const at = (worksheetId: string, act = ''): Href => `/worksheets/${worksheetId}${act}` as Href;
+
 /** Where a worksheet's acts stand. */
 export const links = {
-  worksheet: (id: string): Href => `/worksheets/${id}` as Href,
-  proof: (id: string): Href => `/worksheets/${id}/proof` as Href,
-  sign: (id: string): Href => `/worksheets/${id}/sign` as Href,
-  briefing: (id: string): Href => `/worksheets/${id}/briefing` as Href,
-  countersign: (id: string): Href => `/worksheets/${id}/countersign` as Href,
-  close: (id: string): Href => `/worksheets/${id}/close` as Href,
+  worksheet: (worksheetId: string) => at(worksheetId),
+  proof: (worksheetId: string) => at(worksheetId, '/proof'),
+  sign: (worksheetId: string) => at(worksheetId, '/sign/prepared'),
+  briefing: (worksheetId: string, signerId: string) => at(worksheetId, `/brief/${signerId}`),
+  close: (worksheetId: string) => at(worksheetId, '/close'),
   newWorksheet: '/worksheets/new' as Href,
   archive: '/archive' as Href,
-  board: '/board' as Href,
 };

@@ -126,7 +126,7 @@ function forCrew(asked: Asked, user: SessionUser): Waiting[] {
         title: waiting.acknowledge,
         note: note(asked, row.leadName),
         action: waiting.readAndSign,
-        href: links.briefing(row.id),
+        href: links.briefing(row.id, user.id),
         urgency: 1,
       },
     ];
@@ -158,7 +158,7 @@ function forSupervisor(asked: Asked, user: SessionUser): Waiting[] {
       title: words.home.waiting.countersign,
       note: note(asked, row.leadName),
       action: words.home.waiting.read,
-      href: links.countersign(row.id),
+      href: links.worksheet(row.id),
       urgency: 1,
     },
   ];
