@@ -218,6 +218,8 @@ export const worksheetRowSchema = z.object({
   mode: z.enum(['off', 'energized']).nullable(),
   verdict: z.enum(['stop', 'open', 'ready']),
   counts: z.object({ stop: z.number(), open: z.number(), caution: z.number() }),
+  /** Codes of what was met on the way, stops that were cleared since included. */
+  metCodes: z.array(z.string()).optional(),
   revision: z.number(),
   siteId: z.string().nullable(),
   siteName: z.string().nullable(),
@@ -267,6 +269,7 @@ export const eventSchema = z.object({
   actorId: z.string().nullable(),
   actorName: z.string().nullable().optional(),
   enteredById: z.string().nullable(),
+  enteredByName: z.string().nullable().optional(),
   at: z.string(),
   payload: z.record(z.string(), z.unknown()),
   hash: z.string(),

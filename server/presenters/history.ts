@@ -40,6 +40,7 @@ export function presentEvent(row: Event, people: People): WorksheetEvent {
     actorId: row.actorId,
     actorName: row.actorId === null ? null : (people.get(row.actorId)?.name ?? null),
     enteredById: row.enteredById,
+    enteredByName: row.enteredById === null ? null : (people.get(row.enteredById)?.name ?? null),
     at: row.at.toISOString(),
     payload: row.payload,
     hash: row.hash,

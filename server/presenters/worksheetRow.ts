@@ -17,6 +17,7 @@ export function presentWorksheetRow(parts: RowParts): WorksheetRow {
       open: worksheet.openCount,
       caution: worksheet.cautionCount,
     },
+    metCodes: worksheet.metCodes,
     revision: worksheet.revision,
     siteId: worksheet.siteId,
     siteName: place.siteName,

@@ -88,5 +88,8 @@ export async function listEvents(
     where: { subjectId: worksheet.id },
     order: [['seq', 'ASC']],
   });
-  return { events, people: await loadPeople(events.map(({ actorId }) => actorId)) };
+  return {
+    events,
+    people: await loadPeople(events.flatMap(({ actorId, enteredById }) => [actorId, enteredById])),
+  };
 }
