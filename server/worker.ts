@@ -3,14 +3,14 @@ import type { Queue } from './jobs';
 import { logger } from './log';
 import { expireWorksheets } from './services/expireWorksheets';
 import type { MailJob } from './services/queueMail';
+import { runNightly } from './services/runNightly';
 import { sendMail } from './services/sendMail';
-import { voidStaleDrafts } from './services/voidStaleDrafts';
 
 /** What each queue does with one job. Any process may run it; a job is given to one of them. */
 export const handlers: Record<Queue, (data: object) => Promise<unknown>> = {
   mail: (data) => sendMail(data as MailJob),
   'expire-worksheets': () => expireWorksheets(),
-  nightly: () => voidStaleDrafts(),
+  nightly: () => runNightly(),
 };
 
 /** Takes jobs until the process ends. */

@@ -1,24 +1,19 @@
 import { Op, QueryTypes } from 'sequelize';
 import type { Transaction } from 'sequelize';
+import { messages } from '@/shared/messages';
+import type { Messages } from '@/shared/messages';
+import type { Locale } from '@/shared/user';
 import { sequelize } from '../db';
 import type { Event } from '../models/Event';
 import { User } from '../models/User';
 import type { Worksheet } from '../models/Worksheet';
+import { queueMail } from './queueMail';
 
-/** What a mail about a worksheet tells; its words are in `shared/messages`. */
-export type WorksheetNews =
-  | 'awaits-acknowledgement'
-  | 'awaits-countersignature'
-  | 'in-force'
-  | 'acknowledged-for-you'
-  | 'returned'
-  | 'stopped'
-  | 'expired'
-  | 'asked'
-  | 'answered';
+/** What a mail about a worksheet tells. */
+export type WorksheetNews = keyof Messages['mail']['worksheet'];
 
 interface News {
-  event: Event;
+  event: Pick<Event, 'seq'>;
   news: WorksheetNews;
   worksheet: Worksheet;
   recipientIds: readonly string[];
@@ -40,12 +35,34 @@ export async function supervisorsOf(
   return rows.map(({ id }) => id).filter((id) => !aside.has(id));
 }
 
+/** A ready reason in the reader's language; own words as they were written. */
+function reasonIn(locale: Locale, reason: string): string {
+  const ready: Readonly<Record<string, string>> = messages(locale).enumerations.stopReason;
+  return Object.hasOwn(ready, reason) ? (ready[reason] ?? reason) : reason;
+}
+
 /** Queues one mail a person as part of the transaction of what it tells about. */
-export async function notify(transaction: Transaction, news: News): Promise<void> {
+export async function notify(
+  transaction: Transaction,
+  { event, news, worksheet, recipientIds, reason }: News,
+): Promise<void> {
   const people = await User.findAll({
-    where: { id: [...new Set(news.recipientIds)], retiredAt: { [Op.is]: null } },
+    where: { id: [...new Set(recipientIds)], retiredAt: { [Op.is]: null } },
     order: [['id', 'ASC']],
     transaction,
   });
-  void people;
+  for (const recipient of people) {
+    await queueMail(transaction, {
+      recipient,
+      about: `event ${event.seq} ${news}`,
+      words: (mail) => ({
+        subject: mail.worksheet[news].subject(worksheet.number),
+        body:
+          reason === undefined
+            ? mail.worksheet[news].body
+            : `${mail.worksheet[news].body}\n\n${mail.reason(reasonIn(recipient.locale, reason))}`,
+      }),
+      path: `/worksheets/${worksheet.id}`,
+    });
+  }
 }
