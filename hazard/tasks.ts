@@ -70,4 +70,6 @@ export function jobTaskFacts(task: JobTask): JobTaskFacts {
 }
 
 /** A task that is not answered yet counts as the repair that asks the most of a luminaire. */
-export const UNANSWERED_TASK_FACTS: JobTaskFacts = luminaireRepair;
+export function answeredTaskFacts(task: JobTask | undefined): JobTaskFacts {
+  return task === undefined ? luminaireRepair : jobTaskFacts(task);
+}

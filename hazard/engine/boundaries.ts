@@ -8,16 +8,6 @@ import type { Answers } from './answers';
 import type { ArcFacts } from './arc';
 import type { Voltage } from './voltage';
 
-/** An answer that may be past what a figure is worked out for gives no figure. */
-function unlessRefused<T>(make: () => T): T | null {
-  try {
-    return make();
-  } catch (error) {
-    if (error instanceof RangeError) return null;
-    throw error;
-  }
-}
-
 export interface Distances {
   readonly boundaries: Assessment['boundaries'];
   /** The limited boundary that applies; null where none is specified or known. */
@@ -43,9 +33,10 @@ export function distancesOf({ answers, voltage, arc }: Question, edition: Editio
   const table = lookupShockBoundaries({ current: 'ac', volts: shock.volts }, edition);
   const { arcFlashBoundary } = arc.result;
   const limited = table.inTable ? (movable ? table.limitedMovable : table.limitedFixed) : null;
-  const distance = unlessRefused(() =>
-    barricadeDistance({ boundaries: table, arcFlashBoundary, movable }),
-  );
+  // Past the table's last row no distance is known, and none is made up.
+  const distance = table.inTable
+    ? barricadeDistance({ boundaries: table, arcFlashBoundary, movable })
+    : null;
   return {
     boundaries: { ...table, ...shock, movable },
     limited,
@@ -54,18 +45,20 @@ export function distancesOf({ answers, voltage, arc }: Question, edition: Editio
   };
 }
 
-/** The current through a body at the highest voltage that can be touched; null outside 100 to 1000 V. */
+/** The current through a body at the highest voltage that can be touched; null where the table has none. */
 export function touchOf({ touchVolts, shock }: Voltage, edition: Edition): Assessment['touch'] {
-  if (touchVolts === undefined || shock === undefined) return null;
-  return unlessRefused(() => ({
-    ...touchMilliamperes({ volts: touchVolts }, edition),
-    volts: touchVolts,
-  }));
+  const { rows } = edition.bodyImpedance;
+  const isInTable =
+    touchVolts !== undefined &&
+    rows.some(({ volts }) => volts <= touchVolts) &&
+    rows.some(({ volts }) => volts >= touchVolts);
+  if (!isInTable || shock === undefined) return null;
+  return { ...touchMilliamperes({ volts: touchVolts }, edition), volts: touchVolts };
 }
 
 /** What a clamp on the circuit is to read before it is opened: two wires, power factor 1. */
 export function expectedOf({ supply }: Answers): Assessment['expected'] {
   const { watts, circuitVolts: volts } = supply;
-  if (watts === undefined || volts === undefined) return { loadAmperes: null };
-  return { loadAmperes: unlessRefused(() => loadAmperes({ watts, volts, phases: 1 })) };
+  const isKnown = watts !== undefined && volts !== undefined && Number.isFinite(watts / volts);
+  return { loadAmperes: isKnown ? loadAmperes({ watts, volts, phases: 1 }) : null };
 }

@@ -1,10 +1,11 @@
 import type { Conductor, SourceKind, SystemCode } from '../enumerations';
-import { UNANSWERED_TASK_FACTS, jobTaskFacts } from '../tasks';
+import { answeredTaskFacts } from '../tasks';
 import { nfpa70e2024 } from '../editions';
 import type { Edition } from '../editions/types';
 import { readAnswers } from './answers';
 import type { Answers } from './answers';
 import { hasBattery, readSources } from './sources';
+import type { Source } from './sources';
 import { voltageOf } from './voltage';
 import type { Voltage } from './voltage';
 
@@ -75,33 +76,26 @@ export interface RequiredSource {
   readonly points: readonly string[] | null;
 }
 
+function describeSource({ index, id, kind, from, points }: Source): RequiredSource {
+  return {
+    index,
+    id: id ?? null,
+    kind: kind ?? null,
+    from: from ?? null,
+    points: points.isAnswered ? points.values : null,
+  };
+}
+
 /** What the test for absence of voltage of a worksheet must read at each point of work. */
 export function requiredPairs(content: unknown, edition: Edition = nfpa70e2024): RequiredPairs {
   const answers = readAnswers(content);
   const sources = readSources(answers);
-  const { task } = answers.job;
-  const voltage = voltageOf(
-    {
-      answers,
-      sources,
-      task: task === undefined ? UNANSWERED_TASK_FACTS : jobTaskFacts(task),
-      isBelowFiftyVolts: false,
-    },
-    edition,
-  );
-  const described = sources.map((source): RequiredSource => ({
-    index: source.index,
-    id: source.id ?? null,
-    kind: source.kind ?? null,
-    from: source.from ?? null,
-    points: source.points.isAnswered ? source.points.values : null,
-  }));
-  const where = (test: (source: (typeof sources)[number]) => boolean) =>
-    described.filter((_, index) => sources[index] !== undefined && test(sources[index]));
+  const task = answeredTaskFacts(answers.job.task);
+  const voltage = voltageOf({ answers, sources, task, isBelowFiftyVolts: false }, edition);
   return {
     pointsOfWork: answers.job.pointsOfWork ?? null,
     sets: conductorSetsOf(answers, voltage),
-    ownConductors: where(({ hasOwnConductors }) => hasOwnConductors),
-    directCurrent: where(hasBattery),
+    ownConductors: sources.filter(({ hasOwnConductors }) => hasOwnConductors).map(describeSource),
+    directCurrent: sources.filter(hasBattery).map(describeSource),
   };
 }

@@ -1,5 +1,5 @@
 import type { Edition } from '../editions/types';
-import { jobTaskFacts, UNANSWERED_TASK_FACTS } from '../tasks';
+import { answeredTaskFacts } from '../tasks';
 import type { JobTaskFacts } from '../tasks';
 import type { Permit, RequiredItem, Stage } from '../types';
 import { readAnswers, readCloseOut, readProof } from './answers';
@@ -90,7 +90,7 @@ export function factsOf({ content, proof, closeOut, on, stage, edition }: Questi
   const recorded = readProof(proof);
   const { endsAt, task: name } = answers.job;
   const day = endsAt === undefined ? on.date : laterDate(on.date, endsAt.date);
-  const task = name === undefined ? UNANSWERED_TASK_FACTS : jobTaskFacts(name);
+  const task = answeredTaskFacts(name);
   const path = pathOfAnswers(answers);
   const belowFifty = isBelowFiftyVolts(answers, path);
   const sources = readSources(answers);

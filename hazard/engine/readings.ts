@@ -1,3 +1,4 @@
+import type { Conductor } from '../enumerations';
 import type { Answers, ProofAnswers, ReadingAnswers } from './answers';
 import { conductorSetsOf, pairName } from './conductors';
 import type { ConductorPair, ConductorSet } from './conductors';
@@ -29,50 +30,69 @@ export interface Readings {
 const SEPARATOR = '\u0000';
 
 /**
- * A reading that says where, when and between what it was taken, during the
- * work and not after it. One that does not proves nothing; a voltage that it
- * shows still counts.
+ * Taken during the work, and not after the assessment. A reading that was not
+ * proves nothing; a voltage that it shows still counts.
  */
 function isInTime({ at }: ReadingAnswers, startsAt: Moment | undefined, on: Moment): boolean {
   if (at === undefined || at.instant > on.instant) return false;
   return startsAt === undefined || at.instant >= startsAt.instant;
 }
 
-const isPlaced = ({ point, volts }: ReadingAnswers) => point !== undefined && volts !== undefined;
-
-/** What a reading is of; readings of the same thing govern one another. */
-function subjectOf({ point, from, to, current, sourceId }: ReadingAnswers): string {
-  const between = from === undefined ? `${to ?? ''}` : pairName(from, to ?? '');
-  return [point, between, current, sourceId ?? ''].join(SEPARATOR);
+/** A reading that says at which point it was taken, in time. */
+interface PlacedReading extends Reading {
+  readonly point: string;
+  readonly volts: number;
 }
 
-/** A reading that may fill a pair or stand for a source's own conductor. */
-const isComplete = ({ from, to, sourceId }: ReadingAnswers) =>
-  to !== undefined && (from !== undefined || sourceId !== undefined);
+/** One that may fill a pair, or stand for a source's own conductor. */
+interface CompleteReading extends PlacedReading {
+  readonly to: Conductor;
+}
+
+function placedReadings(
+  all: readonly Reading[],
+  startsAt: Moment | undefined,
+  on: Moment,
+): readonly PlacedReading[] {
+  return all.flatMap((reading) => {
+    const { point, volts } = reading;
+    if (point === undefined || volts === undefined) return [];
+    return isInTime(reading, startsAt, on) ? [{ ...reading, point, volts }] : [];
+  });
+}
+
+function completeReadings(placed: readonly PlacedReading[]): readonly CompleteReading[] {
+  return placed.flatMap((reading) => {
+    const { to, from, sourceId } = reading;
+    if (to === undefined || (from === undefined && sourceId === undefined)) return [];
+    return [{ ...reading, to }];
+  });
+}
+
+/** What a reading is of; readings of the same thing govern one another. */
+function subjectOf({ point, from, to, current, sourceId }: CompleteReading): string {
+  return [point, pairName(from ?? '', to), current, sourceId ?? ''].join(SEPARATOR);
+}
 
 /**
  * The highest by magnitude; but a last one with low impedance settles a ghost
  * voltage, and both stay on record.
  */
-function governingOf(readings: readonly Reading[]): Reading | undefined {
-  const last = readings[readings.length - 1];
-  if (last?.lowImpedance === true) return last;
-  return readings.reduce<Reading | undefined>((one, other) => {
-    const isHigher = Math.abs(other.volts ?? 0) > Math.abs(one?.volts ?? 0);
-    return one === undefined || isHigher ? other : one;
-  }, undefined);
+function governingOf(readings: readonly CompleteReading[]): CompleteReading {
+  return readings.reduce((one, other, index) => {
+    if (other.lowImpedance === true && index === readings.length - 1) return other;
+    return Math.abs(other.volts) > Math.abs(one.volts) ? other : one;
+  });
 }
 
-function groupBySubject(readings: readonly Reading[]): ReadonlyMap<string, Reading[]> {
-  const groups = new Map<string, Reading[]>();
-  for (const reading of readings) {
-    const subject = subjectOf(reading);
-    const group = groups.get(subject);
-    if (group) group.push(reading);
-    else groups.set(subject, [reading]);
+const grouped = <T>(items: readonly T[], keyOf: (item: T) => string) => {
+  const groups = new Map<string, T[]>();
+  for (const item of items) {
+    const key = keyOf(item);
+    groups.set(key, [...(groups.get(key) ?? []), item]);
   }
   return groups;
-}
+};
 
 function missingOf(set: ConductorSet, filled: ReadonlySet<string>): readonly ConductorPair[] {
   return set.pairs.filter(([from, to]) => !filled.has(pairName(from, to)));
@@ -97,27 +117,21 @@ interface Question {
 export function readingsOf({ answers, proof, sources, voltage, on }: Question): Readings {
   const { startsAt } = answers.job;
   const all = proof.readings.values.map((reading, index): Reading => ({ ...reading, index }));
-  const placed = all.filter((reading) => isPlaced(reading) && isInTime(reading, startsAt, on));
-  const complete = placed.filter(isComplete);
-  const governed = [...groupBySubject(complete).values()].map(governingOf);
-  const alone = all.filter((reading) => !complete.includes(reading));
-  const governing = [...governed, ...alone]
-    .filter((reading) => reading !== undefined)
-    .sort((one, other) => one.index - other.index);
+  const placed = placedReadings(all, startsAt, on);
+  const complete = completeReadings(placed);
+  const counted = new Set(complete.map(({ index }) => index));
+  const governing: Reading[] = [
+    ...[...grouped(complete, subjectOf).values()].map(governingOf),
+    ...all.filter(({ index }) => !counted.has(index)),
+  ].sort((one, other) => one.index - other.index);
 
-  const pairsAt = new Map<string, Set<string>>();
-  const sourcesAt = new Map<string, Set<string>>();
-  const add = (map: Map<string, Set<string>>, key: string, value: string) => {
-    const values = map.get(key);
-    if (values) values.add(value);
-    else map.set(key, new Set([value]));
-  };
-  for (const { point = '', from, to, current, sourceId } of complete) {
-    if (current !== 'ac' || to === undefined) continue;
-    if (sourceId === undefined && from !== undefined) add(pairsAt, point, pairName(from, to));
-    if (sourceId !== undefined && from === undefined)
-      add(sourcesAt, point + SEPARATOR + sourceId, to);
-  }
+  const alternating = complete.filter(({ current }) => current === 'ac');
+  const ofCircuit = alternating.filter(({ sourceId }) => sourceId === undefined);
+  const ofSources = alternating.filter(({ sourceId, from }) => sourceId && from === undefined);
+  const pairsAt = grouped(ofCircuit, ({ point }) => point);
+  const sourcesAt = grouped(ofSources, ({ point, sourceId }) => placeOf(point, sourceId));
+  const filledAt = (point: string) =>
+    new Set((pairsAt.get(point) ?? []).map(({ from, to }) => pairName(from ?? '', to)));
 
   const direct = placed.filter(({ current }) => current === 'dc');
   const names = new Set([
@@ -125,15 +139,19 @@ export function readingsOf({ answers, proof, sources, voltage, on }: Question): 
     ...sources.flatMap(({ points }) => points.values.map((point) => point.trim())),
   ]);
   const sets = conductorSetsOf(answers, voltage);
-  const none: ReadonlySet<string> = new Set();
   return {
     governing,
-    points: [...names].map((point) => pointOf(point, sets, pairsAt.get(point) ?? none)),
-    readTo: ({ id }, point) => sourcesAt.get(point + SEPARATOR + (id ?? SEPARATOR)) ?? none,
+    points: [...names].map((point) => pointOf(point, sets, filledAt(point))),
+    readTo: ({ id }, point) =>
+      new Set((sourcesAt.get(placeOf(point, id)) ?? []).map(({ to }) => to)),
     hasDirectCurrent: (source, point) =>
       direct.some((reading) => reading.point === point && isOfSource(reading, source)),
   };
 }
+
+/** Where a source's own conductor was read; one without an id was read nowhere. */
+const placeOf = (point: string, sourceId: string | undefined) =>
+  [point, sourceId ?? ''].join(SEPARATOR);
 
 /** A reading on the conductors of a source: its own, or those that it shares. */
 function isOfSource({ sourceId }: ReadingAnswers, source: Source): boolean {

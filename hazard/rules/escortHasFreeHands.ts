@@ -3,9 +3,9 @@ import type { Hit, Rule } from '../engine/rule';
 import { personParams } from '../engine/people';
 import type { Person } from '../engine/people';
 
-/** Whether someone else could escort: qualified, and not with their hands in the panel. */
-function hasEscort(person: Person, crew: readonly Person[]): boolean | undefined {
-  const others = crew.filter((other) => other !== person && other.nearest !== 'restricted');
+/** Whether someone could escort: qualified, and not with their hands in the panel. */
+function hasEscort(crew: readonly Person[]): boolean | undefined {
+  const others = crew.filter(({ nearest }) => nearest !== 'restricted');
   const isSure = ({ qualification, nearest }: Person) =>
     qualification === 'yes' && nearest !== undefined;
   if (others.some(isSure)) return true;
@@ -24,8 +24,8 @@ export const escortHasFreeHands: Rule = {
   appliesBelowFiftyVolts: false,
   citations: ['nfpa70e.shockApproach', 'own.escort'],
   find({ path: workPath, people: { crew } }) {
+    const escort = hasEscort(crew);
     return crew.flatMap((person): Hit[] => {
-      const escort = hasEscort(person, crew);
       if (person.nearest !== 'limited with escort' || escort === true) return [];
       const severity = workPath === 'off' ? 'caution' : escort === undefined ? 'open' : 'stop';
       return [{ path: `/crew/${person.index}/closest`, severity, params: personParams(person) }];

@@ -26,12 +26,13 @@ export const unqualifiedStayOutside: Rule = {
       const { index, nearest, qualification } = person;
       const path = `/crew/${index}/closest`;
       const params = { ...personParams(person), ...(nearest && { closest: nearest }) };
+      if (qualification === 'yes') return [];
       if (nearest === 'limited with escort') {
         const escort = bestOfOthers(person, crew);
         if (escort === 'yes') return [];
-        return [{ path, params, severity: escort === 'no' ? 'stop' : 'open' }];
+        const isSure = escort === 'no' && qualification === 'no';
+        return [{ path, params, severity: isSure ? 'stop' : 'open' }];
       }
-      if (qualification === 'yes') return [];
       if (nearest === undefined) return [notAnswered(path, params)];
       if (nearest !== 'restricted' && nearest !== 'limited') return [];
       return [{ path, params, severity: qualification === 'no' ? 'stop' : 'open' }];
