@@ -3,6 +3,7 @@ import { archive } from './archive';
 import { board } from './board';
 import { caution } from './caution';
 import { citations } from './citations';
+import { closeOut } from './closeOut';
 import { common } from './common';
 import { drawing } from './drawing';
 import { enumerations } from './enumerations';
@@ -20,7 +21,9 @@ import { problems } from './problems';
 import { proof } from './proof';
 import { register } from './register';
 import { signing } from './signing';
+import { stop } from './stop';
 import { topics } from './topics';
+import { trail } from './trail';
 import { ui } from './ui';
 import { verify } from './verify';
 import { worksheet } from './worksheet';
@@ -32,6 +35,7 @@ export const en = {
   board,
   caution,
   citations,
+  closeOut,
   common,
   drawing,
   enumerations,
@@ -49,7 +53,9 @@ export const en = {
   proof,
   register,
   signing,
+  stop,
   topics,
+  trail,
   ui,
   verify,
   worksheet,

@@ -5,6 +5,7 @@ import { archive } from './archive';
 import { board } from './board';
 import { caution } from './caution';
 import { citations } from './citations';
+import { closeOut } from './closeOut';
 import { common } from './common';
 import { drawing } from './drawing';
 import { enumerations } from './enumerations';
@@ -22,7 +23,9 @@ import { problems } from './problems';
 import { proof } from './proof';
 import { register } from './register';
 import { signing } from './signing';
+import { stop } from './stop';
 import { topics } from './topics';
+import { trail } from './trail';
 import { ui } from './ui';
 import { verify } from './verify';
 import { worksheet } from './worksheet';
@@ -34,6 +37,7 @@ export const es: Words<typeof en> = {
   board,
   caution,
   citations,
+  closeOut,
   common,
   drawing,
   enumerations,
@@ -51,7 +55,9 @@ export const es: Words<typeof en> = {
   proof,
   register,
   signing,
+  stop,
   topics,
+  trail,
   ui,
   verify,
   worksheet,
