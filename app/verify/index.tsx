@@ -1,0 +1,5 @@
+import { VerifyFormScreen } from '@/components/verify/VerifyFormScreen';
+
+export default function VerifyFormRoute() {
+  return <VerifyFormScreen />;
+}
