@@ -36,3 +36,18 @@ export async function queueJob(
   } as unknown as PgBoss.Db;
   await boss.send(queue, data, { ...options, db });
 }
+
+let started: Promise<unknown> | undefined;
+
+/** Opens the queue for taking jobs; repeating it does nothing. */
+export async function startBoss(): Promise<void> {
+  started ??= boss.start();
+  await started;
+}
+
+/** Lets jobs in hand finish and closes the queue's connections. */
+export async function stopBoss(): Promise<void> {
+  if (started === undefined) return;
+  started = undefined;
+  await boss.stop({ graceful: true, wait: true, timeout: 10_000 });
+}

@@ -3,8 +3,9 @@ import type { AddressInfo } from 'node:net';
 import { buildApp } from './app';
 import { closeDatabase } from './db';
 import { env } from './env';
+import { stopBoss } from './jobs';
 import { logger } from './log';
-import { startWorker, stopWorker } from './worker';
+import { startWorker } from './worker';
 
 export interface RunningServer {
   port: number;
@@ -33,7 +34,7 @@ export async function startServer(): Promise<RunningServer> {
       const sweep = setInterval(() => server.closeIdleConnections(), 100);
       await closed;
       clearInterval(sweep);
-      await stopWorker();
+      await stopBoss();
       await closeDatabase();
       logger.info('stopped');
     },

@@ -1,4 +1,4 @@
-import { boss } from './jobs';
+import { boss, startBoss } from './jobs';
 import type { Queue } from './jobs';
 import { logger } from './log';
 import { expireWorksheets } from './services/expireWorksheets';
@@ -15,7 +15,7 @@ export const handlers: Record<Queue, (data: object) => Promise<unknown>> = {
 
 /** Takes jobs until the process ends. */
 export async function startWorker(): Promise<void> {
-  await boss.start();
+  await startBoss();
   for (const queue of Object.keys(handlers) as Queue[]) {
     await boss.work<object>(queue, { pollingIntervalSeconds: 1 }, async (jobs) => {
       for (const { id, data } of jobs) await run(queue, id, data);
@@ -34,9 +34,4 @@ async function run(queue: Queue, id: string, data: object): Promise<void> {
     logger.warn({ queue, job: id, name, message }, 'a job failed');
     throw error;
   }
-}
-
-/** Lets jobs in hand finish. */
-export async function stopWorker(): Promise<void> {
-  await boss.stop({ graceful: true, wait: true, timeout: 10_000 });
 }

@@ -10,20 +10,25 @@ function routePattern(req: Request): string {
   return `${req.baseUrl}${String(route.path)}`;
 }
 
+const facts = (req: Request, res: Response, { ms }: { ms: number }) => ({
+  method: req.method,
+  route: routePattern(req),
+  status: res.statusCode,
+  ms,
+  userId: req.user?.id,
+});
+
 /** One line a request: id, method, route pattern, status, milliseconds, user id. Nothing of the content. */
 export const requestLog = pinoHttp<Request, Response>({
   logger,
   quietReqLogger: true,
+  quietResLogger: true,
+  genReqId: (_req, res) => requestIdOf(res),
   serializers: { req: () => undefined, res: () => undefined, err: () => undefined },
-  customAttributeKeys: { responseTime: 'ms' },
+  customAttributeKeys: { responseTime: 'ms', reqId: 'requestId' },
   customLogLevel: () => 'info',
   customSuccessMessage: () => 'request',
   customErrorMessage: () => 'request',
-  customProps: (req, res) => ({
-    requestId: requestIdOf(res),
-    method: req.method,
-    route: routePattern(req),
-    status: res.statusCode,
-    userId: req.user?.id,
-  }),
+  customSuccessObject: (req, res, { ms }: { ms: number }) => facts(req, res, { ms }),
+  customErrorObject: (req, res, _error, { ms }: { ms: number }) => facts(req, res, { ms }),
 });

@@ -35,6 +35,8 @@ export const mails = smtp.mails;
 
 afterAll(async () => {
   const { closeDatabase } = await import('@/server/db');
+  const { stopBoss } = await import('@/server/jobs');
+  await stopBoss();
   await closeDatabase();
   await Promise.all([smtp.stop(), s3.stop()]);
   await database.drop();
