@@ -9,6 +9,7 @@ import { distance } from '@/shared/format';
 import { useUnits } from '../i18n/preferences';
 import { useMessages } from '../i18n/useMessages';
 import { space } from '../theme/tokens';
+import { useBreakpoint } from '../theme/useBreakpoint';
 import { useTheme } from '../theme/useTheme';
 import { Citation, Text } from '../ui';
 import { useDrawingSubject } from '../worksheet/DistanceStrip';
@@ -16,7 +17,9 @@ import { DrawingView } from '../worksheet/DrawingView';
 import { ZoneSwatch, type ZoneName } from '../worksheet/parts/ZoneSwatch';
 import { EXAMPLE_DAY, exampleWorksheet } from './exampleWorksheet';
 
-const PIXELS_PER_FOOT = 36;
+/** Large where the window has room below it. */
+const PIXELS_PER_FOOT = { high: 36, low: 32 } as const;
+const HIGH_WINDOW = 900;
 const WIDEST = 520;
 
 interface Line {
@@ -60,16 +63,17 @@ function useExample() {
 /** The section of the example, without the rows below its floor: the legend beside it has the figures. */
 function Section({ assessment }: Pick<ReturnType<typeof useExample>, 'assessment'>) {
   const subject = useDrawingSubject(exampleWorksheet, assessment);
+  const { height } = useBreakpoint();
   const [width, setWidth] = useState(0);
   const made = useMemo(() => {
     if (width === 0) return null;
     const input = sectionInputOf(subject, {
       width,
-      pixelsPerFoot: PIXELS_PER_FOOT,
+      pixelsPerFoot: height >= HIGH_WINDOW ? PIXELS_PER_FOOT.high : PIXELS_PER_FOOT.low,
       medium: 'screen',
     });
     return { drawing: sectionGeometry(input), floor: frameOf(input).floor };
-  }, [subject, width]);
+  }, [subject, width, height]);
   const label = [`${subject.messages.drawing.drawingLabel}.`, ...distanceLines(subject)].join(' ');
   return (
     <View

@@ -116,7 +116,7 @@ export function SignedOutFrame({ title, purpose = false, foot, children }: Props
           )}
         </View>
       </View>
-      <View style={[styles.foot, line]}>
+      <View role="contentinfo" style={[styles.foot, line]}>
         <View style={column}>
           <CautionFoot />
         </View>
@@ -128,7 +128,7 @@ export function SignedOutFrame({ title, purpose = false, foot, children }: Props
 const styles = StyleSheet.create({
   page: { flexGrow: 1, minHeight: '100%' },
   wide: { flexDirection: 'row', alignItems: 'stretch' },
-  left: { flex: 2, minWidth: 0, paddingHorizontal: 56, paddingVertical: 36, gap: space.lg },
+  left: { flex: 2, minWidth: 0, paddingHorizontal: 56, paddingVertical: space.xl, gap: space.md },
   right: {
     flex: 1,
     minWidth: 400,
@@ -140,8 +140,8 @@ const styles = StyleSheet.create({
     justifyContent: 'space-between',
   },
   formWide: { gap: space.lg, flex: 1, paddingTop: space.xxl },
-  figure: { paddingTop: space.lg, flex: 1 },
-  wideFoot: { paddingTop: space.lg },
+  figure: { paddingTop: space.md, flex: 1 },
+  wideFoot: { paddingTop: space.sm },
   column: {
     width: '100%',
     alignSelf: 'center',

@@ -19,6 +19,9 @@ export function font(weight: FontWeight): Pick<TextStyle, 'fontFamily' | 'fontWe
   return { fontFamily: FAMILIES[weight] };
 }
 
+/** Small caps for all but capitals: a phone has no setting for the rest. */
+export const smallCaps: TextStyle = { fontVariant: ['tabular-nums', 'small-caps'] };
+
 /** True once the faces are in memory; text measured before would be cut off. */
 export function useFontsReady(): boolean {
   const [loaded, error] = useFonts({

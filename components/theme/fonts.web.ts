@@ -10,6 +10,9 @@ export function font(weight: FontWeight): Pick<TextStyle, 'fontFamily' | 'fontWe
   return { fontFamily: 'Barlow, sans-serif', fontWeight: weight };
 }
 
+/** Real small caps of the face, for capitals as well. React Native's types lack the property. */
+export const smallCaps = { fontFeatureSettings: '"smcp", "c2sc", "tnum"' } as TextStyle;
+
 /** Nothing to wait for: the style sheet swaps the faces in. */
 export function useFontsReady(): boolean {
   return true;

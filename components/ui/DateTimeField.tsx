@@ -155,6 +155,6 @@ export function DateTimeField({
 
 const styles = StyleSheet.create({
   two: { flexDirection: 'row', alignItems: 'center', gap: space.xs },
-  date: { flex: 3, minWidth: 0 },
-  time: { flex: 2, minWidth: 0 },
+  date: { flex: 4, minWidth: 0 },
+  time: { flex: 3, minWidth: 0 },
 });

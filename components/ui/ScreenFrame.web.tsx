@@ -44,7 +44,11 @@ export function ScreenFrame(props: ScreenFrameProps) {
           </View>
         )}
       </View>
-      {props.bar !== undefined && <View style={[styles.bar, ground]}>{props.bar}</View>}
+      {props.bar !== undefined && (
+        <View role="contentinfo" style={[styles.bar, ground]}>
+          {props.bar}
+        </View>
+      )}
     </View>
   );
 }

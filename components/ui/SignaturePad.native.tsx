@@ -56,8 +56,8 @@ export function SignaturePad({
             onGetData={handleData}
             penColor={colors.ink}
             backgroundColor="rgba(0,0,0,0)"
-            minWidth={2.6}
-            maxWidth={2.6}
+            minWidth={1.3}
+            maxWidth={1.3}
             webStyle={PAGE_STYLE}
           />
         </View>

@@ -164,6 +164,6 @@ const styles = StyleSheet.create({
     paddingVertical: 6,
   },
   cell: { justifyContent: 'center' },
-  sort: { flexDirection: 'row', alignItems: 'center', gap: 4, minHeight: touch.least },
+  sort: { flexDirection: 'row', alignItems: 'flex-end', gap: 4, minHeight: touch.least },
   opener: { minHeight: touch.least, justifyContent: 'center' },
 });

@@ -1,6 +1,6 @@
 import { Text as NativeText, type TextProps, type TextStyle } from 'react-native';
-import { font, type FontWeight } from '../theme/fonts';
-import { typeScale, type TextVariant, type TypeStyle } from '../theme/type';
+import { font, smallCaps, type FontWeight } from '../theme/fonts';
+import { tabular, typeScale, type TextVariant, type TypeStyle } from '../theme/type';
 import type { ColorName } from '../theme/tokens';
 import { useTheme } from '../theme/useTheme';
 import { webProps } from './webProps';
@@ -22,7 +22,7 @@ export function textStyle(variant: TextVariant, weight?: FontWeight): TextStyle 
     ...font(weight ?? type.weight),
     fontSize: type.size,
     lineHeight: type.line,
-    fontVariant: variant === 'smallCaps' ? ['tabular-nums', 'small-caps'] : ['tabular-nums'],
+    ...(variant === 'smallCaps' ? smallCaps : tabular),
     ...(type.tracking !== undefined && { letterSpacing: type.tracking * type.size }),
   };
 }
