@@ -4,7 +4,8 @@ import { rowNameSize } from './sectionFrame';
 import type { Frame, SectionInput } from './sectionTypes';
 import { textWidth, wrapText } from './textWidth';
 
-const ROW = 27;
+/** From row to row; print has less room than a screen. */
+const ROW = { screen: 27, print: 24 } as const;
 const FIRST_ROW = 22;
 const SWATCH = 18;
 const FIGURE_SIZE = 16;
@@ -70,7 +71,8 @@ export function dimensionRows(
   if (input.zones.message !== null) return messageRows(input.zones.message, frame);
   const rows = rowsOf(input);
   const { part, scale, floor } = frame;
-  const yOf = (index: number) => floor + FIRST_ROW + index * ROW;
+  const row = ROW[input.medium];
+  const yOf = (index: number) => floor + FIRST_ROW + index * row;
   const lastY = yOf(Math.max(0, rows.length - 1));
   const witnesses: Primitive[] = [
     {
@@ -98,7 +100,7 @@ export function dimensionRows(
   });
   const note = input.zones.arcFlashNote;
   if (note === null) return { witnesses, rows: primitives, bottom: lastY + 14 };
-  const y = lastY + ROW;
+  const y = lastY + row;
   primitives.push(...swatch('arcFlash', part.x - 29, y - 9), noteText(note, frame, y));
   return { witnesses, rows: primitives, bottom: y + 14 };
 }

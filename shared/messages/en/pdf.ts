@@ -8,7 +8,7 @@ export const pdf = {
     "A qualified person decides. Local codes, the employer's program and the equipment's own label come first. This worksheet gives no permission to work.",
   memoryMark: '‡ From memory, to be checked against a licensed copy.',
   missingLetters:
-    '◊ stands for a character that this typeface lacks; the attached worksheet.json holds it.',
+    '\uFFFD stands for a character that this typeface lacks; the attached worksheet.json holds it.',
   hash: 'SHA-256',
   checkTitle: 'Check this record',
   checkText: 'Scan, or open',
@@ -31,8 +31,7 @@ export const pdf = {
     void: 'Void. Not in force',
     reasonBy: (reason: string, name: string, at: string) => `${reason} (${name}, ${at})`,
     notProved: 'Not proved dead: treat as live',
-    notProvedText:
-      'Every part counts as live. Boundaries and protective equipment apply until the test for absence of voltage is recorded.',
+    notProvedText: 'Boundaries and protective equipment apply until the test is recorded.',
     energized: 'Energized',
     energizedText: 'Work or testing on live parts. It is never proved dead on this sheet.',
     questions: (count: number) =>
@@ -125,6 +124,7 @@ export const pdf = {
     ofSource: (way: string) => `conductors of ${way}`,
     lowImpedance: 'low impedance',
     then: (first: string, second: string) => `${first}, then ${second}`,
+    own: (to: string) => `own to ${to}`,
     incomplete: 'Readings without point or pair',
     noPoint: 'Point not named',
     plan: 'Planned',

@@ -11,7 +11,7 @@ export const pdf: Words<typeof english> = {
     'Decide una persona calificada. Los códigos locales, el programa de la empresa y la etiqueta del propio equipo van primero. Esta hoja no da permiso para trabajar.',
   memoryMark: '‡ De memoria, por verificar con una copia con licencia.',
   missingLetters:
-    '◊ está en lugar de un carácter que esta letra no tiene; el archivo adjunto worksheet.json lo conserva.',
+    '\uFFFD está en lugar de un carácter que esta letra no tiene; el archivo adjunto worksheet.json lo conserva.',
   hash: 'SHA-256',
   checkTitle: 'Verifique este registro',
   checkText: 'Escanee, o abra',
@@ -34,8 +34,7 @@ export const pdf: Words<typeof english> = {
     void: 'Anulada. No está en vigor',
     reasonBy: (reason, name, at) => `${reason} (${name}, ${at})`,
     notProved: 'Sin comprobar: trátelo como vivo',
-    notProvedText:
-      'Todo cuenta como energizado. Los límites y el equipo de protección valen hasta que quede registrada la prueba de ausencia de tensión.',
+    notProvedText: 'Los límites y el equipo de protección valen hasta registrar la prueba.',
     energized: 'Energizado',
     energizedText:
       'Trabajo o pruebas en partes vivas. En esta hoja nunca se comprueba la ausencia de tensión.',
@@ -127,6 +126,7 @@ export const pdf: Words<typeof english> = {
     ofSource: (way) => `conductores de ${way}`,
     lowImpedance: 'baja impedancia',
     then: (first, second) => `${first}, luego ${second}`,
+    own: (to) => `propio a ${to}`,
     incomplete: 'Lecturas sin punto o sin par',
     noPoint: 'Punto sin nombre',
     plan: 'Planeado',
