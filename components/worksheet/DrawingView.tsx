@@ -17,6 +17,9 @@ function colorOf(colors: Colors, role: Role | undefined): string {
   return role === undefined ? 'none' : colors[ROLE_TOKENS[role]];
 }
 
+/** Figures of one width; react-native-svg's types know no font features. */
+const tabular: object = { style: { fontVariant: 'tabular-nums' } };
+
 function Label({ text, colors }: { text: TextPrimitive; colors: Colors }) {
   const { fontFamily, fontWeight } = font(`${text.weight}`);
   const common = {
@@ -26,7 +29,6 @@ function Label({ text, colors }: { text: TextPrimitive; colors: Colors }) {
     y: text.y,
     textAnchor: text.anchor,
     fontSize: text.size,
-    fontFeatureSettings: '"tnum"',
   };
   return (
     <>
@@ -34,6 +36,7 @@ function Label({ text, colors }: { text: TextPrimitive; colors: Colors }) {
       {text.halo > 0 && (
         <SvgText
           {...common}
+          {...tabular}
           fill={colors.paper}
           stroke={colors.paper}
           strokeWidth={text.halo}
@@ -42,7 +45,7 @@ function Label({ text, colors }: { text: TextPrimitive; colors: Colors }) {
           {text.text}
         </SvgText>
       )}
-      <SvgText {...common} fill={colorOf(colors, text.role)}>
+      <SvgText {...common} {...tabular} fill={colorOf(colors, text.role)}>
         {text.text}
       </SvgText>
     </>

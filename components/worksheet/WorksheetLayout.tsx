@@ -89,7 +89,7 @@ function Aside() {
 export function WorksheetLayout({ saved, beforeSections }: Props) {
   const words = useMessages();
   const { content, record } = useWorksheetForm();
-  const { isWide } = useBreakpoint();
+  const { isWide, hasSectionList } = useBreakpoint();
   const task = content.job?.task;
   const title = task === undefined ? words.worksheet.newTitle : wordOf(words, 'task', task);
   const place = [content.job?.area, record.siteName].filter(Boolean).join(', ');
@@ -101,7 +101,7 @@ export function WorksheetLayout({ saved, beforeSections }: Props) {
       saved={saved}
       head={<RecordTitle />}
       bar={isWide ? undefined : <WorksheetBar />}
-      nav={<SectionNav />}
+      nav={hasSectionList ? <SectionNav /> : undefined}
       aside={isWide ? <Aside /> : undefined}
     >
       {!isWide && <Strip />}

@@ -19,6 +19,11 @@ export function FindingPanels({ findings }: { findings: readonly Finding[] }) {
   );
 }
 
+/** Open because the field itself has no answer, not because of the answer that it has. */
+export function isUnanswered({ severity, params }: Finding): boolean {
+  return severity === 'open' && params.field !== undefined;
+}
+
 function FindingPanel({ finding }: { finding: Finding }) {
   const locale = useLocale();
   const units = useUnits();
@@ -29,8 +34,8 @@ function FindingPanel({ finding }: { finding: Finding }) {
   if (finding.severity === 'caution') {
     return <CautionPanel title={title} body={text} citation={citation} />;
   }
-  // An empty required field is marked as such; a line that only repeats its label says nothing.
-  if (finding.code.endsWith('.unanswered')) return null;
+  // A field not answered yet is marked as such; a line that only repeats its label says nothing.
+  if (isUnanswered(finding)) return null;
   return (
     <View role="note" style={styles.open}>
       <StateMark state="open" word={title} />

@@ -1,14 +1,16 @@
 import { useAtom } from 'jotai';
 import { useMemo, type ReactNode } from 'react';
 import { StyleSheet, View } from 'react-native';
+import { fieldLabel } from '@/shared/messages';
 import { sectionNumber, sectionOf, fieldNameOf, type SectionId } from '@/shared/sections';
+import { useLocale } from '../../i18n/preferences';
 import { useMessages } from '../../i18n/useMessages';
 import { space } from '../../theme/tokens';
-import { Section, type MarkState } from '../../ui';
+import { Section, StateMark, type MarkState } from '../../ui';
 import { ShownFieldsProvider, useShownFields } from '../form/shownFields';
 import { useWorksheetForm } from '../form/WorksheetFormContext';
 import { openSectionsAtom, sectionAnchor } from '../worksheetAtoms';
-import { FindingPanels } from './FindingPanels';
+import { FindingPanels, isUnanswered } from './FindingPanels';
 import { SectionFacts } from './SectionFacts';
 import { sectionState } from './sectionState';
 
@@ -61,12 +63,24 @@ export function SectionFrame({ section, folded, detail, state, readOnly, childre
 
 /** Findings of the section that no field on the screen shows: none is ever lost. */
 function HomelessFindings({ section }: { section: SectionId }) {
+  const words = useMessages();
+  const locale = useLocale();
   const { assessment } = useWorksheetForm();
   const shown = useShownFields();
   const left = assessment.findings.filter(
     (finding) => sectionOf(finding) === section && !shown.has(fieldNameOf(finding.path)),
   );
-  return <FindingPanels findings={left} />;
+  const missing = [
+    ...new Set(left.filter(isUnanswered).map(({ path }) => fieldLabel(locale, path) ?? path)),
+  ];
+  return (
+    <>
+      {missing.length > 0 && (
+        <StateMark state="open" word={words.ui.notAnswered} detail={missing.join(', ')} />
+      )}
+      <FindingPanels findings={left} />
+    </>
+  );
 }
 
 const styles = StyleSheet.create({ fields: { gap: space.lg } });

@@ -1,5 +1,6 @@
 import { Pressable, StyleSheet, View } from 'react-native';
 import { SECTIONS, sectionNumber, sectionOf, type SectionId } from '@/shared/sections';
+import type { Assessment } from '@/hazard';
 import type { WorksheetRecord } from '@/shared/record';
 import { useMessages } from '../../i18n/useMessages';
 import { space, touch } from '../../theme/tokens';
@@ -11,8 +12,13 @@ import { sectionState } from './sectionState';
 
 const LEGEND: readonly MarkState[] = ['complete', 'open', 'stop', 'waits'];
 
-/** The sections whose state does not follow from findings of the plan. */
-function lateState(section: SectionId, record: WorksheetRecord): MarkState | undefined {
+/** The sections whose state does not follow from findings of their own. */
+function ownState(
+  section: SectionId,
+  record: WorksheetRecord,
+  assessment: Assessment,
+): MarkState | undefined {
+  if (section === 'boundaries') return assessment.boundaries === null ? 'waits' : undefined;
   if (section === 'closeOut') return record.closeOut === null ? 'waits' : 'complete';
   if (section !== 'signatures') return undefined;
   const countersigned = record.signatures.some(
@@ -32,7 +38,7 @@ export function SectionNav() {
       {SECTIONS.map((section) => {
         const own = assessment.findings.filter((finding) => sectionOf(finding) === section);
         const found = sectionState(own, words);
-        const state = lateState(section, record) ?? found.state;
+        const state = ownState(section, record, assessment) ?? found.state;
         return (
           <Pressable
             key={section}

@@ -2,7 +2,7 @@ import { JOB_TASKS, LAMPS, SPECIAL_CONDITIONS, pathOf } from '@/hazard';
 import { windowText } from '@/shared/format';
 import { useLocale } from '../../i18n/preferences';
 import { useMessages } from '../../i18n/useMessages';
-import { Text } from '../../ui';
+import { Notice, Text } from '../../ui';
 import {
   FieldDateTime,
   FieldMulti,
@@ -48,6 +48,7 @@ function JobSummary() {
 
 /** 1. What, where, when. */
 export function JobSection() {
+  const words = useMessages();
   const { content, site, record } = useWorksheetForm();
   const sites = useSites();
   const job = content.job ?? {};
@@ -67,11 +68,13 @@ export function JobSection() {
       )}
       <FieldText name="job.description" multiline />
       <FieldText name="job.workOrder" exact />
-      {(site !== undefined || job.startsAt !== undefined) && (
+      {site !== undefined || job.startsAt !== undefined ? (
         <>
           <FieldDateTime name="job.startsAt" />
           <FieldDateTime name="job.endsAt" />
         </>
+      ) : (
+        <Notice icon="clock">{words.worksheet.siteFirst}</Notice>
       )}
       {off && <FieldNumber name="job.pointsOfWork" whole min={1} max={40} />}
       <FieldYesNo name="job.occupied" />

@@ -75,7 +75,7 @@ export const helper = {
     closer: (distance: string) => `Come closer than ${distance}, or reach with anything long`,
     bare: 'Come inside without gloves, or with a ring, a watch or a chain',
     grid: 'Touch the ceiling grid, a light or a loose cable',
-    metal: (surfaces: string) => `Touch ${surfaces}, a light or a loose cable`,
+    metal: (surfaces: string) => `Touch any of these: ${surfaces}, a light, a loose cable`,
     cable: 'Touch a light or a loose cable',
     switches: 'Use any switch or breaker',
     locks: 'Take off a lock or a tag',

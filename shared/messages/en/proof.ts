@@ -91,6 +91,7 @@ export const proof = {
     title: 'Stored energy',
     label: 'Driver outputs, capacitors, batteries at each point',
     notAsked: 'Not asked for this task.',
+    short: 'Not asked',
   },
   after: {
     title: 'Tester proved after',

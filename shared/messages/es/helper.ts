@@ -80,7 +80,7 @@ export const helper: Words<typeof en> = {
     closer: (distance) => `Acercarse a menos de ${distance}, o alcanzar con algo largo`,
     bare: 'Entrar sin guantes, o con anillo, reloj o cadena',
     grid: 'Tocar la retícula del plafón, una luminaria o un cable suelto',
-    metal: (surfaces) => `Tocar ${surfaces}, una luminaria o un cable suelto`,
+    metal: (surfaces) => `Tocar esto: ${surfaces}, una luminaria, un cable suelto`,
     cable: 'Tocar una luminaria o un cable suelto',
     switches: 'Usar un apagador o un termomagnético',
     locks: 'Quitar un candado o una etiqueta',

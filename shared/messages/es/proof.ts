@@ -92,6 +92,7 @@ export const proof: Words<typeof en> = {
     title: 'Energía almacenada',
     label: 'Salidas de drivers, capacitores y baterías en cada punto',
     notAsked: 'No se pide en esta tarea.',
+    short: 'No se pide',
   },
   after: {
     title: 'Probador comprobado después',

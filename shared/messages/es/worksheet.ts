@@ -20,6 +20,7 @@ export const worksheet = {
     `“${typed}” no es una distancia. Escríbala como 3 ft 6 in, 42 in o 1.07 m.`,
   fromSite: 'Del sitio, por confirmar',
   takeSuggestion: (value: string) => `Tomar ${value}`,
+  siteFirst: 'Elija primero el sitio. El inicio y el término van con su hora.',
   occupied: { yes: 'Hay gente en el edificio.', no: 'No hay nadie en el edificio.' },
 
   readingsFit: (systems: string) => `Las lecturas corresponden a ${systems}.`,
