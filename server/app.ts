@@ -17,6 +17,7 @@ import { exportsRouter } from './routes/exports';
 import { healthRouter } from './routes/health';
 import { devicesRouter } from './routes/devices';
 import { passwordResetsRouter } from './routes/passwordResets';
+import { registerImportRouter } from './routes/registerImport';
 import { rubberGoodsRouter } from './routes/rubberGoods';
 import { sessionsRouter } from './routes/sessions';
 import { sitesRouter } from './routes/sites';
@@ -83,6 +84,8 @@ function buildApi(): express.Router {
   api.use('/session', sessionRouter);
   api.use('/sessions', sessionsRouter);
   api.use('/password-resets', passwordResetsRouter);
+  // Before the routers whose `/:id` these paths would fit as well.
+  api.use(registerImportRouter);
   api.use('/users', usersRouter);
   api.use('/sites', sitesRouter);
   api.use('/rubber-goods', rubberGoodsRouter);

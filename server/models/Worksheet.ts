@@ -1,8 +1,11 @@
 import { DataTypes, Model } from 'sequelize';
 import type { CreationOptional, InferAttributes, InferCreationAttributes } from 'sequelize';
-import type { Verdict } from '@/hazard/types';
+import type { Severity, Verdict } from '@/hazard/types';
 import type { WorksheetState } from '@/shared/record';
 import { sequelize } from '../db';
+
+/** Codes of findings with the worst severity in which each was met. */
+export type Severities = Record<string, Severity>;
 
 /** The worksheet as it stands now: its state, and what lists and filters read. */
 export class Worksheet extends Model<
@@ -36,6 +39,8 @@ export class Worksheet extends Model<
   declare cautionCount: CreationOptional<number>;
   declare findingCodes: CreationOptional<string[]>;
   declare metCodes: CreationOptional<string[]>;
+  declare standing: CreationOptional<Severities>;
+  declare met: CreationOptional<Severities>;
   declare reason: string | null;
   declare reasonById: string | null;
   declare reasonAt: Date | null;
@@ -49,6 +54,7 @@ const text = () => ({ type: DataTypes.TEXT });
 const requiredText = () => ({ type: DataTypes.TEXT, allowNull: false, defaultValue: '' });
 const count = () => ({ type: DataTypes.INTEGER, allowNull: false, defaultValue: 0 });
 const ids = () => ({ type: DataTypes.ARRAY(DataTypes.UUID), allowNull: false, defaultValue: [] });
+const severities = () => ({ type: DataTypes.JSONB, allowNull: false, defaultValue: {} });
 const codes = () => ({ type: DataTypes.ARRAY(DataTypes.TEXT), allowNull: false, defaultValue: [] });
 
 Worksheet.init(
@@ -79,6 +85,8 @@ Worksheet.init(
     cautionCount: count(),
     findingCodes: codes(),
     metCodes: codes(),
+    standing: severities(),
+    met: severities(),
     reason: text(),
     reasonById: DataTypes.UUID,
     reasonAt: DataTypes.DATE,

@@ -80,10 +80,9 @@ function reasonOf({ worksheet, people }: WorksheetParts): WorksheetRecord['reaso
   return { text: reason, byName, at: reasonAt.toISOString() };
 }
 
-/** The whole record of a worksheet, for one person: the only way out of the server. */
-export function presentWorksheet(asking: CurrentUser, parts: WorksheetParts): WorksheetRecord {
+/** The whole record of a worksheet, the same whoever asks. */
+export function presentRecord(parts: WorksheetParts): Omit<WorksheetRecord, 'actions'> {
   const { worksheet, revision, signatures, questions, closeOut, people } = parts;
-  const hasOpenQuestion = questions.some(({ answer }) => answer === null);
   return {
     id: worksheet.id,
     number: worksheet.number,
@@ -110,8 +109,17 @@ export function presentWorksheet(asking: CurrentUser, parts: WorksheetParts): Wo
     timeZone: parts.timeZone,
     reason: reasonOf(parts),
     clearedStops: clearedStops(parts),
-    actions: worksheetActions(asking, { worksheet, signatures, hasOpenQuestion }),
     createdAt: worksheet.createdAt.toISOString(),
     updatedAt: worksheet.updatedAt.toISOString(),
+  };
+}
+
+/** The record with what the asking person may do now. */
+export function presentWorksheet(asking: CurrentUser, parts: WorksheetParts): WorksheetRecord {
+  const { worksheet, signatures, questions } = parts;
+  const hasOpenQuestion = questions.some(({ answer }) => answer === null);
+  return {
+    ...presentRecord(parts),
+    actions: worksheetActions(asking, { worksheet, signatures, hasOpenQuestion }),
   };
 }

@@ -1,5 +1,6 @@
 import { Router } from 'express';
 import type { Request, Response } from 'express';
+import { z } from 'zod';
 import {
   answerSchema,
   askSchema,
@@ -18,6 +19,7 @@ import { requireUser } from '../middleware/requireUser';
 import { upload } from '../middleware/upload';
 import type { Worksheet } from '../models/Worksheet';
 import { parse, parseId } from '../parse';
+import { renderWorksheetPdf } from '../pdf/renderWorksheetPdf';
 import {
   isCrew,
   isLead,
@@ -46,6 +48,7 @@ import { copyWorksheet } from '../services/copyWorksheet';
 import { createWorksheet } from '../services/createWorksheet';
 import { findWorksheet } from '../services/findWorksheet';
 import { listWorksheets, worksheetListSchema } from '../services/listWorksheets';
+import { pdfInput } from '../services/pdfInput';
 import { proveWorksheet } from '../services/proveWorksheet';
 import { listEvents, listRevisions, readRevision } from '../services/readHistory';
 import { loadParts, loadPeople } from '../services/readRecord';
@@ -59,6 +62,11 @@ import { voidWorksheet } from '../services/voidWorksheet';
 
 export const worksheetsRouter = Router();
 worksheetsRouter.use(requireUser);
+
+const pdfQuerySchema = z.strictObject({
+  revision: z.coerce.number().int().min(1).max(1_000_000).optional(),
+  language: z.enum(['en', 'es']).default('en'),
+});
 
 type Policy = (person: CurrentUser, worksheet: Worksheet) => boolean;
 
@@ -207,4 +215,17 @@ worksheetsRouter.post('/:worksheetId/attachments', async (req, res) => {
   const photo = { ...body, file: file.buffer };
   const { row, created } = await addAttachment(actor, worksheet, photo);
   res.status(created ? 201 : 200).json(presentAttachment(row));
+});
+
+worksheetsRouter.get('/:worksheetId/pdf', async (req, res) => {
+  const { worksheet } = await worksheetFor(req);
+  const { revision = worksheet.revision, language } = parse(pdfQuerySchema, req.query);
+  const bytes = await renderWorksheetPdf(await pdfInput(worksheet, revision), language);
+  res
+    .setHeader('Content-Type', 'application/pdf')
+    .setHeader(
+      'Content-Disposition',
+      `inline; filename="worksheet-${worksheet.number}-r${revision}-${language}.pdf"`,
+    )
+    .end(bytes);
 });

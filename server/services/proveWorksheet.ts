@@ -14,6 +14,7 @@ import { notify, supervisorsOf } from './notify';
 import { currentRevision } from './readRecord';
 import { recordEvent } from './recordEvent';
 import { placeOf } from './siteOf';
+import { metColumns } from './writeDraft';
 
 interface NewProof {
   id?: string | undefined;
@@ -70,7 +71,7 @@ function insertProof(actor: CurrentUser, worksheetId: string, id: string, proof:
     const met = assessment.findings.filter(({ severity }) => severity !== 'caution');
     worksheet.set({
       proved: assessment.verdict === 'ready',
-      metCodes: [...new Set([...worksheet.metCodes, ...met.map(({ code }) => code)])],
+      ...metColumns(worksheet, met),
       updatedAt: at,
     });
     await worksheet.save({ transaction });

@@ -17,30 +17,37 @@ type RubberGoodsChanges = z.infer<typeof rubberGoodsUpdateSchema>;
 
 export function createRubberGoods(
   actor: CurrentUser,
-  { id = v7(), tests, issuedOn = null, ...fields }: NewRubberGoods,
+  { id = v7(), ...fields }: NewRubberGoods,
 ): Promise<{ record: RubberGoods; created: boolean }> {
   return createOnce({
     actor,
     id,
     find: (known) => RubberGoods.findByPk(known),
-    create: async (transaction) => {
-      await checkSite(fields.siteId, transaction);
-      const now = clock.now();
-      const goods = await RubberGoods.create(
-        { id, ...fields, issuedOn, createdAt: now, updatedAt: now },
-        { transaction },
-      );
-      await setTests(id, tests, transaction);
-      await recordEvent(transaction, {
-        subjectType: 'rubber-goods',
-        subjectId: id,
-        type: 'created',
-        actorId: actor.id,
-        payload: { ...fields, issuedOn, tests },
-      });
-      return goods;
-    },
+    create: (transaction) => insertRubberGoods(transaction, actor, { id, ...fields }),
   });
+}
+
+/** The item, its tests and the event, as a part of a transaction. */
+export async function insertRubberGoods(
+  transaction: Transaction,
+  actor: CurrentUser,
+  { id, tests, issuedOn = null, ...fields }: NewRubberGoods & { id: string },
+): Promise<RubberGoods> {
+  await checkSite(fields.siteId, transaction);
+  const now = clock.now();
+  const goods = await RubberGoods.create(
+    { id, ...fields, issuedOn, createdAt: now, updatedAt: now },
+    { transaction },
+  );
+  await setTests(id, tests, transaction);
+  await recordEvent(transaction, {
+    subjectType: 'rubber-goods',
+    subjectId: id,
+    type: 'created',
+    actorId: actor.id,
+    payload: { ...fields, issuedOn, tests },
+  });
+  return goods;
 }
 
 export function updateRubberGoods(

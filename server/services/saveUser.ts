@@ -21,31 +21,38 @@ type UserChanges = z.infer<typeof updateUserSchema>;
 /** Adds a person and mails them the invitation to choose a password and a PIN. */
 export function createUser(
   actor: CurrentUser,
-  { id = v7(), siteIds, qualifiedThrough = null, ...fields }: NewUser,
+  { id = v7(), ...fields }: NewUser,
 ): Promise<{ record: User; created: boolean }> {
   return createOnce({
     actor,
     id,
     find: (known) => User.findByPk(known),
-    create: async (transaction) => {
-      const now = clock.now();
-      const user = await User.create(
-        { id, ...fields, qualifiedThrough, invitedAt: now, createdAt: now, updatedAt: now },
-        { transaction },
-      );
-      await setSites(id, siteIds, transaction);
-      const { name, email, role } = fields;
-      await recordEvent(transaction, {
-        subjectType: 'user',
-        subjectId: id,
-        type: 'created',
-        actorId: actor.id,
-        payload: { name, email, role, siteIds, qualifiedThrough },
-      });
-      await queueLinkMail(transaction, 'invitation', id);
-      return user;
-    },
+    create: (transaction) => insertUser(transaction, actor, { id, ...fields }),
   });
+}
+
+/** The person, the event and the invitation, as a part of a transaction. */
+export async function insertUser(
+  transaction: Transaction,
+  actor: CurrentUser,
+  { id, siteIds, qualifiedThrough = null, ...fields }: NewUser & { id: string },
+): Promise<User> {
+  const now = clock.now();
+  const user = await User.create(
+    { id, ...fields, qualifiedThrough, invitedAt: now, createdAt: now, updatedAt: now },
+    { transaction },
+  );
+  await setSites(id, siteIds, transaction);
+  const { name, email, role } = fields;
+  await recordEvent(transaction, {
+    subjectType: 'user',
+    subjectId: id,
+    type: 'created',
+    actorId: actor.id,
+    payload: { name, email, role, siteIds, qualifiedThrough },
+  });
+  await queueLinkMail(transaction, 'invitation', id);
+  return user;
 }
 
 /** Changes a person. A new role and retirement end their sessions at once. */

@@ -1,11 +1,11 @@
 import { Op } from 'sequelize';
 import type { Transaction } from 'sequelize';
-import type { Assessment } from '@/hazard/types';
+import type { Assessment, Finding, Severity } from '@/hazard/types';
 import type { WorksheetContent } from '@/shared/worksheet';
 import { clock } from '../clock';
 import { AttachmentRow } from '../models/AttachmentRow';
 import { User } from '../models/User';
-import type { Worksheet } from '../models/Worksheet';
+import type { Severities, Worksheet } from '../models/Worksheet';
 import { WorksheetRevision } from '../models/WorksheetRevision';
 import type { SeenStop } from '../models/WorksheetRevision';
 import { assessAt } from './assessAt';
@@ -75,6 +75,20 @@ function searchDocument(
     .join('\n');
 }
 
+const RANK: Record<Severity, number> = { stop: 0, open: 1, caution: 2 };
+
+function worstOf(
+  before: Severities,
+  findings: readonly Pick<Finding, 'code' | 'severity'>[],
+): Severities {
+  const worst = { ...before };
+  for (const { code, severity } of findings) {
+    const known = worst[code];
+    if (known === undefined || RANK[severity] < RANK[known]) worst[code] = severity;
+  }
+  return worst;
+}
+
 /** The columns that say how the worksheet stands. */
 export function verdictColumns(assessment: Assessment) {
   const count = (severity: string) =>
@@ -85,7 +99,17 @@ export function verdictColumns(assessment: Assessment) {
     openCount: count('open'),
     cautionCount: count('caution'),
     findingCodes: unique(assessment.findings.map(({ code }) => code)),
+    standing: worstOf({}, assessment.findings),
   };
+}
+
+/** What was met on the way, with more findings added to it. */
+export function metColumns(
+  { met }: Pick<Worksheet, 'met'>,
+  findings: readonly Pick<Finding, 'code' | 'severity'>[],
+) {
+  const all = worstOf(met, findings);
+  return { met: all, metCodes: Object.keys(all) };
 }
 
 function stopsOf(assessment: Assessment): SeenStop[] {
@@ -153,7 +177,10 @@ export async function writeDraft(
   worksheet.set({
     ...columns,
     ...verdictColumns(assessment),
-    metCodes: unique([...worksheet.metCodes, ...stops.map(({ code }) => code)]),
+    ...metColumns(
+      worksheet,
+      assessment.findings.filter(({ severity }) => severity === 'stop'),
+    ),
     authorIds: unique([
       ...worksheet.authorIds,
       ...(Object.keys(content).length > 0 ? [actorId] : []),
