@@ -33,8 +33,8 @@ function DifferenceRow({ difference }: { difference: FactDifference }) {
     <View role="listitem" style={[styles.row, { borderTopColor: colors.hair }]}>
       <Text variant="strong">{heading === undefined ? label : `${heading}: ${label}`}</Text>
       <View style={isPhone ? styles.stacked : styles.sides}>
-        <Side label={before === undefined ? trail.added : trail.was} value={before} />
-        <Side label={after === undefined ? trail.gone : trail.is} value={after} />
+        <Side label={trail.was} value={before} />
+        <Side label={trail.is} value={after} />
       </View>
     </View>
   );

@@ -73,7 +73,7 @@ export function RevisionBlock(props: Props) {
         <Text variant="answer">{current ? `${stateWord}, ${trail.current}` : stateWord}</Text>
       </View>
       <Text variant="note" color="ink2">
-        {`${trail.revisionLine(revision.createdBy.name, dateTimeText(locale, revision.createdAt, timeZone))}. ${trail.edition(revision.edition)}`}
+        {`${trail.revisionLine(revision.createdBy.name, dateTimeText(locale, revision.createdAt, timeZone))}. ${revision.edition}`}
       </Text>
       {signed ? (
         <View role="list" aria-label={trail.signatures} style={styles.signatures}>

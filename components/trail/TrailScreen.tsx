@@ -1,4 +1,4 @@
-import { useQueries, useQuery } from '@tanstack/react-query';
+import { useQueries, useQuery, type UseQueryResult } from '@tanstack/react-query';
 import { StyleSheet, View } from 'react-native';
 import type { ReactNode } from 'react';
 import type { WorksheetRecord } from '@/shared/record';
@@ -11,7 +11,13 @@ import { WithRecord } from '../worksheet/WithRecord';
 import { Compare } from './Compare';
 import { EventList } from './EventList';
 import { RevisionBlock } from './RevisionBlock';
-import { eventsQuery, revisionQuery, revisionsQuery } from './trailQueries';
+import {
+  eventsQuery,
+  revisionQuery,
+  revisionsQuery,
+  type Revision,
+  type RevisionDetail,
+} from './trailQueries';
 import { UnalteredPanel } from './UnalteredPanel';
 
 function Part({ title, children }: { title: string; children: ReactNode }) {
@@ -46,46 +52,54 @@ function Happened({ record }: { record: WorksheetRecord }) {
   );
 }
 
-function Revisions({ record }: { record: WorksheetRecord }) {
+interface RevisionsProps {
+  record: WorksheetRecord;
+  list: UseQueryResult<{ items: Revision[] }>;
+  details: readonly UseQueryResult<RevisionDetail>[];
+}
+
+function Revisions({ record, list, details }: RevisionsProps) {
   const { trail } = useMessages();
-  const list = useQuery(revisionsQuery(record.id));
-  const revisions = list.data?.items ?? [];
-  const details = useQueries({
-    queries: revisions.map(({ revision }) => revisionQuery(record.id, revision)),
-  });
-  const arrived = details.flatMap(({ data }) => (data === undefined ? [] : [data]));
-  const complete = list.data !== undefined && arrived.length === revisions.length;
-  return (
-    <>
+  if (list.data === undefined) {
+    return (
       <Part title={trail.revisions}>
-        {list.data === undefined ? (
-          <Waiting error={list.error} />
-        ) : (
-          <View role="list">
-            {[...revisions].reverse().map((revision) => (
-              <RevisionBlock
-                key={revision.revision}
-                worksheetId={record.id}
-                number={record.number}
-                revision={revision}
-                current={revision.revision === record.revision}
-                signatures={
-                  arrived.find((detail) => detail.revision === revision.revision)?.signatures
-                }
-                timeZone={record.timeZone}
-              />
-            ))}
-          </View>
-        )}
+        <Waiting error={list.error} />
       </Part>
-      <Part title={trail.differences}>
-        {complete ? (
-          <Compare key={arrived.length} record={record} revisions={arrived} />
-        ) : (
-          <Waiting error={details.find(({ error }) => error !== null)?.error ?? list.error} />
-        )}
-      </Part>
-    </>
+    );
+  }
+  return (
+    <Part title={trail.revisions}>
+      <View role="list">
+        {[...list.data.items].reverse().map((revision) => (
+          <RevisionBlock
+            key={revision.revision}
+            worksheetId={record.id}
+            number={record.number}
+            revision={revision}
+            current={revision.revision === record.revision}
+            signatures={
+              details.find(({ data }) => data?.revision === revision.revision)?.data?.signatures
+            }
+            timeZone={record.timeZone}
+          />
+        ))}
+      </View>
+    </Part>
+  );
+}
+
+function Changed({ record, list, details }: RevisionsProps) {
+  const { trail } = useMessages();
+  const arrived = details.flatMap(({ data }) => (data === undefined ? [] : [data]));
+  const complete = list.data !== undefined && arrived.length === list.data.items.length;
+  return (
+    <Part title={trail.differences}>
+      {complete ? (
+        <Compare key={arrived.length} record={record} revisions={arrived} />
+      ) : (
+        <Waiting error={details.find(({ error }) => error !== null)?.error ?? list.error} />
+      )}
+    </Part>
   );
 }
 
@@ -93,6 +107,11 @@ function Trail({ record, stale }: { record: WorksheetRecord; stale: boolean }) {
   const words = useMessages();
   const { trail } = words;
   const { isWide } = useBreakpoint();
+  const list = useQuery(revisionsQuery(record.id));
+  const details = useQueries({
+    queries: (list.data?.items ?? []).map(({ revision }) => revisionQuery(record.id, revision)),
+  });
+  const changed = <Changed record={record} list={list} details={details} />;
   return (
     <Screen
       title={trail.title}
@@ -110,9 +129,11 @@ function Trail({ record, stale }: { record: WorksheetRecord; stale: boolean }) {
             <UnalteredPanel record={record} />
           </View>
           <Happened record={record} />
+          {isWide && changed}
         </View>
         <View style={isWide && styles.half}>
-          <Revisions record={record} />
+          <Revisions record={record} list={list} details={details} />
+          {!isWide && changed}
         </View>
       </View>
     </Screen>
