@@ -17,6 +17,7 @@ import { items } from './items';
 import { mail } from './mail';
 import { pdf } from './pdf';
 import { permit } from './permit';
+import { photos } from './photos';
 import { problems } from './problems';
 import { proof } from './proof';
 import { register } from './register';
@@ -49,6 +50,7 @@ export const en = {
   mail,
   pdf,
   permit,
+  photos,
   problems,
   proof,
   register,

@@ -19,6 +19,7 @@ import { items } from './items';
 import { mail } from './mail';
 import { pdf } from './pdf';
 import { permit } from './permit';
+import { photos } from './photos';
 import { problems } from './problems';
 import { proof } from './proof';
 import { register } from './register';
@@ -51,6 +52,7 @@ export const es: Words<typeof en> = {
   mail,
   pdf,
   permit,
+  photos,
   problems,
   proof,
   register,
