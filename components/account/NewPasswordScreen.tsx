@@ -103,7 +103,7 @@ export function NewPasswordScreen(props: Props) {
   }
   return (
     <SignedOutFrame title={words.title}>
-      <Form label={words.title}>
+      <Form>
         <Text>{words.body}</Text>
         {form.tried && !form.save.isPending && <ErrorSummary faults={form.faults} />}
         <TextField

@@ -33,7 +33,7 @@ export function PasswordForgottenScreen() {
           {account.reset.sent}
         </Notice>
       ) : (
-        <Form label={account.reset.title}>
+        <Form>
           <Text>{account.reset.body}</Text>
           {ask.isError && (
             <ErrorSummary faults={[{ message: describeFault(ask.error, messages) }]} />

@@ -53,7 +53,7 @@ function PasswordForm({ onDone, onCancel }: FormProps) {
   }
 
   return (
-    <Form label={account.changePassword}>
+    <Form>
       {tried && !change.isPending && <ErrorSummary faults={faults} />}
       <TextField
         id="current-password"
@@ -109,7 +109,7 @@ function PinForm({ onDone, onCancel }: FormProps) {
   }
 
   return (
-    <Form label={account.changePin}>
+    <Form>
       {tried && !change.isPending && <ErrorSummary faults={faults} />}
       <TextField
         id="pin-password"

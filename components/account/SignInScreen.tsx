@@ -51,7 +51,7 @@ export function SignInScreen({ to }: { to?: string }) {
 
   return (
     <SignedOutFrame title={account.signIn} purpose foot={account.fromOffice}>
-      <Form label={account.signIn}>
+      <Form>
         {tried && !signIn.isPending && <ErrorSummary faults={faults} />}
         <TextField
           id="email"

@@ -3,15 +3,10 @@ import { View } from 'react-native';
 import { space } from '../theme/tokens';
 
 interface Props {
-  label: string;
   children: ReactNode;
 }
 
 /** The fields of one form, under each other. */
-export function Form({ label, children }: Props) {
-  return (
-    <View aria-label={label} style={{ gap: space.md }}>
-      {children}
-    </View>
-  );
+export function Form({ children }: Props) {
+  return <View style={{ gap: space.md }}>{children}</View>;
 }
