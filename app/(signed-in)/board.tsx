@@ -1,0 +1,10 @@
+import { BoardScreen } from '@/components/board/BoardScreen';
+import { OnlyFor } from '@/components/shell/SignedIn';
+
+export default function BoardRoute() {
+  return (
+    <OnlyFor roles={['supervisor', 'safety']}>
+      <BoardScreen />
+    </OnlyFor>
+  );
+}
