@@ -7,8 +7,8 @@ import { idTaken, toProblem } from '../problem';
 interface Creation<T> {
   actor: CurrentUser;
   id: string;
-  create(transaction: Transaction): Promise<T>;
-  find(id: string): Promise<T | null>;
+  create: (transaction: Transaction) => Promise<T>;
+  find: (id: string) => Promise<T | null>;
 }
 
 /**

@@ -26,7 +26,7 @@ interface Mail {
   recipient: Recipient;
   /** What the mail is about, such as an event's id. With the recipient it makes the Message-ID, so that a repeated delivery can be told. */
   about: string;
-  words(messages: Messages['mail']): { subject: string; body: string };
+  words: (messages: Messages['mail']) => { subject: string; body: string };
   /** A path of the app, such as `/worksheets/…`. */
   path?: string;
 }
