@@ -58,14 +58,6 @@ async function untilClosed(stream: Promise<void>): Promise<void> {
   }
 }
 
-/** A spreadsheet takes a cell that begins like this for a formula. */
-const FORMULA = /^[=+\-@\t\r]/;
-
-function cell(value: string | number | boolean | null): string {
-  const text = value === null ? '' : String(value);
-  return typeof value === 'string' && FORMULA.test(text) ? `'${text}` : text;
-}
-
 const COLUMNS = [
   'number',
   'state',
@@ -98,23 +90,23 @@ async function* csvRows(actor: CurrentUser, filters: WorksheetFilters): AsyncGen
         row.state,
         row.proved,
         row.revision,
-        row.siteName,
+        row.siteName ?? '',
         row.area,
         row.equipment,
-        row.task,
-        row.mode,
-        row.system,
-        row.circuitVolts,
+        row.task ?? '',
+        row.mode ?? '',
+        row.system ?? '',
+        row.circuitVolts ?? '',
         row.verdict,
         row.counts.stop,
         row.leadName,
         row.crew.map(({ name }) => name).join('; '),
-        row.reason,
-        row.startsAt,
-        row.endsAt,
+        row.reason ?? '',
+        row.startsAt ?? '',
+        row.endsAt ?? '',
         row.createdAt,
         row.updatedAt,
-      ].map(cell);
+      ].map(String);
     }
   }
 }
@@ -130,6 +122,8 @@ export async function exportCsv(
     columns: COLUMNS,
     bom: true,
     record_delimiter: 'windows',
+    // A spreadsheet takes a cell that begins with =, +, -, @, tab or CR for a formula.
+    escape_formulas: true,
   });
   await untilClosed(pipeline(Readable.from(csvRows(actor, filters)), text, out));
 }
