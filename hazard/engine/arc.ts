@@ -36,12 +36,11 @@ interface Question {
 function floorOf({ answers, task, path, people }: Question): ArcFlashTask | undefined {
   if (path === 'off') return 'voltage test';
   const { job, arcFlash, supply } = answers;
-  if (job.task === 'trace circuit') return people.someoneEnters ? 'voltage test' : undefined;
-  if (job.task === 'inspect' || job.task === 'thermography') {
-    return arcFlash.coversOn === true ? undefined : 'remove cover exposing parts';
-  }
   if (job.task === 'work on lighting control' && isExtraLowVoltage(supply)) return undefined;
-  return task.arcFlashFloor ?? undefined;
+  if (task.arcFlashFloor !== null) return task.arcFlashFloor;
+  if (job.task === 'trace circuit') return people.someoneEnters ? 'voltage test' : undefined;
+  // Inspection and thermography: a cover that comes off exposes parts.
+  return arcFlash.coversOn === true ? undefined : 'remove cover exposing parts';
 }
 
 /** What a task that was chosen for its mildness counts as, unless its conditions hold. */

@@ -47,6 +47,8 @@ interface PlacedReading extends Reading {
 /** One that may fill a pair, or stand for a source's own conductor. */
 interface CompleteReading extends PlacedReading {
   readonly to: Conductor;
+  /** Of a source's own conductor, only the other end is named. */
+  readonly pair: string;
 }
 
 function placedReadings(
@@ -65,13 +67,13 @@ function completeReadings(placed: readonly PlacedReading[]): readonly CompleteRe
   return placed.flatMap((reading) => {
     const { to, from, sourceId } = reading;
     if (to === undefined || (from === undefined && sourceId === undefined)) return [];
-    return [{ ...reading, to }];
+    return [{ ...reading, to, pair: pairName(from ?? '', to) }];
   });
 }
 
 /** What a reading is of; readings of the same thing govern one another. */
-function subjectOf({ point, from, to, current, sourceId }: CompleteReading): string {
-  return [point, pairName(from ?? '', to), current, sourceId ?? ''].join(SEPARATOR);
+function subjectOf({ point, pair, current, sourceId }: CompleteReading): string {
+  return [point, pair, current, sourceId ?? ''].join(SEPARATOR);
 }
 
 /**
@@ -130,8 +132,7 @@ export function readingsOf({ answers, proof, sources, voltage, on }: Question): 
   const ofSources = alternating.filter(({ sourceId, from }) => sourceId && from === undefined);
   const pairsAt = grouped(ofCircuit, ({ point }) => point);
   const sourcesAt = grouped(ofSources, ({ point, sourceId }) => placeOf(point, sourceId));
-  const filledAt = (point: string) =>
-    new Set((pairsAt.get(point) ?? []).map(({ from, to }) => pairName(from ?? '', to)));
+  const filledAt = (point: string) => new Set((pairsAt.get(point) ?? []).map(({ pair }) => pair));
 
   const direct = placed.filter(({ current }) => current === 'dc');
   const names = new Set([

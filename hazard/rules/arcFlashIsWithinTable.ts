@@ -17,12 +17,13 @@ export const arcFlashIsWithinTable: Rule = {
       ...arc.result.findings
         .filter(({ code }) => code === 'arc.study-needed')
         .map((found) => {
-          const { params, path } = found;
-          if (params.reason !== 'not-answered') return found;
-          return { ...found, ...notAnswered(path, params) };
+          const { field } = found.params;
+          // The label and the table name their fields; a worksheet has a section around them.
+          if (field === undefined) return found;
+          return { ...found, params: { ...found.params, field: `arcFlash.${field}` } };
         }),
       ...arc.transformerGaps.map((name) =>
-        notAnswered(`/arcFlash/transformer/${name}`, { reason: 'not-answered' }),
+        notAnswered(`/arcFlash/transformer/${name}`, { limit: 'not-answered' }),
       ),
     ];
   },

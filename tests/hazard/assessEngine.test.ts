@@ -255,6 +255,18 @@ describe('an arc flash', () => {
     expect(result.equipment.map(({ id }) => id)).not.toContain('safety-glasses');
   });
 
+  it('whose boundary is not known may reach someone outside the limited boundary', () => {
+    const result = assessBase('T', {
+      'job/task': 'inspect',
+      'arcFlash/task': 'operate device',
+      'arcFlash/normal/maintained': false,
+      'arcFlash/clearingSeconds': gone,
+      'crew/0/closest': 'outside limited',
+    });
+    expect(result.arcFlash).toMatchObject({ likely: true, arcFlashBoundary: null });
+    expect(result.equipment.map(({ id }) => id)).toContain('safety-glasses');
+  });
+
   it('a transformer begun beside a fault current is to be completed', () => {
     const result = assessBase('O', {
       'arcFlash/transformer': { kilovoltAmperes: 75, secondaryVolts: 208, impedancePercent: 0 },
