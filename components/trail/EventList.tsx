@@ -81,11 +81,9 @@ export function EventList({ events, timeZone, compact }: Props) {
   const [hashes, setHashes] = useState(false);
   const revisions = revisionsOf(events);
   const last = events.at(-1);
-  let lastDay = '';
+  const dates = events.map(({ at }) => calendarDate(at, timeZone));
   const rows = events.map((event, index) => {
-    const date = calendarDate(event.at, timeZone);
-    const isNew = date !== lastDay;
-    lastDay = date;
+    const date = dates[index] ?? '';
     const day = compact === true ? dayText(locale, event.at, timeZone) : dateText(locale, date);
     return (
       <EventRow
@@ -94,7 +92,7 @@ export function EventList({ events, timeZone, compact }: Props) {
         revision={revisions[index] ?? 1}
         timeZone={timeZone}
         first={index === 0}
-        day={isNew ? day : undefined}
+        day={date === dates[index - 1] ? undefined : day}
         hashes={hashes}
         compact={compact}
       />
