@@ -177,6 +177,12 @@ describe('what is read of a proof', () => {
     }
   });
 
+  it('a point that a source names and nobody read is a point of work', () => {
+    const result = assessBase('O work', { 'sources/0/points': ['A1', ' A2 ', 'A3'] });
+    const missing = result.findings.filter(({ code }) => code === 'absence.pairs-missing');
+    expect(missing.map(({ params }) => params)).toEqual([{ point: 'A3', pairs: 'A-N, A-G, N-G' }]);
+  });
+
   it('direct current on conductors that are shared is read on either name, or on none', () => {
     const inverter = {
       ...contentOf('O').sources?.[1],
