@@ -6,6 +6,7 @@ import { useUser } from '../api/session';
 import { useKeptForm } from '../drafts/useKeptForm';
 import { useMessages } from '../i18n/useMessages';
 import { space } from '../theme/tokens';
+import { useToTop } from '../shell/useToTop';
 import { Button, LoadingScreen, Notice, Screen, StateMark, Text } from '../ui';
 import { WithRecord } from '../worksheet/WithRecord';
 import { CloseOutForm } from './CloseOutForm';
@@ -27,6 +28,7 @@ function Content({ record }: { record: WorksheetRecord }) {
   const words = useMessages();
   const said = words.closeOut;
   const user = useUser();
+  useToTop(record.state);
   const kept = useKeptForm({
     userId: user.id,
     key: `close/${record.id}/${record.revision}`,

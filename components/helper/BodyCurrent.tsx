@@ -24,7 +24,7 @@ interface Bar {
 }
 
 /** mA; the ruler is logarithmic, since each effect begins at about ten times the one before. */
-const AXIS = { from: 1, to: 2000 } as const;
+const AXIS = { from: 1, to: 1000 } as const;
 const ROW = 30;
 const BAR = 18;
 const GAP = 8;
@@ -41,10 +41,12 @@ function chart(bars: readonly Bar[], width: number): Drawing {
   const foot = bars.length * ROW + 6;
   const primitives: Primitive[] = bars.flatMap((bar, index): Primitive[] => {
     const top = index * ROW + (ROW - BAR) / 2;
-    const x1 = at(bar.from);
-    const x2 = Math.max(at(bar.to), x1 + 6);
+    const x2 = Math.min(Math.max(at(bar.to), at(bar.from) + 6), right);
+    const x1 = Math.min(at(bar.from), right - 6);
     const weight = bar.strong === true ? 700 : 500;
     const fits = x2 + GAP + textWidth(bar.text, TEXT, weight) <= width;
+    const room = fits ? width : x1 - GAP;
+    const size = Math.min(TEXT, (TEXT * room) / textWidth(bar.text, TEXT, weight));
     return [
       {
         kind: 'path',
@@ -56,7 +58,7 @@ function chart(bars: readonly Bar[], width: number): Drawing {
         x: fits ? x2 + GAP : x1 - GAP,
         y: top + BAR - 4,
         text: bar.text,
-        size: TEXT,
+        size,
         weight,
         anchor: fits ? 'start' : 'end',
         role: 'ink',
@@ -87,7 +89,7 @@ function chart(bars: readonly Bar[], width: number): Drawing {
       text: decade === 1000 ? '1000 mA' : String(decade),
       size: 15,
       weight: 500,
-      anchor: decade === 1 ? 'start' : 'middle',
+      anchor: decade === 1 ? 'start' : decade === AXIS.to ? 'end' : 'middle',
       role: 'note',
       halo: 0,
     });
@@ -108,6 +110,7 @@ export function BodyCurrent({ touch }: { touch: NonNullable<Assessment['touch']>
       // From 6 mA (women): the first value at which anybody can no longer let go.
       { from: 6, to: 30, text: words.effect.letGo, role: 'ink' },
       { from: 50, to: 150, text: words.effect.breathing, role: 'ink' },
+      // It goes on past the end of the ruler.
       { from: 1000, to: AXIS.to, text: words.effect.heart, role: 'ink' },
       { from: touch.p95, to: touch.p5, text: words.here(low, high), role: 'exposed', strong: true },
     ],

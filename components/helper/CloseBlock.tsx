@@ -44,7 +44,7 @@ export function CloseBlock({ record, member }: { record: WorksheetRecord; member
         : words.worksheet.avoidContact
       : distance(closeness.figure, units);
   const stay = stayWords(closeness, lead, words);
-  const cited = [assessment.boundaries?.citation, ...assessment.arcFlash.citations].filter(
+  const cited = [assessment.boundaries?.citation, assessment.barricade?.citation].filter(
     (each) => each !== undefined,
   );
   return (

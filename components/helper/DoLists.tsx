@@ -1,8 +1,8 @@
 import { StyleSheet, View } from 'react-native';
 import type { CrewMember } from '@/hazard';
-import { distance, list } from '@/shared/format';
+import { distance } from '@/shared/format';
 import type { WorksheetRecord } from '@/shared/record';
-import { useLocale, useUnits } from '../i18n/preferences';
+import { useUnits } from '../i18n/preferences';
 import { useMessages } from '../i18n/useMessages';
 import { space } from '../theme/tokens';
 import { useTheme } from '../theme/useTheme';
@@ -38,7 +38,6 @@ interface Props {
 /** What this person may not do here. */
 export function DoNots({ record, member }: Props) {
   const words = useMessages();
-  const locale = useLocale();
   const units = useUnits();
   const { doNots } = words.helper;
   const closeness = closenessOf(member, record.content, record.assessment);
@@ -55,10 +54,7 @@ export function DoNots({ record, member }: Props) {
       : surfaces.length === 1 && surfaces[0] === 'ceiling grid'
         ? doNots.grid
         : doNots.metal(
-            list(
-              locale,
-              surfaces.map((kind) => lowerFirst(words.enumerations.surfaceKind[kind])),
-            ),
+            surfaces.map((kind) => lowerFirst(words.enumerations.surfaceKind[kind])).join(', '),
           );
   const own = member.worksOnCircuit === true ? [] : [doNots.locks];
   const lines = [first, touch, doNots.switches, ...own];

@@ -66,5 +66,5 @@ const styles = StyleSheet.create({
   },
   inside: { width: '100%', maxWidth: layout.helper, gap: 10 },
   two: { flexDirection: 'row', gap: 10 },
-  half: { flex: 1, paddingHorizontal: space.xs, gap: 6 },
+  half: { flexGrow: 1, flexShrink: 1, paddingHorizontal: 6, gap: 4 },
 });

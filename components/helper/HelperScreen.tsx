@@ -11,6 +11,7 @@ import { PreferencesProvider, useLocale, useUnits } from '../i18n/preferences';
 import { useMessages } from '../i18n/useMessages';
 import { rule, space } from '../theme/tokens';
 import { useTheme } from '../theme/useTheme';
+import { useToTop } from '../shell/useToTop';
 import { Button, NotFoundScreen, Notice, Screen, StateMark, Text, webProps } from '../ui';
 import { placeText, taskText } from '../signing/SigningFacts';
 import { Stopped } from '../stop/Stopped';
@@ -215,6 +216,7 @@ function Helper({ record, signerId }: { record: WorksheetRecord; signerId: strin
   const [chosen, setChosen] = useState<Locale>(locale);
   const [page, setPage] = useState<Page>('read');
   const [asked, setAsked] = useState(false);
+  useToTop(`${record.state === 'stopped'} ${page}`);
   const member = record.content.crew?.find(({ userId }) => userId === signerId);
   if (member === undefined) return <NotFoundScreen />;
   const shown: Shown = {

@@ -53,7 +53,7 @@ interface Placed {
 function helperStrip({ zones, units, width, closeness, you }: Placed): Drawing {
   const label = textWidth(you, LABEL, 700);
   // Room at the right for the reader: beyond the barricade's name and clear of the last figure.
-  const pixelsPerFoot = stripScale(zones, width - label - 30);
+  const pixelsPerFoot = stripScale(zones, width - label - 34);
   const strip = stripGeometry({ zones, units, width, pixelsPerFoot });
   const at = ORIGIN + feetOf(closeness, units) * pixelsPerFoot;
   const barricade = zones.barricade;
@@ -61,15 +61,15 @@ function helperStrip({ zones, units, width, closeness, you }: Placed): Drawing {
     barricade !== null && closeness.kind === 'barricade'
       ? at + 18 + textWidth(barricade.name, LABEL, 600) + 22
       : at + 16;
-  const x = Math.min(Math.max(beyond, 14), width - Math.max(12, label / 2));
+  const x = Math.min(Math.max(beyond, 14), width - label - 16);
   const named: Primitive = {
     kind: 'text',
-    x,
-    y: LANES_FOOT - 42,
+    x: x + 14,
+    y: LANES_FOOT - 12,
     text: you,
     size: LABEL,
     weight: 700,
-    anchor: 'middle',
+    anchor: 'start',
     role: 'ink',
     halo: 4,
   };

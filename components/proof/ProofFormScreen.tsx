@@ -178,6 +178,9 @@ function Form({ record, kept, onProved }: FormProps) {
   });
   const of = ({ done, all }: Count) => words.common.counts.of(done, all);
   const waits: MarkState = 'waits';
+  // An empty field that nothing asks for is not done; it is not asked.
+  const unasked = (section: ProofSection, empty: boolean) =>
+    empty && !state.asked.has(section) ? { mark: waits, word: said.stored.short } : {};
   return (
     <Screen
       title={said.title}
@@ -213,13 +216,19 @@ function Form({ record, kept, onProved }: FormProps) {
         <ProofSectionFrame {...frame('readings', said.readings.title)} detail={of(counts.readings)}>
           <Readings state={state} place={place} onPlace={setPlace} />
         </ProofSectionFrame>
-        <ProofSectionFrame {...frame('clamp', said.clamp.title)}>
+        <ProofSectionFrame
+          {...frame('clamp', said.clamp.title)}
+          {...unasked('clamp', state.form.neutral === '')}
+        >
           <Clamp state={state} />
         </ProofSectionFrame>
         <ProofSectionFrame {...frame('others', said.others.title)}>
           <Others state={state} />
         </ProofSectionFrame>
-        <ProofSectionFrame {...frame('stored', said.stored.title)}>
+        <ProofSectionFrame
+          {...frame('stored', said.stored.title)}
+          {...unasked('stored', state.form.storedEnergy === undefined)}
+        >
           <Stored state={state} />
         </ProofSectionFrame>
         <ProofSectionFrame

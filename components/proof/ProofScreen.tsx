@@ -2,6 +2,7 @@ import { useState, type ReactNode } from 'react';
 import { pathOf } from '@/hazard';
 import type { WorksheetRecord } from '@/shared/record';
 import { useMessages } from '../i18n/useMessages';
+import { useToTop } from '../shell/useToTop';
 import { Button, Notice, Screen } from '../ui';
 import { Stopped } from '../stop/Stopped';
 import { WithRecord } from '../worksheet/WithRecord';
@@ -57,6 +58,8 @@ function NotHere({ record }: { record: WorksheetRecord }) {
 function ProofOf({ record }: { record: WorksheetRecord }) {
   const [again, setAgain] = useState(false);
   const last = record.proofs.at(-1);
+  const isShownProved = record.proved && last !== undefined && !again;
+  useToTop(`${record.state} ${isShownProved}`);
   if (record.state === 'stopped') {
     return (
       <Elsewhere record={record}>
@@ -71,7 +74,7 @@ function ProofOf({ record }: { record: WorksheetRecord }) {
       </Elsewhere>
     );
   }
-  if (record.proved && last !== undefined && !again) {
+  if (isShownProved) {
     return <Proved record={record} proof={last} onAgain={() => setAgain(true)} />;
   }
   return <ProofFormScreen record={record} onProved={() => setAgain(false)} />;

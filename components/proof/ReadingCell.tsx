@@ -66,7 +66,7 @@ export function ReadingCell({ id, label, entries, lowImpedance, stamp, onChange 
       )}
       <TextInput
         id={id}
-        {...webProps({ 'aria-label': label, 'aria-invalid': stray || undefined })}
+        {...webProps({ 'aria-label': label, 'aria-invalid': stray || undefined, 'data-cell': '' })}
         value={text}
         onChangeText={(next) => onChange(typed(entries, next, { lowImpedance, at: stamp() }))}
         onFocus={() => setFocused(true)}

@@ -7,6 +7,7 @@ import { useUser } from '../api/session';
 import { useLocale } from '../i18n/preferences';
 import { useMessages } from '../i18n/useMessages';
 import { space } from '../theme/tokens';
+import { useToTop } from '../shell/useToTop';
 import { Button, Notice, Screen, StateMark, Text } from '../ui';
 import { FindingPanels } from '../worksheet/parts/FindingPanels';
 import { Questions } from '../worksheet/parts/Questions';
@@ -170,6 +171,7 @@ function Sign({ record, meaning }: { record: WorksheetRecord; meaning: OwnMeanin
   const words = useMessages().signing;
   const user = useUser();
   const [signedAt, setSignedAt] = useState<string>();
+  useToTop(signedAt ?? '');
   const blocked = useBlocked(record, meaning);
   const href = {
     pathname: '/worksheets/[worksheetId]',

@@ -44,14 +44,14 @@ export function StopReasons({ record, first, written }: Props) {
     <View style={styles.box}>
       {stop.error !== null && <Notice live>{describeFault(stop.error, words)}</Notice>}
       {first === undefined && <Text variant="strong">{said.reasons}</Text>}
-      {reasons.map((reason, index) => {
+      {reasons.map((reason) => {
         const word = words.enumerations.stopReason[reason];
         return (
           <Button
             key={reason}
             large
             kind={reason === first ? 'primary' : 'secondary'}
-            icon={reason === first || (first === undefined && index === 0) ? 'refuse' : undefined}
+            icon={reason === first ? 'refuse' : undefined}
             label={word}
             busy={stop.isPending}
             onPress={() => give(written === undefined ? reason : word)}

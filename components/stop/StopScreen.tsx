@@ -2,6 +2,7 @@ import { StyleSheet, View } from 'react-native';
 import type { WorksheetRecord } from '@/shared/record';
 import { useMessages } from '../i18n/useMessages';
 import { space } from '../theme/tokens';
+import { useToTop } from '../shell/useToTop';
 import { Button, Notice, Screen, Text } from '../ui';
 import { WithRecord } from '../worksheet/WithRecord';
 import { Stopped } from './Stopped';
@@ -10,6 +11,7 @@ import { StopReasons } from './StopReasons';
 function Content({ record }: { record: WorksheetRecord }) {
   const words = useMessages();
   const said = words.stop;
+  useToTop(record.state);
   const href = {
     pathname: '/worksheets/[worksheetId]',
     params: { worksheetId: record.id },

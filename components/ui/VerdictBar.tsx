@@ -36,6 +36,7 @@ export function VerdictBar({ tone, mark, word, detail, action, stop }: VerdictBa
         styles.bar,
         {
           paddingLeft: margin,
+          gap: isPhone ? space.xs : space.sm,
           backgroundColor: ground,
           borderTopColor: tone === 'paper' ? colors.ink : colors.paper,
         },
@@ -76,7 +77,6 @@ const styles = StyleSheet.create({
     minHeight: 80,
     flexDirection: 'row',
     alignItems: 'center',
-    gap: space.sm,
     paddingVertical: 8,
     paddingRight: space.sm,
     borderTopWidth: rule.strong,
