@@ -1,6 +1,5 @@
-import path from 'node:path';
 import { parseArgs } from 'node:util';
-import { DATA } from '../paths';
+import { withFiles } from './archiveCommand';
 import { command, StartFault, withDatabase } from './environment';
 
 const HASH = /^[0-9a-f]{64}$/;
@@ -11,19 +10,6 @@ function sealArgument(): string | undefined {
     throw new StartFault('--seal wants the 64 digits of a seal, as the mail to safety has them.');
   }
   return values.seal;
-}
-
-/** The files are part of what was signed; outside production they lie in this checkout. */
-async function withFiles(work: () => Promise<void>): Promise<void> {
-  if (process.env['S3_ENDPOINT'] || process.env['NODE_ENV'] === 'production') return work();
-  const { startS3Fake } = await import('../fakes/s3');
-  const files = await startS3Fake(path.join(DATA, 'files'));
-  process.env['S3_ENDPOINT'] = files.url;
-  try {
-    await work();
-  } finally {
-    await files.stop();
-  }
 }
 
 async function verify(): Promise<void> {
