@@ -1,7 +1,7 @@
 import { useQueryClient } from '@tanstack/react-query';
 import { useSetAtom } from 'jotai';
-import { useCallback, useEffect, useMemo, useRef, useState } from 'react';
-import { FormProvider, useForm, useWatch, type FieldValues } from 'react-hook-form';
+import { memo, useCallback, useDeferredValue, useEffect, useMemo, useRef, useState } from 'react';
+import { FormProvider, useForm, useFormContext, useWatch, type FieldValues } from 'react-hook-form';
 import { SECTIONS, sectionOf } from '@/shared/sections';
 import type { WorksheetRecord } from '@/shared/record';
 import type { WorksheetContent } from '@/shared/worksheet';
@@ -72,17 +72,31 @@ function registerFields(content: WorksheetContent): [string, unknown][] {
 }
 
 /** The worksheet as a form: every keystroke is assessed, kept on the device and sent. */
-export function WorksheetForm({ record, kept, stale }: Props) {
-  const user = useUser();
-  const client = useQueryClient();
-  const sites = useSites();
+export function WorksheetForm(props: Props) {
+  const { record, kept } = props;
   useFirstOpen(record);
-
   const form = useForm<FieldValues>({
     defaultValues: (kept?.raw ?? record.content) as FieldValues,
   });
+  return (
+    <FormProvider {...form}>
+      <LiveForm {...props} />
+    </FormProvider>
+  );
+}
+
+const Layout = memo(WorksheetLayout);
+
+/** Below the form's own context, so that a keystroke redraws this and not every field. */
+function LiveForm({ record, kept, stale }: Props) {
+  const user = useUser();
+  const client = useQueryClient();
+  const sites = useSites();
+  const form = useFormContext<FieldValues>();
   const raw = useWatch({ control: form.control });
-  const { content, faults } = useMemo(() => readContent(raw), [raw]);
+  // Keystrokes come first: the rules and the drawing follow as soon as the device has time.
+  const settled = useDeferredValue(raw);
+  const { content, faults } = useMemo(() => readContent(settled), [settled]);
   const site = sites.find(({ id }) => id === content.job?.siteId);
   const assessment = useAssessment(content, site?.timeZone ?? record.timeZone);
 
@@ -121,38 +135,42 @@ export function WorksheetForm({ record, kept, stale }: Props) {
     }
   }, [form, record.content]);
 
-  const handleTakeTheirs = async () => {
-    await discard();
-    rebase(record.version);
-    form.reset(record.content as FieldValues);
-  };
+  const { status } = draft;
+  const saved = useMemo(
+    () => <DraftState status={status} timeZone={record.timeZone} stale={stale} />,
+    [status, record.timeZone, stale],
+  );
+  const notices = useMemo(() => {
+    const handleTakeTheirs = async () => {
+      await discard();
+      rebase(record.version);
+      form.reset(record.content as FieldValues);
+    };
+    const handleKeepMine = () => {
+      rebase(record.version);
+      change(structuredClone(form.getValues()));
+    };
+    return (
+      <DraftConflict
+        status={status}
+        restored={restored}
+        onSeen={() => setRestored(false)}
+        onTakeTheirs={() => void handleTakeTheirs()}
+        onKeepMine={handleKeepMine}
+      />
+    );
+  }, [status, restored, record, form, discard, rebase, change]);
   return (
-    <FormProvider {...form}>
-      <WorksheetFormProvider
-        record={record}
-        site={site}
-        content={content}
-        assessment={assessment}
-        faults={faults}
-        editable
-      >
-        <WorksheetLayout
-          saved={<DraftState status={draft.status} timeZone={record.timeZone} stale={stale} />}
-          beforeSections={
-            <DraftConflict
-              status={draft.status}
-              restored={restored}
-              onSeen={() => setRestored(false)}
-              onTakeTheirs={() => void handleTakeTheirs()}
-              onKeepMine={() => {
-                rebase(record.version);
-                change(structuredClone(form.getValues()));
-              }}
-            />
-          }
-        />
-      </WorksheetFormProvider>
-    </FormProvider>
+    <WorksheetFormProvider
+      record={record}
+      site={site}
+      content={content}
+      assessment={assessment}
+      faults={faults}
+      editable
+    >
+      <Layout saved={saved} beforeSections={notices} />
+    </WorksheetFormProvider>
   );
 }
 

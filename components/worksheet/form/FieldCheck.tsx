@@ -4,7 +4,7 @@ import { useMessages } from '../../i18n/useMessages';
 import { CheckRow } from '../../ui';
 import { FieldFrame } from './FieldFrame';
 import { fieldId, hintOf, labelOf } from './fieldWords';
-import { useWorksheetForm } from './WorksheetFormContext';
+import { useFieldState } from './WorksheetFormContext';
 
 interface Props {
   name: string;
@@ -16,7 +16,7 @@ interface Props {
 /** Something done or found so. Not ticked is the answer "no", and counts as the worse case. */
 export function FieldCheck({ name, label, note, children }: Props) {
   const words = useMessages();
-  const { findingsOf } = useWorksheetForm();
+  const { findings } = useFieldState(name);
   const { field } = useController({ name });
   return (
     <FieldFrame name={name}>
@@ -26,7 +26,7 @@ export function FieldCheck({ name, label, note, children }: Props) {
         note={note ?? hintOf(words, name)}
         checked={field.value === true}
         onChange={field.onChange}
-        todo={findingsOf(name).some(({ severity }) => severity !== 'caution')}
+        todo={findings.some(({ severity }) => severity !== 'caution')}
       >
         {children}
       </CheckRow>

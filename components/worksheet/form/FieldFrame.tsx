@@ -3,7 +3,7 @@ import { StyleSheet, View } from 'react-native';
 import { space } from '../../theme/tokens';
 import { FindingPanels } from '../parts/FindingPanels';
 import { useShowField } from './shownFields';
-import { useWorksheetForm } from './WorksheetFormContext';
+import { useFieldState } from './WorksheetFormContext';
 
 /**
  * One field and, directly below it, what the rules say about its answer. It
@@ -11,12 +11,12 @@ import { useWorksheetForm } from './WorksheetFormContext';
  * twice and none is lost.
  */
 export function FieldFrame({ name, children }: { name: string; children: ReactNode }) {
-  const { findingsOf } = useWorksheetForm();
+  const { findings } = useFieldState(name);
   useShowField(name);
   return (
     <View style={styles.frame}>
       {children}
-      <FindingPanels findings={findingsOf(name)} />
+      <FindingPanels findings={findings} />
     </View>
   );
 }

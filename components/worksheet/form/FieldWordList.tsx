@@ -4,7 +4,7 @@ import { useMessages } from '../../i18n/useMessages';
 import { TextField } from '../../ui';
 import { FieldFrame } from './FieldFrame';
 import { fieldId, hintOf, labelOf } from './fieldWords';
-import { useWorksheetForm } from './WorksheetFormContext';
+import { useFieldState } from './WorksheetFormContext';
 
 function wordsOf(typed: string): string[] | undefined {
   const parts = typed.split(',').map((part) => part.trim());
@@ -15,7 +15,7 @@ function wordsOf(typed: string): string[] | undefined {
 /** Several short names with commas between: points of work as marked in the ceiling. */
 export function FieldWordList({ name }: { name: string }) {
   const words = useMessages();
-  const { findingsOf } = useWorksheetForm();
+  const { findings } = useFieldState(name);
   const { field } = useController({ name });
   const value: unknown = field.value;
   const [typed, setTyped] = useState(Array.isArray(value) ? value.join(', ') : '');
@@ -25,7 +25,7 @@ export function FieldWordList({ name }: { name: string }) {
         id={fieldId(name)}
         label={labelOf(words, name)}
         hint={hintOf(words, name)}
-        todo={findingsOf(name).some(({ severity }) => severity === 'open')}
+        todo={findings.some(({ severity }) => severity === 'open')}
         exact
         maxLength={400}
         value={typed}

@@ -1,9 +1,17 @@
-import { createContext, useContext, useMemo, type ReactNode } from 'react';
+import {
+  createContext,
+  useContext,
+  useLayoutEffect,
+  useMemo,
+  useState,
+  useSyncExternalStore,
+  type ReactNode,
+} from 'react';
 import type { Assessment, Finding } from '@/hazard';
-import { fieldNameOf } from '@/shared/sections';
 import type { WorksheetRecord } from '@/shared/record';
 import type { Site } from '@/shared/register';
 import type { WorksheetContent } from '@/shared/worksheet';
+import { FieldStore } from './fieldStore';
 import type { FieldFault } from './rawContent';
 
 /** What every section of the worksheet reads; made once for the whole form. */
@@ -14,42 +22,60 @@ export interface WorksheetFormState {
   assessment: Assessment;
   faults: FieldFault[];
   editable: boolean;
-  /** Findings about a field itself, by the form's dotted name. */
-  findingsOf: (name: string) => Finding[];
-  faultOf: (name: string) => FieldFault | undefined;
 }
 
 const WorksheetFormContext = createContext<WorksheetFormState | undefined>(undefined);
+const FieldStoreContext = createContext<FieldStore | undefined>(undefined);
 
-interface Props extends Omit<WorksheetFormState, 'findingsOf' | 'faultOf'> {
+interface Props extends WorksheetFormState {
   children: ReactNode;
 }
 
 export function WorksheetFormProvider({ children, ...given }: Props) {
   const { record, site, content, assessment, faults, editable } = given;
-  const state = useMemo(() => {
-    const byName = new Map<string, Finding[]>();
-    for (const finding of assessment.findings) {
-      const name = fieldNameOf(finding.path);
-      byName.set(name, [...(byName.get(name) ?? []), finding]);
-    }
-    const faultByName = new Map(faults.map((fault) => [fault.name, fault]));
-    return {
-      record,
-      site,
-      content,
-      assessment,
-      faults,
-      editable,
-      findingsOf: (name: string) => byName.get(name) ?? [],
-      faultOf: (name: string) => faultByName.get(name),
-    };
-  }, [record, site, content, assessment, faults, editable]);
-  return <WorksheetFormContext value={state}>{children}</WorksheetFormContext>;
+  const state = useMemo(
+    () => ({ record, site, content, assessment, faults, editable }),
+    [record, site, content, assessment, faults, editable],
+  );
+  const [store] = useState(() => {
+    const made = new FieldStore();
+    made.update(assessment.findings, faults);
+    return made;
+  });
+  useLayoutEffect(() => store.update(assessment.findings, faults), [store, assessment, faults]);
+  return (
+    <FieldStoreContext value={store}>
+      <WorksheetFormContext value={state}>{children}</WorksheetFormContext>
+    </FieldStoreContext>
+  );
 }
 
 export function useWorksheetForm(): WorksheetFormState {
   const state = useContext(WorksheetFormContext);
   if (state === undefined) throw new Error('A section of the worksheet stands outside its form.');
   return state;
+}
+
+export interface FieldState {
+  /** What the rules say about this very field. */
+  findings: readonly Finding[];
+  fault: FieldFault | undefined;
+  /** Some finding about it is open: it still has to be answered. */
+  isOpen: boolean;
+  /** A rule refuses its answer. */
+  isStopped: boolean;
+}
+
+/** The findings and the fault of one field; nothing else of the worksheet is listened to. */
+export function useFieldState(name: string): FieldState {
+  const store = useContext(FieldStoreContext);
+  if (store === undefined) throw new Error('A field of the worksheet stands outside its form.');
+  const findings = useSyncExternalStore(store.subscribe, () => store.findingsOf(name));
+  const fault = useSyncExternalStore(store.subscribe, () => store.faultOf(name));
+  return {
+    findings,
+    fault,
+    isOpen: findings.some(({ severity }) => severity === 'open'),
+    isStopped: findings.some(({ severity }) => severity === 'stop'),
+  };
 }

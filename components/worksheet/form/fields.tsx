@@ -13,10 +13,10 @@ import {
   YesNo,
   type Option,
 } from '../../ui';
-import { useState } from 'react';
+import { memo, useState } from 'react';
 import { FieldFrame } from './FieldFrame';
 import { faultWord, fieldId, hintOf, labelOf, wordOf, type EnumerationGroup } from './fieldWords';
-import { useWorksheetForm } from './WorksheetFormContext';
+import { useFieldState, useWorksheetForm } from './WorksheetFormContext';
 
 interface Named {
   /** Dotted name of the field in the content. */
@@ -29,19 +29,19 @@ interface Named {
 /** What every bound field shares: its words, its value, whether it is still open, its error. */
 function useBound({ name, label, hint }: Named) {
   const words = useMessages();
-  const { findingsOf, faultOf } = useWorksheetForm();
+  const { fault, isOpen, isStopped } = useFieldState(name);
   const { field } = useController({ name });
-  const fault = faultOf(name);
   const value: unknown = field.value;
   return {
     words,
     value,
+    isStopped,
     setValue: (next: unknown) => field.onChange(next),
     common: {
       id: fieldId(name),
       label: label ?? labelOf(words, name),
       hint: hint ?? hintOf(words, name),
-      todo: findingsOf(name).some((finding) => finding.severity === 'open'),
+      todo: isOpen,
       error: fault === undefined ? undefined : faultWord(words, fault.code),
     },
   };
@@ -54,7 +54,7 @@ interface TextProps extends Named {
   maxLength?: number;
 }
 
-export function FieldText({
+function FieldTextBound({
   multiline,
   exact,
   maxLength = multiline === true ? 2000 : 200,
@@ -82,7 +82,7 @@ interface NumberProps extends Named {
   whole?: boolean;
 }
 
-export function FieldNumber({ unit, min = 0, max, whole, ...named }: NumberProps) {
+function FieldNumberBound({ unit, min = 0, max, whole, ...named }: NumberProps) {
   const { value, setValue, common } = useBound(named);
   // NumberField names the fault of its own text; the schema's word for the same would be said twice.
   return (
@@ -107,7 +107,7 @@ export function FieldNumber({ unit, min = 0, max, whole, ...named }: NumberProps
  * A length in the units of the person, kept in inches or feet, unrounded.
  * What cannot be read stays in the field and counts as not answered.
  */
-export function FieldDistance({ keptIn, ...named }: Named & { keptIn: 'in' | 'ft' }) {
+function FieldDistanceBound({ keptIn, ...named }: Named & { keptIn: 'in' | 'ft' }) {
   const { value, setValue, common, words } = useBound(named);
   const units = useUnits();
   const inchesPer = keptIn === 'ft' ? 12 : 1;
@@ -136,10 +136,8 @@ export function FieldDistance({ keptIn, ...named }: Named & { keptIn: 'in' | 'ft
   );
 }
 
-export function FieldYesNo({ yes, no, ...named }: Named & { yes?: string; no?: string }) {
-  const { value, setValue, common } = useBound(named);
-  const { findingsOf } = useWorksheetForm();
-  const stopped = findingsOf(named.name).some((finding) => finding.severity === 'stop');
+function FieldYesNoBound({ yes, no, ...named }: Named & { yes?: string; no?: string }) {
+  const { value, setValue, common, isStopped } = useBound(named);
   const chosen = typeof value === 'boolean' ? value : undefined;
   return (
     <FieldFrame name={named.name}>
@@ -148,7 +146,7 @@ export function FieldYesNo({ yes, no, ...named }: Named & { yes?: string; no?: s
         yes={yes}
         no={no}
         value={chosen}
-        refused={stopped ? chosen : undefined}
+        refused={isStopped ? chosen : undefined}
         onChange={setValue}
         onClear={() => setValue(undefined)}
       />
@@ -172,20 +170,19 @@ function useOptions<T extends string | number>(
   chosen: (value: T) => boolean,
 ): Option<T>[] {
   const words = useMessages();
-  const { findingsOf } = useWorksheetForm();
-  const stopped = findingsOf(name).some((finding) => finding.severity === 'stop');
+  const { isStopped } = useFieldState(name);
   return values.map((value) => ({
     value,
     label:
       wordFor?.(value) ??
       (group === undefined ? String(value) : wordOf(words, group, String(value))),
     note: noteFor?.(value),
-    refused: stopped && chosen(value),
+    refused: isStopped && chosen(value),
   }));
 }
 
 /** One of a few, all in view. */
-export function FieldChoice<T extends string | number>(props: OneOfProps<T>) {
+function FieldChoiceBound<T extends string | number>(props: OneOfProps<T>) {
   const { value, setValue, common } = useBound(props);
   const options = useOptions(props, (option) => option === value);
   const choose = (next: T | undefined) => {
@@ -206,7 +203,7 @@ export function FieldChoice<T extends string | number>(props: OneOfProps<T>) {
 }
 
 /** One of many: folded until pressed. */
-export function FieldSelect<T extends string | number>(props: OneOfProps<T>) {
+function FieldSelectBound<T extends string | number>(props: OneOfProps<T>) {
   const { value, setValue, common } = useBound(props);
   const options = useOptions(props, (option) => option === value);
   const choose = (next: T | undefined) => {
@@ -227,7 +224,7 @@ export function FieldSelect<T extends string | number>(props: OneOfProps<T>) {
 }
 
 /** All that hold; `alone` are answers that exclude every other, such as "none of these". */
-export function FieldMulti<T extends string>({
+function FieldMultiBound<T extends string>({
   alone = [],
   ...props
 }: OneOfProps<T> & { alone?: readonly T[] }) {
@@ -246,7 +243,7 @@ export function FieldMulti<T extends string>({
   );
 }
 
-export function FieldDate(named: Named) {
+function FieldDateBound(named: Named) {
   const { value, setValue, common } = useBound(named);
   return (
     <FieldFrame name={named.name}>
@@ -260,7 +257,7 @@ export function FieldDate(named: Named) {
 }
 
 /** A date and time on the site's wall clock. */
-export function FieldDateTime(named: Named) {
+function FieldDateTimeBound(named: Named) {
   const { value, setValue, common } = useBound(named);
   const { record, site } = useWorksheetForm();
   const timeZone = site?.timeZone ?? record.timeZone;
@@ -277,3 +274,14 @@ export function FieldDateTime(named: Named) {
     </FieldFrame>
   );
 }
+
+/* A keystroke elsewhere leaves these as they are. */
+export const FieldText = memo(FieldTextBound);
+export const FieldNumber = memo(FieldNumberBound);
+export const FieldDistance = memo(FieldDistanceBound);
+export const FieldYesNo = memo(FieldYesNoBound);
+export const FieldDate = memo(FieldDateBound);
+export const FieldDateTime = memo(FieldDateTimeBound);
+export const FieldChoice = memo(FieldChoiceBound) as typeof FieldChoiceBound;
+export const FieldSelect = memo(FieldSelectBound) as typeof FieldSelectBound;
+export const FieldMulti = memo(FieldMultiBound) as typeof FieldMultiBound;

@@ -12,7 +12,7 @@ import { FieldCheck } from '../form/FieldCheck';
 import { FieldSelect, FieldText } from '../form/fields';
 import { useShowField } from '../form/shownFields';
 import { wordOf } from '../form/fieldWords';
-import { useWorksheetForm } from '../form/WorksheetFormContext';
+import { useFieldState, useWorksheetForm } from '../form/WorksheetFormContext';
 import { FindingPanels } from '../parts/FindingPanels';
 import { SectionFrame } from '../parts/SectionFrame';
 import { Suggestions } from '../parts/Suggestions';
@@ -48,7 +48,8 @@ function Qualification({
 function Member({ index, onRemove }: { index: number; onRemove: () => void }) {
   const words = useMessages().worksheet;
   const { colors } = useTheme();
-  const { content, record, findingsOf } = useWorksheetForm();
+  const { content, record } = useWorksheetForm();
+  const { findings } = useFieldState(`crew.${index}`);
   const member = content.crew?.[index] ?? {};
   const at = (field: string) => `crew.${index}.${field}`;
   const own = member.userId === record.leadId;
@@ -60,7 +61,7 @@ function Member({ index, onRemove }: { index: number; onRemove: () => void }) {
         <Qualification qualified={member.qualified} through={member.qualifiedThrough} />
       </View>
       {member.userId === undefined && <FieldText name={at('name')} />}
-      <FindingPanels findings={findingsOf(`crew.${index}`)} />
+      <FindingPanels findings={findings} />
       <FieldSelect name={at('closest')} values={CLOSEST} group="closest" />
       <View>
         <FieldCheck name={at('lead')} />
@@ -83,9 +84,9 @@ function Member({ index, onRemove }: { index: number; onRemove: () => void }) {
 }
 
 function FieldFindings({ name }: { name: string }) {
-  const { findingsOf } = useWorksheetForm();
+  const { findings } = useFieldState(name);
   useShowField(name);
-  return <FindingPanels findings={findingsOf(name)} />;
+  return <FindingPanels findings={findings} />;
 }
 
 /** A person of the site's register; without an account nobody can sign. */
@@ -124,14 +125,15 @@ function AddMember({ onAdd }: { onAdd: (person: Person) => void }) {
 
 function Topics() {
   const words = useMessages();
-  const { content, findingsOf, assessment } = useWorksheetForm();
+  const { content, assessment } = useWorksheetForm();
+  const { findings } = useFieldState('briefing.topics');
   const { setValue } = useFormContext();
   useShowField('briefing.topics');
   const covered = content.briefing?.topics ?? [];
   const asked = BRIEFING_TOPICS.filter(
     (topic) => topic !== 'permit' || assessment.permit.required || covered.includes(topic),
   );
-  const others = findingsOf('briefing.topics').filter(({ severity }) => severity !== 'open');
+  const others = findings.filter(({ severity }) => severity !== 'open');
   return (
     <View>
       <Text variant="strong">{words.fields['briefing.topics']}</Text>

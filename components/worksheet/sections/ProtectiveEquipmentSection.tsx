@@ -10,7 +10,7 @@ import { CheckRow, Citation, Select, StateMark, Text } from '../../ui';
 import { FieldCheck } from '../form/FieldCheck';
 import { FieldChoice, FieldDate } from '../form/fields';
 import { useShowField } from '../form/shownFields';
-import { useWorksheetForm } from '../form/WorksheetFormContext';
+import { useFieldState, useWorksheetForm } from '../form/WorksheetFormContext';
 import { FindingPanels } from '../parts/FindingPanels';
 import { SectionFacts } from '../parts/SectionFacts';
 import { SectionFrame } from '../parts/SectionFrame';
@@ -97,11 +97,12 @@ function RequiredItems() {
 
 function ItemRow({ item }: { item: RequiredItem }) {
   const locale = useLocale();
-  const { content, findingsOf } = useWorksheetForm();
+  const { content } = useWorksheetForm();
+  const { findings } = useFieldState('protectiveEquipment.ready');
   const { setValue } = useFormContext();
   const ready = content.protectiveEquipment?.ready ?? [];
   const checked = ready.includes(item.id);
-  const others = findingsOf('protectiveEquipment.ready').filter(
+  const others = findings.filter(
     ({ severity, params }) => severity !== 'open' && params.item === item.id,
   );
   return (

@@ -7,7 +7,7 @@ import { Button, Text } from '../../ui';
 import { FieldChoice, FieldMulti, FieldText } from '../form/fields';
 import { useSetField } from '../form/useSetField';
 import { useShowField } from '../form/shownFields';
-import { useWorksheetForm } from '../form/WorksheetFormContext';
+import { useFieldState, useWorksheetForm } from '../form/WorksheetFormContext';
 import { FindingPanels } from '../parts/FindingPanels';
 import { SectionFrame } from '../parts/SectionFrame';
 import { Suggestions } from '../parts/Suggestions';
@@ -34,9 +34,9 @@ function SourcesSummary() {
 
 /** Findings about the list itself: none listed, one that the answers ask for is missing. */
 function ListFindings() {
-  const { findingsOf } = useWorksheetForm();
+  const { findings } = useFieldState('sources');
   useShowField('sources');
-  return <FindingPanels findings={findingsOf('sources')} />;
+  return <FindingPanels findings={findings} />;
 }
 
 function Egress() {

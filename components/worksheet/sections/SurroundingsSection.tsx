@@ -17,7 +17,7 @@ import { FieldCheck } from '../form/FieldCheck';
 import { FieldChoice, FieldDistance, FieldSelect, FieldText, FieldYesNo } from '../form/fields';
 import { useShowField } from '../form/shownFields';
 import { wordOf } from '../form/fieldWords';
-import { useWorksheetForm } from '../form/WorksheetFormContext';
+import { useFieldState, useWorksheetForm } from '../form/WorksheetFormContext';
 import { FindingPanels } from '../parts/FindingPanels';
 import { SectionFrame } from '../parts/SectionFrame';
 
@@ -104,9 +104,9 @@ function Surface({ index, onRemove }: { index: number; onRemove: () => void }) {
 /** Findings about a whole row of a list. */
 function ElementFindings({ path }: { path: string }) {
   const name = path.slice(1).replaceAll('/', '.');
-  const { findingsOf } = useWorksheetForm();
+  const { findings } = useFieldState(name);
   useShowField(name);
-  return <FindingPanels findings={findingsOf(name)} />;
+  return <FindingPanels findings={findings} />;
 }
 
 function GroundedSurfaces() {
