@@ -143,7 +143,6 @@ export function documentDefinition(input: PdfInput, language: PdfLanguage): TDoc
       fontSize: SIZE.body,
       lineHeight: 1.06,
       color: COLORS.ink,
-      fontFeatures: ['tnum'],
     },
     images: photoImages(context),
     header: (page) => header(context, page),

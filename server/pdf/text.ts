@@ -7,7 +7,7 @@ interface Face {
 }
 
 /** What stands for a character that the typeface lacks; PDF/A admits no empty glyph. */
-export const MISSING = '\uFFFD';
+export const MISSING = '◊';
 /** A word longer than this may be broken anywhere: it would not fit a column. */
 const LONGEST_WORD = 22;
 

@@ -8,7 +8,7 @@ export const pdf = {
     "A qualified person decides. Local codes, the employer's program and the equipment's own label come first. This worksheet gives no permission to work.",
   memoryMark: '‡ From memory, to be checked against a licensed copy.',
   missingLetters:
-    '\uFFFD stands for a character that this typeface lacks; the attached worksheet.json holds it.',
+    '◊ stands for a character that this typeface lacks; the attached worksheet.json holds it.',
   hash: 'SHA-256',
   checkTitle: 'Check this record',
   checkText: 'Scan, or open',

@@ -11,7 +11,7 @@ export const pdf: Words<typeof english> = {
     'Decide una persona calificada. Los códigos locales, el programa de la empresa y la etiqueta del propio equipo van primero. Esta hoja no da permiso para trabajar.',
   memoryMark: '‡ De memoria, por verificar con una copia con licencia.',
   missingLetters:
-    '\uFFFD está en lugar de un carácter que esta letra no tiene; el archivo adjunto worksheet.json lo conserva.',
+    '◊ está en lugar de un carácter que esta letra no tiene; el archivo adjunto worksheet.json lo conserva.',
   hash: 'SHA-256',
   checkTitle: 'Verifique este registro',
   checkText: 'Escanee, o abra',
