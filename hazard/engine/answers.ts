@@ -1,35 +1,7 @@
 import * as E from '../enumerations';
-import { readDate, readMoment } from './moment';
-import {
-  field,
-  fields,
-  notEmpty,
-  readFigure,
-  readFigures,
-  readFlag,
-  readMany,
-  readObjects,
-  readOne,
-  readPositive,
-  readSigned,
-  readText,
-  readTexts,
-  readWhole,
-} from './read';
+import { section, text, flag, figure, positive, date, moment, texts, one, many } from './answer';
+import { field, fields, notEmpty, readFigures, readObjects, readWhole } from './read';
 import type { Fields } from './read';
-
-const section = (of: Fields, key: string): Fields => fields(field(of, key));
-const text = (of: Fields, key: string) => readText(field(of, key));
-const flag = (of: Fields, key: string) => readFlag(field(of, key));
-const figure = (of: Fields, key: string) => readFigure(field(of, key));
-const positive = (of: Fields, key: string) => readPositive(field(of, key));
-const date = (of: Fields, key: string) => readDate(field(of, key));
-const moment = (of: Fields, key: string) => readMoment(field(of, key));
-const texts = (of: Fields, key: string) => readTexts(field(of, key));
-const one = <T extends string | number>(of: Fields, key: string, admitted: readonly T[]) =>
-  readOne(field(of, key), admitted);
-const many = <T extends string>(of: Fields, key: string, admitted: readonly T[]) =>
-  readMany(field(of, key), admitted);
 
 /** A job has at most this many points of work; a sheet for more is not a sheet. */
 const MOST_POINTS_OF_WORK = 40;
@@ -271,56 +243,8 @@ export function readAnswers(content: unknown) {
   };
 }
 
-function readReading(reading: Fields) {
-  return {
-    point: text(reading, 'point')?.trim(),
-    from: one(reading, 'from', E.CONDUCTORS),
-    to: one(reading, 'to', E.CONDUCTORS),
-    volts: readSigned(field(reading, 'volts')),
-    /** Not answered is alternating current. */
-    current: one(reading, 'current', E.CURRENTS) ?? 'ac',
-    lowImpedance: flag(reading, 'lowImpedance'),
-    sourceId: text(reading, 'sourceId'),
-    at: moment(reading, 'at'),
-  };
-}
-
-/** Reads what the lead recorded to prove the circuit dead, whatever it is. */
-export function readProof(proof: unknown) {
-  const root = fields(proof);
-  return {
-    openedSources: texts(root, 'openedSources'),
-    controlsOperated: flag(root, 'controlsOperated'),
-    provedBefore: flag(root, 'provedBefore'),
-    provedAfter: flag(root, 'provedAfter'),
-    otherLiveParts: one(root, 'otherLiveParts', E.OTHER_LIVE_PARTS),
-    neutralAmperes: figure(root, 'neutralAmperes'),
-    storedEnergy: one(root, 'storedEnergy', E.STORED_ENERGY),
-    readings: readObjects(field(root, 'readings'), readReading),
-  };
-}
-
-/** Reads how the job ended, whatever it is. */
-export function readCloseOut(closeOut: unknown) {
-  const root = fields(closeOut);
-  return {
-    toolsClear: flag(root, 'toolsClear'),
-    peopleWarned: flag(root, 'peopleWarned'),
-    peopleClear: flag(root, 'peopleClear'),
-    restored: flag(root, 'restored'),
-    coversOn: flag(root, 'coversOn'),
-    locksRemoved: flag(root, 'locksRemoved'),
-    faultRepaired: flag(root, 'faultRepaired'),
-    egressTestedSeconds: figure(root, 'egressTestedSeconds'),
-    egressLit: flag(root, 'egressLit'),
-  };
-}
-
 export type Answers = ReturnType<typeof readAnswers>;
-export type ProofAnswers = ReturnType<typeof readProof>;
-export type CloseOutAnswers = ReturnType<typeof readCloseOut>;
 export type SourceAnswers = ReturnType<typeof readSource>;
 export type CrewAnswers = ReturnType<typeof readCrewMember>;
 export type GloveAnswers = ReturnType<typeof readGloves>;
 export type LabelAnswers = ReturnType<typeof readLabel>;
-export type ReadingAnswers = ReturnType<typeof readReading>;

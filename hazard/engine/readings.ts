@@ -1,8 +1,9 @@
 import type { Conductor } from '../enumerations';
-import type { Answers, ProofAnswers, ReadingAnswers } from './answers';
+import type { Answers } from './answers';
 import { conductorSetsOf, pairName } from './conductors';
 import type { ConductorPair, ConductorSet } from './conductors';
 import type { Moment } from './moment';
+import type { ProofAnswers, ReadingAnswers } from './recordAnswers';
 import type { Source } from './sources';
 import type { Voltage } from './voltage';
 

@@ -11,6 +11,7 @@ import { circuitVoltageIsOfSystem } from './circuitVoltageIsOfSystem';
 import { clothingIsRated } from './clothingIsRated';
 import { conductiveArticlesAreOff } from './conductiveArticlesAreOff';
 import { conductorColorsFitSystem } from './conductorColorsFitSystem';
+import { constructionIsPointedOut } from './constructionIsPointedOut';
 import { contactInstrumentIsUsed } from './contactInstrumentIsUsed';
 import { controlsAreListed } from './controlsAreListed';
 import { controlsAreOperated } from './controlsAreOperated';
@@ -162,6 +163,7 @@ export const rules: readonly Rule[] = Object.freeze([
   windowIsNotOver,
   locksAreHandedOver,
   lampholdersArePointedOut,
+  constructionIsPointedOut,
   placeIsCleared,
   locksAreRemoved,
   coversAreOn,

@@ -298,6 +298,22 @@ describe('an arc flash', () => {
   });
 });
 
+describe('job.construction', () => {
+  it.each<[Base, unknown, string[]]>([
+    ['O', true, ['caution /job/construction']],
+    ['T', true, ['caution /job/construction']],
+    ['W work', true, ['caution /job/construction']],
+    ['O', false, []],
+    ['O', gone, []],
+    ['O', 'yes', []],
+    ['O close', true, []],
+  ])('%s, %s: %j', (base, construction, expected) => {
+    const result = assessBase(base, { 'job/construction': construction });
+    expect(found(result, 'job.construction')).toEqual(expected);
+    expect(result.verdict).toBe('ready');
+  });
+});
+
 describe('an escort whose qualification is not settled', () => {
   it('leaves the escort open', () => {
     const escorted = { 'crew/1/closest': 'limited with escort' };

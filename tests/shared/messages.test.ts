@@ -152,7 +152,7 @@ describe('coverage of every value', () => {
   });
 
   it('says why a voltage entered the table, and names each row', () => {
-    expect(Object.keys(en.common.boundaries.because)).toEqual([...hazard.SHOCK_VOLTS_REASONS]);
+    expect(Object.keys(en.common.boundaries.because)).toEqual([...hazard.BOUNDARY_VOLTS_REASONS]);
     for (const current of ['ac', 'dc'] as const) {
       for (const volts of [12, 50, 120, 208, 277, 480, 900, 2000]) {
         const found = hazard.lookupShockBoundaries({ current, volts });

@@ -78,6 +78,7 @@ export const ORDER = [
   'window.over',
   'window.shift-change',
   'lamp.line-voltage-lampholder',
+  'job.construction',
   'closeout.not-cleared',
   'closeout.locks-left',
   'closeout.covers-off',

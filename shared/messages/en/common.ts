@@ -121,6 +121,8 @@ export const common = {
         'Above 250 V to ground a single phase counts phase-to-phase.',
       'one circuit': 'Only this one circuit is exposed: its own voltage.',
       'circuit not of system': 'The circuit voltage is not of this system: the larger counts.',
+      'several systems': 'Two systems meet here: the higher phase-to-phase voltage counts.',
+      'below 50 V': 'Nothing of 50 V or more is exposed: the voltage worked on.',
     },
     rows: {
       'below 50 V': 'Below 50 V',

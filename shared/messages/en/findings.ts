@@ -480,6 +480,11 @@ export const findings = {
     caution:
       'Lampholders of double-ended tubes may be at line voltage or several hundred volts, and a wrong tube may shock or burst. Read the marking; power off for lamps too.',
   },
+  'job.construction': {
+    title: 'Construction rules apply',
+    caution:
+      'New and renovation work is construction (29 CFR 1926): tag the deenergized circuit at every point where it can be energized. State plans and local codes may ask more.',
+  },
   'closeout.not-cleared': {
     title: 'Not clear to restore',
     stop: '{field} No. Clear the tools, warn everybody, see that everybody is clear, in this order, before any power returns.',

@@ -126,6 +126,8 @@ export const common: Words<typeof en> = {
         'Arriba de 250 V a tierra, una sola fase cuenta como entre fases.',
       'one circuit': 'Solo este circuito queda expuesto: su propia tensión.',
       'circuit not of system': 'La tensión del circuito no es de este sistema: cuenta la mayor.',
+      'several systems': 'Aquí se juntan dos sistemas: cuenta la tensión entre fases más alta.',
+      'below 50 V': 'No queda expuesto nada de 50 V o más: la tensión en que se trabaja.',
     },
     rows: {
       'below 50 V': 'Abajo de 50 V',

@@ -478,6 +478,11 @@ export const findings: Words<typeof en> = {
     caution:
       'Los portalámparas de tubos de dos extremos pueden tener tensión de línea o varios cientos de volts, y un tubo equivocado puede dar choque o reventar. Lea el marcado; corte la energía también para lámparas.',
   },
+  'job.construction': {
+    title: 'Aplican reglas de construcción',
+    caution:
+      'La obra nueva y la remodelación son construcción (29 CFR 1926): etiquete el circuito sin energía en cada punto donde se pueda energizar. Los planes estatales y códigos locales pueden pedir más.',
+  },
   'closeout.not-cleared': {
     title: 'No está libre para restablecer',
     stop: '{field} No. Retire herramientas, avise a todos y vea que todos estén lejos, en ese orden, antes de que vuelva la energía.',
