@@ -4,13 +4,15 @@ import { space } from '../theme/tokens';
 const style: CSSProperties = { display: 'flex', flexDirection: 'column', gap: space.md, margin: 0 };
 
 interface Props {
+  /** Only where no heading names the form. */
+  label?: string;
   children: ReactNode;
 }
 
 /** A form for password managers and screen readers. Enter is the fields' own; the page is never sent. */
-export function Form({ children }: Props) {
+export function Form({ label, children }: Props) {
   return (
-    <form noValidate style={style} onSubmit={(event) => event.preventDefault()}>
+    <form aria-label={label} noValidate style={style} onSubmit={(event) => event.preventDefault()}>
       {children}
     </form>
   );

@@ -9,6 +9,8 @@ import { webProps } from './webProps';
 export interface Column<Row> {
   key: string;
   label: string;
+  /** Drawn instead of the label, which a screen reader still says: a ruler. */
+  head?: ReactNode;
   /** px; without it the column takes its share of what is left. */
   width?: number;
   share?: number;
@@ -44,11 +46,14 @@ function HeadCell<Row>({ column }: { column: Column<Row> }) {
   return (
     <View
       role="columnheader"
-      {...webProps({ 'aria-sort': column.sorted })}
+      {...webProps({
+        'aria-sort': column.sorted,
+        'aria-label': column.head === undefined ? undefined : column.label,
+      })}
       style={[styles.cell, sized(column)]}
     >
       {column.onSort === undefined ? (
-        label
+        (column.head ?? label)
       ) : (
         <Pressable role="button" onPress={column.onSort} style={styles.sort}>
           <Text variant="label" weight="600" color="blue">
