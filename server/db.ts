@@ -34,7 +34,10 @@ export function transact<T>(work: (transaction: Transaction) => Promise<T>): Pro
   );
 }
 
-/** Ends every connection of this process. */
+let closing: Promise<unknown> | undefined;
+
+/** Ends every connection of this process; repeating it does nothing. */
 export async function closeDatabase(): Promise<void> {
-  await Promise.all([sequelize.close(), pool.end()]);
+  closing ??= Promise.all([sequelize.close(), pool.end()]);
+  await closing;
 }

@@ -25,6 +25,8 @@ export async function startServer(): Promise<RunningServer> {
   });
   await startWorker();
   const { port } = server.address() as AddressInfo;
+  // Port 0 asked for a free one; links in mail need the one that it became.
+  env.PORT = port;
   return {
     port,
     async stop() {

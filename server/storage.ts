@@ -8,6 +8,9 @@ import {
 } from '@aws-sdk/client-s3';
 import { env } from './env';
 
+// The version of Node.js is chosen in package.json; a notice at every start helps nobody.
+process.env['AWS_SDK_JS_NODE_VERSION_SUPPORT_WARNING_DISABLED'] ??= 'true';
+
 let client: S3Client | undefined;
 
 function s3(): S3Client {

@@ -1,5 +1,6 @@
 import { Router } from 'express';
 import { sequelize } from '../db';
+import { openApiDocument } from '../openapi/document';
 
 export const healthRouter = Router();
 
@@ -11,4 +12,8 @@ healthRouter.get('/health', async (_req, res) => {
   );
   const up = database === 'up';
   res.status(up ? 200 : 503).json({ status: up ? 'ok' : 'unavailable', database });
+});
+
+healthRouter.get('/openapi.json', (_req, res) => {
+  res.json(openApiDocument());
 });

@@ -12,7 +12,7 @@ const files = mkdtempSync(path.join(tmpdir(), 'wideberth-files-'));
 Object.assign(process.env, {
   NODE_ENV: 'test',
   HOST: '127.0.0.1',
-  PORT: '3000',
+  PORT: '0',
   DATABASE_URL: database.runtimeUrl,
   DATABASE_OWNER_URL: database.ownerUrl,
   SESSION_SECRET: 'only for tests, and long enough for them',
