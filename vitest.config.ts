@@ -71,6 +71,7 @@ export default defineConfig({
           include: ['tests/e2e/**/*.test.ts'],
           environment: 'node',
           globalSetup: ['tests/support/globalSetup.ts'],
+          setupFiles: ['tests/support/serverSetup.ts'],
           testTimeout: 300_000,
           hookTimeout: 300_000,
           fileParallelism: false,

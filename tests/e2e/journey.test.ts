@@ -1,0 +1,257 @@
+import type { Browser, Page } from 'playwright-core';
+import { afterAll, beforeAll, describe, expect, it } from 'vitest';
+import {
+  drawSignature,
+  keepPicture,
+  launchBrowser,
+  newScreen,
+  pick,
+  select,
+  signInAs,
+  tick,
+  type,
+} from '../support/browser';
+import { startWebServer, type WebServer } from '../support/webServer';
+
+const PASSWORD = 'wide-berth-demo';
+const LEAD = { email: 'lead@wideberth.example', pin: '246810', name: 'Renata Quillfeather' };
+const HELPER = { pin: '135792', name: 'Teo Barrancas' };
+const SUPERVISOR = { email: 'supervisor@wideberth.example', pin: '864209' };
+
+let server: WebServer;
+let browser: Browser;
+
+beforeAll(async () => {
+  server = await startWebServer();
+  browser = await launchBrowser();
+});
+afterAll(async () => {
+  await browser?.close();
+  await server?.stop();
+});
+
+const section = (page: Page, name: string) =>
+  page.getByRole('region', { name, exact: false }).first();
+
+async function fillJob(page: Page): Promise<void> {
+  const job = section(page, 'Job');
+  await select(job, 'Site', 'Ashgrove Commons');
+  await type(job, 'Area', 'Level 2 corridor');
+  await type(job, 'Equipment', 'LED luminaires C1, C3, C5, C6');
+  await select(job, 'Task', 'Replace a driver or ballast');
+  await select(job, 'Lamps', /Any other/);
+  await type(job, 'What will be done', 'Replace four LED drivers in the level 2 corridor.');
+  const now = new Date();
+  const day = new Intl.DateTimeFormat('en-CA', { timeZone: 'America/Chicago' }).format(now);
+  const clock = (minutes: number) =>
+    new Intl.DateTimeFormat('en-GB', {
+      timeZone: 'America/Chicago',
+      hour: '2-digit',
+      minute: '2-digit',
+    }).format(new Date(now.getTime() + minutes * 60_000));
+  const later = new Date(now.getTime() + 4 * 3_600_000);
+  const laterDay = new Intl.DateTimeFormat('en-CA', { timeZone: 'America/Chicago' }).format(later);
+  await type(job, 'Work starts, Date', day);
+  await type(job, 'Work starts, Time', clock(-1));
+  await type(job, 'Work ends, Date', laterDay);
+  await type(job, 'Work ends, Time', clock(240));
+  await type(job, 'Points of work', '4');
+  await pick(job, 'Are people in the building?', 'Yes');
+  await pick(job, 'Does the work run into another shift?', 'No');
+  await tick(job, 'None of these');
+}
+
+async function fillSupply(page: Page): Promise<void> {
+  const supply = section(page, 'Supply');
+  await select(supply, 'System', /480Y\/277/);
+  await pick(supply, 'Circuit voltage', /277/);
+  await type(supply, 'Panel', 'LP-2');
+  await type(supply, 'Circuit', '14');
+  await tick(supply, /two or more places/);
+  await pick(supply, 'Is the neutral shared?', /^No,/);
+  await select(supply, 'Has the breaker tripped?', /^No$/);
+  await pick(supply, 'Is anything damaged?', 'No');
+  for (const [label, volts] of [
+    ['A to B', '481'],
+    ['B to C', '479'],
+    ['C to A', '480'],
+    ['A to N', '277'],
+    ['B to N', '278'],
+    ['C to N', '277'],
+  ] as const) {
+    await type(supply, label, volts);
+  }
+  await type(supply, 'Load on the circuit', '728');
+}
+
+interface Way {
+  kind: RegExp;
+  from: string;
+  openedAt: string;
+  held: string;
+  lock?: string;
+  same?: RegExp;
+  points?: string;
+}
+
+async function addWay(page: Page, way: Way): Promise<void> {
+  const ways = section(page, 'Ways it can be live');
+  await ways.getByRole('button', { name: 'Add a way it can be live' }).click();
+  await select(ways, 'Kind of way', way.kind);
+  await type(ways, 'Where it comes from', way.from);
+  if (way.same !== undefined) await select(ways, 'Same conductors as', way.same);
+  if (way.points !== undefined) await type(ways, 'Points of work that it reaches', way.points);
+  await select(ways, 'Opened at', way.openedAt);
+  await select(ways, 'Held open by', way.held);
+  if (way.lock !== undefined) await type(ways, 'Lock number', way.lock);
+  await select(ways, 'Who opens and locks it', new RegExp(LEAD.name));
+  if (way.lock !== undefined) await tick(ways, new RegExp(LEAD.name));
+  // Folds the way, so that the next one's fields are the only ones on the screen.
+  await ways.locator('[aria-expanded="true"][aria-label^="3."]').last().click();
+}
+
+async function fillSources(page: Page, battery: string): Promise<void> {
+  const ways = section(page, 'Ways it can be live');
+  await tick(ways, 'Battery units');
+  await pick(ways, 'Does it reach this equipment?', /This equipment/i);
+  await type(ways, 'Who runs the building and was told', 'Building control room');
+  await type(
+    ways,
+    'What stands in until it is restored',
+    'Two battery work lights, corridor closed',
+  );
+  await addWay(page, {
+    kind: /^Normal/,
+    from: 'LP-2 circuit 14',
+    openedAt: 'Breaker',
+    held: 'Lock and tag',
+    lock: '0417',
+  });
+  await addWay(page, {
+    kind: /^Traveler/,
+    from: 'Three-way switch at the stair',
+    same: /^3\.1/,
+    openedAt: 'Breaker',
+    held: 'Lock and tag',
+    lock: '0417',
+  });
+  for (const point of ['C3', 'C6']) {
+    await addWay(page, {
+      kind: /^Battery unit/,
+      from: `Inside luminaire ${point}`,
+      points: point,
+      openedAt: point === 'C6' ? battery : 'Battery connector',
+      held: 'Exclusive control',
+    });
+  }
+}
+
+async function fillTheRest(page: Page): Promise<void> {
+  await pick(section(page, 'Off or energized'), 'Off or energized', /^Off/);
+
+  const test = section(page, 'Test for absence of voltage');
+  await pick(test, 'Instrument', 'Contact tester');
+  await pick(test, 'Measurement category', 'CAT III');
+  await type(test, 'Rated for', '1000');
+  await select(test, 'Who tests', new RegExp(LEAD.name));
+  await tick(test, /instrument, leads and probes/);
+
+  const boundaries = section(page, 'Approach boundaries');
+  await pick(boundaries, 'What is exposed', /two-wire circuit/);
+  await pick(boundaries, 'Can a conductor swing toward someone?', /^No/);
+
+  const arc = section(page, 'Arc flash');
+  await select(arc, 'Kind of equipment', /^Luminaire/);
+  for (const condition of await arc.getByRole('checkbox').all()) await condition.click();
+  await type(arc, 'Working distance, face and chest to the part', '18 in');
+  await pick(arc, 'No arc flash label on the equipment', 'Yes');
+  await type(arc, 'Available fault current', '12');
+  await type(arc, 'Clearing time', '0.025');
+  await type(arc, 'Lowest arc rating worn', '8');
+
+  const equipment = section(page, 'Protective equipment');
+  await select(equipment, 'Gloves from the register', /AC-0-117/);
+
+  const around = section(page, 'Surroundings');
+  await around.getByRole('button', { name: 'Add a grounded surface' }).click();
+  await select(around, 'Grounded surface', 'Ceiling grid');
+  await pick(around, 'Is it in reach?', 'Yes');
+  await tick(around, /covered with insulation/);
+  await select(around, 'Where the work is done from', /^Stepladder/);
+  await type(around, 'Ceiling height', '9 ft');
+  await select(around, 'Ladder material', 'Fiberglass');
+  await type(around, 'Ladder size', '6 ft');
+  await type(around, 'Height of the step stood on', '3 ft');
+  await pick(around, 'Is the ladder locked open, level and kept from doors and traffic?', 'Yes');
+  await pick(around, 'Asbestos or PCBs', 'No suspect material');
+  await pick(around, 'Is there enough light with the circuit off?', 'Yes');
+  await pick(around, 'Is anything wet?', 'No');
+  await pick(around, 'Are rings, watch, chains and metal frames off?', 'Yes');
+  await pick(around, 'May people walk up to the work?', 'Yes');
+  await type(around, 'Barricade at', '5 ft');
+  await pick(around, 'Does an attendant keep people out?', 'No');
+  await pick(around, 'Is the work outdoors?', 'No');
+}
+
+async function fillCrew(page: Page): Promise<void> {
+  const crew = section(page, 'Crew and briefing');
+  await select(crew, 'How close they come until it is proved dead', /restricted/i);
+  for (const line of [/work on the circuit/, /wear arc-rated/, /trained in release/])
+    await tick(crew, line);
+  await select(crew, 'Add a person of this site', new RegExp(HELPER.name));
+  const closest = crew.getByRole('button', { name: /^How close they come/ }).nth(1);
+  await closest.click();
+  await pick(crew, 'How close they come until it is proved dead', /Outside all/i);
+}
+
+async function finish(page: Page): Promise<void> {
+  const equipment = section(page, 'Protective equipment');
+  for (const line of await equipment.getByRole('checkbox', { checked: false }).all())
+    await line.click();
+  const crew = section(page, 'Crew and briefing');
+  for (const [label, value] of [
+    ['Who to call', '911, then 555-0142'],
+    ['Rescue', 'Second person with the insulated hook'],
+    ['First aid', 'Control room'],
+    ['AED place', 'East lobby'],
+  ] as const) {
+    await type(crew, label, value);
+  }
+  const topics = crew.getByRole('checkbox', {
+    checked: false,
+    name: /hazards|boundar|tasks|procedures|precautions|controls|equipment|close|plan|refusing/i,
+  });
+  while ((await topics.count()) > 0) await topics.first().click();
+}
+
+describe('four LED drivers in a level 2 corridor, 480Y/277, LP-2/14', () => {
+  it('goes from sign-in to a closed record and its PDF through the interface alone', async () => {
+    const { page, faults } = await newScreen(browser, server.base);
+    await signInAs(page, LEAD.email, PASSWORD);
+    await page
+      .getByRole('link', { name: 'New worksheet' })
+      .or(page.getByRole('button', { name: 'New worksheet' }))
+      .click();
+    await page.getByText('Ways it can be live').first().waitFor();
+
+    await fillJob(page);
+    await fillSupply(page);
+    await fillCrew(page);
+    await fillSources(page, 'None');
+    await keepPicture(page, 'worksheet-stop');
+    // NFPA 70E-2024 Table 130.4(E)(a): 480 V, fixed 3 ft 6 in, restricted 1 ft 0 in.
+    await fillTheRest(page);
+    const strip = page.getByRole('button', { name: /Limited/ }).first();
+    await expect.poll(() => strip.getAttribute('aria-label')).toMatch(/3\sft\s6\sin/);
+    expect(await strip.getAttribute('aria-label')).toMatch(/1\sft\s0\sin/);
+    expect(await strip.getAttribute('aria-label')).toMatch(/5\sft\s0\sin/);
+
+    // The battery unit that is still connected stops the worksheet, with its reason and source.
+    await expect
+      .poll(() => page.getByRole('region', { name: /^Stop: / }).count())
+      .toBeGreaterThan(0);
+    expect(faults).toEqual([]);
+    await finish(page);
+    await keepPicture(page, 'worksheet-finished');
+  });
+});
