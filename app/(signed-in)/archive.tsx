@@ -1,0 +1,5 @@
+import { ArchiveScreen } from '@/components/archive/ArchiveScreen';
+
+export default function ArchiveRoute() {
+  return <ArchiveScreen />;
+}
