@@ -30,6 +30,8 @@ const envSchema = z.object({
   SESSION_SECRET: z.string().min(32),
   TRUST_PROXY: flagOrHops,
   LOG_LEVEL: z.enum(['fatal', 'error', 'warn', 'info', 'debug', 'silent']).default('info'),
+  /** A file for the log lines; standard output without one. */
+  LOG_FILE: z.string().optional(),
   /** Cost of argon2id. Only tests lower it; the defaults are the library's own. */
   ARGON2_MEMORY_KIB: z.coerce.number().int().min(8).default(19_456),
   ARGON2_PASSES: z.coerce.number().int().min(1).default(2),

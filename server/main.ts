@@ -7,6 +7,9 @@ import { stopBoss } from './jobs';
 import { logger } from './log';
 import { startWorker } from './worker';
 
+/** A client that never finishes its request does not hold up the end for longer than this. */
+const DRAIN_MILLISECONDS = 10_000;
+
 export interface RunningServer {
   port: number;
   /** Requests in flight finish, then every connection closes. */
@@ -34,8 +37,10 @@ export async function startServer(): Promise<RunningServer> {
       server.closeIdleConnections();
       // Keep-alive connections would hold the server open long after their last answer.
       const sweep = setInterval(() => server.closeIdleConnections(), 100);
+      const deadline = setTimeout(() => server.closeAllConnections(), DRAIN_MILLISECONDS);
       await closed;
       clearInterval(sweep);
+      clearTimeout(deadline);
       await stopBoss();
       await closeDatabase();
       logger.info('stopped');

@@ -7,7 +7,15 @@ import { requestIdOf } from './requestId';
 function routePattern(req: Request): string {
   const route: unknown = req.route;
   if (typeof route !== 'object' || route === null || !('path' in route)) return 'unmatched';
-  return `${req.baseUrl}${String(route.path)}`;
+  const path = String(route.path);
+  return `${mountOf(req, path)}${path}`;
+}
+
+/** Where the router of the route hangs. Express forgets it on the way to the error handler: `/api/users` again from the address. */
+function mountOf(req: Request, path: string): string {
+  if (req.baseUrl !== '') return req.baseUrl;
+  const [, api, name] = (req.originalUrl.split('?')[0] ?? '').split('/');
+  return path.startsWith(`/${name}`) ? `/${api}` : `/${api}/${name}`;
 }
 
 const facts = (req: Request, res: Response, { ms }: { ms: number }) => ({
