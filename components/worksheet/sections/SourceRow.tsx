@@ -132,8 +132,7 @@ export function SourceRow({ index, readOnly, onRemove }: Props) {
   const { record } = useWorksheetForm();
   const [openRows, setOpenRows] = useAtom(openSectionsAtom);
   const key = `${record.id}/source/${row.source.id ?? index}`;
-  // A way with nothing answered is open to be answered; one that is complete is folded.
-  const open = openRows[key] ?? row.source.kind === undefined;
+  const open = openRows[key] ?? false;
   const { words, source, state } = row;
   const edge =
     state === 'stop'

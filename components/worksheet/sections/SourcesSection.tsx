@@ -1,3 +1,4 @@
+import { useSetAtom } from 'jotai';
 import { useFieldArray } from 'react-hook-form';
 import { View, StyleSheet } from 'react-native';
 import { EGRESS_REACHES, EGRESS_SUPPLIES } from '@/hazard';
@@ -11,6 +12,7 @@ import { useFieldState, useWorksheetForm } from '../form/WorksheetFormContext';
 import { FindingPanels } from '../parts/FindingPanels';
 import { SectionFrame } from '../parts/SectionFrame';
 import { Suggestions } from '../parts/Suggestions';
+import { openSectionsAtom } from '../worksheetAtoms';
 import { SourceRow } from './SourceRow';
 
 const MOST_SOURCES = 40;
@@ -76,13 +78,20 @@ function DeskSuggestion({ desk, from }: { desk: string | undefined; from: string
 /** 3. Every way it can be live, and how each is opened and held. */
 export function SourcesSection() {
   const words = useMessages();
-  const { content } = useWorksheetForm();
+  const { content, record } = useWorksheetForm();
+  const setOpen = useSetAtom(openSectionsAtom);
   const { fields, append, remove } = useFieldArray({ name: 'sources', keyName: 'key' });
   const sources = content.sources ?? [];
   const held = sources.filter(
     ({ openedAt, held: how }) =>
       openedAt !== undefined && openedAt !== 'none' && how !== undefined && how !== 'none',
   ).length;
+  const addSource = () => {
+    const id = nextId(sources.map((source) => source.id));
+    append({ id });
+    // A new way is open to be answered; one that was there before opens when it is pressed.
+    setOpen((before) => ({ ...before, [`${record.id}/source/${id}`]: true }));
+  };
   return (
     <SectionFrame
       section="sources"
@@ -100,7 +109,7 @@ export function SourcesSection() {
         <Button
           label={words.worksheet.addSource}
           icon="plus"
-          onPress={() => append({ id: nextId(sources.map(({ id }) => id)) })}
+          onPress={addSource}
         />
       ) : (
         <Text variant="label">{words.worksheet.mostSources(MOST_SOURCES)}</Text>
