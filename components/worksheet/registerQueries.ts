@@ -15,8 +15,10 @@ async function readAll<T extends z.ZodType>(item: T, path: string, signal: Abort
   const items: z.output<T>[] = [];
   let cursor: string | null = null;
   do {
-    const from = cursor === null ? '' : `&cursor=${encodeURIComponent(cursor)}`;
-    const answer = await request(page, `${path}?limit=${PAGE}${from}`, { signal });
+    const from: string = cursor === null ? '' : `&cursor=${encodeURIComponent(cursor)}`;
+    const answer: z.output<typeof page> = await request(page, `${path}?limit=${PAGE}${from}`, {
+      signal,
+    });
     items.push(...answer.items);
     cursor = answer.nextCursor;
   } while (cursor !== null);

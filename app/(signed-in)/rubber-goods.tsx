@@ -1,0 +1,5 @@
+import { GoodsScreen } from '@/components/register/GoodsScreen';
+
+export default function RubberGoodsRoute() {
+  return <GoodsScreen />;
+}

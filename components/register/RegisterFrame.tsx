@@ -1,0 +1,114 @@
+import type { ReactNode } from 'react';
+import { Pressable, StyleSheet, View } from 'react-native';
+import { layout, space, touch } from '../theme/tokens';
+import { useBreakpoint } from '../theme/useBreakpoint';
+import { useMessages } from '../i18n/useMessages';
+import { Icon, Notice, Screen, Text, webProps } from '../ui';
+
+export interface RecordHead {
+  title: string;
+  /** Above the title: class, role. */
+  over?: string;
+  /** Below it: the place. */
+  under?: string;
+}
+
+interface Props {
+  /** The place in the header that is open. */
+  place: 'people' | 'sites' | 'rubberGoods';
+  title: string;
+  /** Buttons of the list. */
+  buttons?: ReactNode;
+  stale: boolean;
+  list: ReactNode;
+  record?: { head: RecordHead; body: ReactNode };
+  onClose: () => void;
+}
+
+function Words({ over, title, under, level }: RecordHead & { level?: 2 }) {
+  return (
+    <View style={styles.words}>
+      {over !== undefined && (
+        <Text variant="strong" color="ink2">
+          {over}
+        </Text>
+      )}
+      {level !== undefined && (
+        <Text variant="title" level={level}>
+          {title}
+        </Text>
+      )}
+      {under !== undefined && <Text>{under}</Text>}
+    </View>
+  );
+}
+
+/** A list with the open record beside it; where there is no room beside, the record covers the list. */
+export function RegisterFrame({ place, title, buttons, stale, list, record, onClose }: Props) {
+  const { register } = useMessages();
+  const { isWide, isPhone } = useBreakpoint();
+  if (record !== undefined && !isWide) {
+    return (
+      <Screen
+        title={record.head.title}
+        back={{ label: title, onPress: onClose }}
+        head={<Words {...record.head} />}
+      >
+        <View style={styles.body}>{record.body}</View>
+      </Screen>
+    );
+  }
+  return (
+    <Screen
+      title={title}
+      place={place}
+      width={isWide ? 'full' : 'column'}
+      titleEnd={
+        buttons === undefined ? undefined : (
+          <View style={[styles.buttons, isPhone && styles.stretch]}>{buttons}</View>
+        )
+      }
+      asideWidth={layout.record}
+      aside={
+        record && (
+          <View style={styles.panel}>
+            <View style={styles.head}>
+              <Words {...record.head} level={2} />
+              <Pressable
+                role="button"
+                {...webProps({ 'aria-label': register.closeRecord })}
+                onPress={onClose}
+                style={styles.close}
+              >
+                <Icon name="close" color="blue" />
+              </Pressable>
+            </View>
+            {record.body}
+          </View>
+        )
+      }
+    >
+      <View style={styles.list}>
+        {stale && <Notice icon="clock">{register.asLastRead}</Notice>}
+        {list}
+      </View>
+    </Screen>
+  );
+}
+
+const styles = StyleSheet.create({
+  words: { flex: 1, gap: 2 },
+  buttons: { flexDirection: 'row', flexWrap: 'wrap', gap: 10 },
+  stretch: { width: '100%' },
+  list: { gap: space.md },
+  panel: { padding: space.xl, gap: space.md },
+  head: { flexDirection: 'row', alignItems: 'flex-start', gap: space.xs },
+  close: {
+    width: touch.least,
+    height: touch.least,
+    alignItems: 'center',
+    justifyContent: 'center',
+    marginRight: -space.sm,
+  },
+  body: { gap: space.md, paddingTop: space.md },
+});

@@ -1,0 +1,85 @@
+import { StyleSheet, View } from 'react-native';
+import { useTheme } from '../theme/useTheme';
+import { Text } from '../ui';
+import type { BarParts, Timeline } from './timeline';
+
+const BAR = 22;
+const ROW = 44;
+/** The lines of the ruler run on through the padding of a row to the next one. */
+const OVER = 12;
+
+const box = ([left, width]: [number, number]) => ({ left, width });
+
+/** The months above the bars, a label at each quarter. */
+export function TimeRuler({ line }: { line: Timeline }) {
+  const { colors } = useTheme();
+  return (
+    <View aria-hidden style={[styles.ruler, { width: line.width }]}>
+      {line.ticks.map(({ at, label }) => (
+        <View
+          key={at}
+          style={[
+            styles.tick,
+            { left: at, height: label === undefined ? 6 : 12, backgroundColor: colors.ink },
+          ]}
+        />
+      ))}
+      {line.ticks.map(
+        ({ at, label }) =>
+          label !== undefined &&
+          at + 30 <= line.width && (
+            <Text key={label + String(at)} variant="cite" style={[styles.month, { left: at }]}>
+              {label}
+            </Text>
+          ),
+      )}
+    </View>
+  );
+}
+
+/** One interval: elapsed solid, rest hollow, over red, not begun dashed; the line is today. */
+export function TimeBar({ line, parts }: { line: Timeline; parts: BarParts | undefined }) {
+  const { colors } = useTheme();
+  const { elapsed, rest, overdue, waiting } = parts ?? {};
+  return (
+    <View aria-hidden style={[styles.row, { width: line.width }]}>
+      {line.ticks.map(({ at }) => (
+        <View key={at} style={[styles.line, { left: at, backgroundColor: colors.hair }]} />
+      ))}
+      {waiting !== undefined && (
+        <View style={[styles.bar, styles.dashed, { borderColor: colors.ink }, box(waiting)]} />
+      )}
+      {rest !== undefined && rest[1] > 0 && (
+        <View
+          style={[
+            styles.bar,
+            styles.hollow,
+            { borderColor: colors.ink, backgroundColor: colors.paper },
+            box(rest),
+          ]}
+        />
+      )}
+      {elapsed !== undefined && (
+        <View style={[styles.bar, { backgroundColor: colors.ink }, box(elapsed)]} />
+      )}
+      {overdue !== undefined && (
+        <View style={[styles.bar, { backgroundColor: colors.zRed }, box(overdue)]} />
+      )}
+      <View
+        style={[styles.line, styles.today, { left: line.today, backgroundColor: colors.ink }]}
+      />
+    </View>
+  );
+}
+
+const styles = StyleSheet.create({
+  ruler: { height: 34 },
+  tick: { position: 'absolute', bottom: -6, width: 1 },
+  month: { position: 'absolute', top: 0 },
+  row: { height: ROW },
+  line: { position: 'absolute', top: -OVER, bottom: -OVER, width: 1 },
+  today: { width: 2, marginLeft: -1 },
+  bar: { position: 'absolute', top: (ROW - BAR) / 2, height: BAR },
+  hollow: { borderWidth: 2 },
+  dashed: { borderWidth: 2, borderStyle: 'dashed' },
+});
