@@ -106,11 +106,7 @@ export function SourcesSection() {
       </View>
       <ListFindings />
       {fields.length < MOST_SOURCES ? (
-        <Button
-          label={words.worksheet.addSource}
-          icon="plus"
-          onPress={addSource}
-        />
+        <Button label={words.worksheet.addSource} icon="plus" onPress={addSource} />
       ) : (
         <Text variant="label">{words.worksheet.mostSources(MOST_SOURCES)}</Text>
       )}
