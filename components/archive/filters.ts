@@ -1,4 +1,4 @@
-import { MODES, SYSTEMS, type Mode, type System } from '@/hazard/enumerations';
+import { MODES, SYSTEMS, type Mode, type SystemCode } from '@/hazard/enumerations';
 import { STATES, type WorksheetState } from '@/shared/record';
 
 export const VOLTS = ['120', '208', '240', '277', '480'] as const;
@@ -19,7 +19,7 @@ export interface ArchiveFilters {
   q: string;
   state: WorksheetState[];
   siteId: string[];
-  system: System[];
+  system: SystemCode[];
   circuitVolts: string[];
   mode: Mode[];
   finding: string[];

@@ -43,5 +43,5 @@ export const insights = {
   byVerdict: 'How they stand',
   verdict: { stop: 'A stop stands', open: 'Something is open', ready: 'Nothing open' },
   nothing: 'No worksheet in this time.',
-  foot: 'Blue opens the worksheets it counts. A finding is counted once a worksheet. People are not counted.',
+  foot: 'Blue opens the worksheets it counts; a site opens all of its worksheets. A finding is counted once a worksheet. People are not counted.',
 };

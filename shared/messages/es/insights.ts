@@ -45,5 +45,5 @@ export const insights: Words<typeof en> = {
   byVerdict: 'Cómo están',
   verdict: { stop: 'Hay un alto', open: 'Falta algo', ready: 'Nada pendiente' },
   nothing: 'Ninguna hoja de trabajo en este tiempo.',
-  foot: 'Lo azul abre las hojas que cuenta. Un hallazgo se cuenta una vez por hoja. No se cuenta a las personas.',
+  foot: 'Lo azul abre las hojas que cuenta; un sitio abre todas sus hojas. Un hallazgo se cuenta una vez por hoja. No se cuenta a las personas.',
 };
