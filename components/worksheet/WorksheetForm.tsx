@@ -37,7 +37,11 @@ function useFirstOpen(record: WorksheetRecord) {
     );
     setOpen((before) => ({
       ...Object.fromEntries(
-        SECTIONS.map((section) => [`${record.id}/${section}`, asked.has(section)]),
+        SECTIONS.map((section) => [
+          `${record.id}/${section}`,
+          // The distances are what the worksheet is for: never folded away by themselves.
+          asked.has(section) || section === 'boundaries',
+        ]),
       ),
       ...before,
     }));

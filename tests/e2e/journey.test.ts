@@ -113,7 +113,7 @@ async function addWay(page: Page, way: Way): Promise<void> {
 async function fillSources(page: Page, battery: string): Promise<void> {
   const ways = section(page, 'Ways it can be live');
   await tick(ways, 'Battery units');
-  await pick(ways, 'Does it reach this equipment?', /This equipment/i);
+  await pick(ways, 'Does it reach this equipment?', /It reaches this equipment/);
   await type(ways, 'Who runs the building and was told', 'Building control room');
   await type(
     ways,
@@ -123,7 +123,7 @@ async function fillSources(page: Page, battery: string): Promise<void> {
   await addWay(page, {
     kind: /^Normal/,
     from: 'LP-2 circuit 14',
-    openedAt: 'Breaker',
+    openedAt: 'Branch breaker',
     held: 'Lock and tag',
     lock: '0417',
   });
@@ -131,7 +131,7 @@ async function fillSources(page: Page, battery: string): Promise<void> {
     kind: /^Traveler/,
     from: 'Three-way switch at the stair',
     same: /^3\.1/,
-    openedAt: 'Breaker',
+    openedAt: 'Branch breaker',
     held: 'Lock and tag',
     lock: '0417',
   });
@@ -141,7 +141,7 @@ async function fillSources(page: Page, battery: string): Promise<void> {
       from: `Inside luminaire ${point}`,
       points: point,
       openedAt: point === 'C6' ? battery : 'Battery connector',
-      held: 'Exclusive control',
+      held: 'In the hands of the person who works',
     });
   }
 }
@@ -237,7 +237,7 @@ describe('four LED drivers in a level 2 corridor, 480Y/277, LP-2/14', () => {
     await fillJob(page);
     await fillSupply(page);
     await fillCrew(page);
-    await fillSources(page, 'None');
+    await fillSources(page, 'Not opened');
     await keepPicture(page, 'worksheet-stop');
     // NFPA 70E-2024 Table 130.4(E)(a): 480 V, fixed 3 ft 6 in, restricted 1 ft 0 in.
     await fillTheRest(page);
