@@ -14,12 +14,17 @@ import { CloseOutForm } from './CloseOutForm';
 const EMPTY = (): CloseOut => ({});
 
 function Closed({ record }: { record: WorksheetRecord }) {
-  const words = useMessages().closeOut;
+  const words = useMessages();
+  const said = words.closeOut;
   const at = record.closeOut?.at ?? record.updatedAt;
   return (
     <View role="status" aria-live="polite" style={styles.box}>
-      <StateMark state="complete" word={words.closedTitle(timeText(at, record.timeZone))} />
-      <Text variant="answer">{words.closedBody}</Text>
+      <StateMark state="complete" word={said.closedTitle(timeText(at, record.timeZone))} />
+      <Text variant="answer">{said.closedBody}</Text>
+      <Button
+        label={words.signing.backToWorksheet}
+        href={{ pathname: '/worksheets/[worksheetId]', params: { worksheetId: record.id } }}
+      />
     </View>
   );
 }
@@ -66,7 +71,6 @@ export function CloseOutScreen({ worksheetId }: { worksheetId: string }) {
             width="column"
           >
             <Content record={record} />
-            <Button kind="quiet" icon="left" label={words.signing.backToWorksheet} href={href} />
           </Screen>
         );
       }}

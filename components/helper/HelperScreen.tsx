@@ -30,6 +30,12 @@ import { useSeen } from './useSeen';
 
 type Page = 'read' | 'ask' | 'refuse' | 'sign' | 'signed';
 
+/** Once the end was on screen it need not be sought again after a question. */
+interface ReadOnce {
+  read: boolean;
+  onRead: () => void;
+}
+
 function Block({ title, children }: { title: string; children: ReactNode }) {
   const { colors } = useTheme();
   return (
@@ -51,12 +57,16 @@ interface Shown {
   headerEnd: ReactNode;
 }
 
-function Reading({ record, member, onPage, asked, headerEnd }: Shown) {
+function Reading({ record, member, onPage, asked, headerEnd, read, onRead }: Shown & ReadOnce) {
   const words = useMessages();
   const said = words.helper;
   const user = useUser();
   const { ref, seen } = useSeen(BAR_COVERS);
   const name = firstName(member.name ?? '');
+  const leave = (page: Page) => {
+    if (seen) onRead();
+    onPage(page);
+  };
   const signature = record.signatures.find(
     (each) => each.revision === record.revision && each.signer.id === member.userId,
   );
@@ -66,7 +76,7 @@ function Reading({ record, member, onPage, asked, headerEnd }: Shown) {
       ? said.signed(timeText(signature.signedAt, record.timeZone))
       : !awaited
         ? said.notAwaited
-        : seen
+        : seen || read
           ? undefined
           : said.readToEnd;
   const isCeiling = groundedInReach(record.content).includes('ceiling grid');
@@ -79,9 +89,9 @@ function Reading({ record, member, onPage, asked, headerEnd }: Shown) {
       bar={
         <HelperBar
           reason={reason}
-          onAsk={() => onPage('ask')}
-          onRefuse={() => onPage('refuse')}
-          onUnderstand={() => onPage('sign')}
+          onAsk={() => leave('ask')}
+          onRefuse={() => leave('refuse')}
+          onUnderstand={() => leave('sign')}
         />
       }
     >
@@ -216,6 +226,7 @@ function Helper({ record, signerId }: { record: WorksheetRecord; signerId: strin
   const [chosen, setChosen] = useState<Locale>(locale);
   const [page, setPage] = useState<Page>('read');
   const [asked, setAsked] = useState(false);
+  const [read, setRead] = useState(false);
   useToTop(`${record.state === 'stopped'} ${page}`);
   const member = record.content.crew?.find(({ userId }) => userId === signerId);
   if (member === undefined) return <NotFoundScreen />;
@@ -233,7 +244,7 @@ function Helper({ record, signerId }: { record: WorksheetRecord; signerId: strin
         {record.state === 'stopped' ? (
           <StoppedPage shown={shown} />
         ) : page === 'read' ? (
-          <Reading {...shown} />
+          <Reading {...shown} read={read} onRead={() => setRead(true)} />
         ) : (
           <Answering
             {...shown}

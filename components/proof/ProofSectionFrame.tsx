@@ -24,7 +24,10 @@ interface Props {
   children: ReactNode;
 }
 
-/** One numbered part of the test, with its state and what the rules refuse in it. */
+/**
+ * One numbered part of the test, with its state and what the rules refuse in
+ * it. The readings show their own stops, directly below the matrix.
+ */
 export function ProofSectionFrame(props: Props) {
   const { state, section, title, mark, word, detail, open, onToggle, children } = props;
   const words = useMessages();
@@ -34,7 +37,8 @@ export function ProofSectionFrame(props: Props) {
   const shown = stops.length > 0 ? own : (mark ?? own);
   const panels = findings.filter(
     ({ severity, params }) =>
-      severity === 'stop' || (section !== 'readings' && section !== 'record' && isAnswered(params)),
+      section !== 'readings' &&
+      (severity === 'stop' || (section !== 'record' && isAnswered(params))),
   );
   return (
     <Section

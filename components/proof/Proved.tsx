@@ -1,6 +1,7 @@
 import { router } from 'expo-router';
 import { ScrollView, StyleSheet, View } from 'react-native';
 import { amperes, list, number, timeText } from '@/shared/format';
+import { textWidth } from '@/shared/drawing/textWidth';
 import type { ProofRecord, WorksheetRecord } from '@/shared/record';
 import { useLocale } from '../i18n/preferences';
 import { useMessages } from '../i18n/useMessages';
@@ -27,12 +28,20 @@ function Panel({ at, points }: { at: string; points: readonly string[] }) {
   );
 }
 
+/** Wide enough for the longest word of a point's name, within reason. */
+function pointColumn(names: readonly string[]): number {
+  const words = names.flatMap((name) => name.split(' '));
+  const longest = Math.max(...words.map((word) => textWidth(word, 17, 700)));
+  return Math.min(Math.max(74, Math.ceil(longest) + 20), 180);
+}
+
 /** Every reading that counts: one row a point, one column a pair. */
 function ReadingsTable({ proof, record }: { proof: ProofRecord; record: WorksheetRecord }) {
   const said = useMessages().proof.proved;
   const locale = useLocale();
   const { colors } = useTheme();
   const { columns, rows } = provedTable(proof.proof, record.content, said);
+  const pointWidth = { width: pointColumn(rows.map(({ point }) => point)) };
   const line = { borderLeftWidth: rule.fine, borderLeftColor: colors.ink };
   return (
     <ScrollView horizontal contentContainerStyle={styles.scroll}>
@@ -42,7 +51,7 @@ function ReadingsTable({ proof, record }: { proof: ProofRecord; record: Workshee
         style={[styles.table, { borderColor: colors.ink }]}
       >
         <View role="row" style={styles.row}>
-          <View role="columnheader" style={styles.point}>
+          <View role="columnheader" style={[styles.point, pointWidth]}>
             <Text variant="label">{said.point}</Text>
           </View>
           {columns.map((column) => (
@@ -59,7 +68,7 @@ function ReadingsTable({ proof, record }: { proof: ProofRecord; record: Workshee
             role="row"
             style={[styles.row, { borderTopWidth: 1, borderTopColor: colors.ink }]}
           >
-            <View role="rowheader" style={styles.point}>
+            <View role="rowheader" style={[styles.point, pointWidth]}>
               <Text variant="strong" weight="700">
                 {point}
               </Text>
@@ -127,6 +136,7 @@ export function Proved({ record, proof, onAgain }: Props) {
         <VerdictBar
           tone="paper"
           mark="proved"
+          word={words.proof.bar.proved}
           detail={words.proof.bar.provedDetail(
             at,
             ends === undefined ? '' : timeText(ends, record.timeZone),
@@ -197,7 +207,7 @@ const styles = StyleSheet.create({
   scroll: { flexGrow: 1 },
   table: { borderWidth: rule.strong, flexGrow: 1 },
   row: { flexDirection: 'row', alignItems: 'stretch' },
-  point: { width: 74, minHeight: 46, justifyContent: 'center', paddingHorizontal: space.xs },
+  point: { minHeight: 46, justifyContent: 'center', paddingHorizontal: space.xs },
   cell: { flexGrow: 1, flexBasis: 58, minWidth: 58, justifyContent: 'center', padding: 4 },
   middle: { textAlign: 'center' },
 });

@@ -66,7 +66,11 @@ export function ReadingCell({ id, label, entries, lowImpedance, stamp, onChange 
       )}
       <TextInput
         id={id}
-        {...webProps({ 'aria-label': label, 'aria-invalid': stray || undefined, 'data-cell': '' })}
+        {...webProps({
+          'aria-label': label,
+          'aria-invalid': stray || undefined,
+          dataSet: { cell: '' },
+        })}
         value={text}
         onChangeText={(next) => onChange(typed(entries, next, { lowImpedance, at: stamp() }))}
         onFocus={() => setFocused(true)}

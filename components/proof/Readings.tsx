@@ -7,6 +7,7 @@ import { useMessages } from '../i18n/useMessages';
 import { space } from '../theme/tokens';
 import { Button, Choice, Citation, Notice, Text, TextField } from '../ui';
 import { lowerFirst } from '../signing/lowerFirst';
+import { FindingPanels } from '../worksheet/parts/FindingPanels';
 import { wordOf } from '../worksheet/form/fieldWords';
 import { cellWords, conductorName, toConductor } from './cellWords';
 import type { SourceToRead } from './plan';
@@ -233,7 +234,7 @@ function PointNames({ state, names }: { state: ProofState; names: readonly strin
 export function Readings({ state, place, onPlace }: Props) {
   const said = useMessages().proof.readings;
   const [lowImpedance, setLowImpedance] = useState(false);
-  const { plan, form, proof } = state;
+  const { plan, form, proof, findingsOf } = state;
   const names = pointNames(form, plan);
   const shown = Math.min(place, names.length - 1);
   const name = names[shown] ?? '1';
@@ -261,6 +262,9 @@ export function Readings({ state, place, onPlace }: Props) {
         {plan.sourcesAt(name).map((item) => (
           <SourceMatrix key={item.source.index} {...matrix} item={item} />
         ))}
+        <FindingPanels
+          findings={findingsOf('readings').filter(({ severity }) => severity === 'stop')}
+        />
       </View>
       {hasUnreadable(form) && <Notice live>{said.notANumber}</Notice>}
       {(proof.readings?.length ?? 0) > MOST_READINGS && (

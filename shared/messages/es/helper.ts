@@ -66,13 +66,13 @@ export const helper: Words<typeof en> = {
   stayNote: {
     barricade: (name) => `Aunque ${name} le pida que se acerque.`,
     arcFlash: (distance) => `Más cerca de ${distance}, solo con ropa contra arco.`,
-    off: (name) => `Hasta que ${name} diga que está probado.`,
+    off: (name) => `Hasta que ${name} diga que no hay tensión.`,
     energized: 'Todo el tiempo.',
   },
   you: 'Usted',
   stripLabel: (where) => `Distancias, a escala. Usted: ${where}.`,
   ended: (time) =>
-    `Probado muerto ${time}. Ahí terminaron las distancias, en los puntos nombrados.`,
+    `Comprobado sin tensión ${time}. Ahí terminaron las distancias, en los puntos nombrados.`,
 
   doNot: 'Lo que usted no hace',
   doNots: {
@@ -133,7 +133,7 @@ export const helper: Words<typeof en> = {
   signOwn: 'en su propio teléfono',
   signOn: (name) => `en el teléfono de ${name}`,
   readAgain: 'Leer otra vez',
-  workOff: (name) => `Sin energía. Se considera vivo hasta que ${name} lo haya probado`,
+  workOff: (name) => `Sin energía. Se considera vivo hasta que ${name} lo haya comprobado`,
   workEnergized: 'Energizado. Está vivo todo el tiempo',
   orFarther: 'o más lejos',
   ownPin: 'Su propio PIN de firma, 6 dígitos',
@@ -142,7 +142,7 @@ export const helper: Words<typeof en> = {
     `El registro dice que se firmó en el teléfono de ${name}. A usted le llega un correo.`,
   giveBack: 'Devolver el teléfono, sin firmar',
   signedTitle: 'Firmado.',
-  signedBody: 'No meta las manos hasta que el encargado diga que está probado.',
+  signedBody: 'No meta las manos hasta que el encargado diga que no hay tensión.',
   signedBodyEnergized: 'Está vivo todo el tiempo. Guarde su distancia.',
   giveBackSigned: (name) => `Devolver el teléfono a ${name}`,
 };

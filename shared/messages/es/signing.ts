@@ -24,7 +24,7 @@ export const signing: Words<typeof en> = {
     you: 'Usted',
   },
   numbered: (number, revision) => `${number}, revisión ${revision}`,
-  off: 'Sin energía, con candado, probado antes de meter las manos',
+  off: 'Sin energía, con candado, comprobado sin tensión antes de meter las manos',
   energized: (reason) => `Energizado: ${reason}`,
   ways: (ways, locks) =>
     locks === '' ? `Se abre: ${ways}` : `Se abre: ${ways}. Candados ${locks}`,
@@ -57,11 +57,11 @@ export const signing: Words<typeof en> = {
   },
   after: {
     crew: (names) =>
-      `Todavía no está en vigor: falta que firme ${names}; después refrenda un supervisor. Luego, sin probar que está muerto: tratar como vivo.`,
+      `Todavía no está en vigor: falta que firme ${names}; después refrenda un supervisor. Luego, sin comprobar: trátelo como vivo.`,
     supervisor:
-      'Todavía no está en vigor: refrenda un supervisor. Luego, sin probar que está muerto: tratar como vivo.',
+      'Todavía no está en vigor: refrenda un supervisor. Luego, sin comprobar: trátelo como vivo.',
     countersignedOff: (until) =>
-      `Con esta firma el plan queda en vigor hasta las ${until}. Sin probar que está muerto: tratar como vivo.`,
+      `Con esta firma el plan queda en vigor hasta las ${until}. Sin comprobar: trátelo como vivo.`,
     countersignedEnergized: (until) =>
       `Con esta firma el plan queda en vigor hasta las ${until}. Todo está vivo todo el tiempo.`,
   },
@@ -127,7 +127,7 @@ export const signing: Words<typeof en> = {
   signedBody: {
     crew: (names) => `Todavía no está en vigor. Sigue: ${names}.`,
     supervisor: 'Todavía no está en vigor. Sigue: refrenda un supervisor.',
-    inForceOff: 'En vigor. Sin probar que está muerto: tratar como vivo.',
+    inForceOff: 'En vigor. Sin comprobar: trátelo como vivo.',
     inForceEnergized: 'En vigor. Todo está vivo.',
   },
 };

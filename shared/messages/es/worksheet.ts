@@ -48,7 +48,7 @@ export const worksheet = {
   connectorParted: 'Conector separado',
 
   modeSentence: {
-    off: 'Sin energía. Desenergizar, bloquear, probar que está muerto.',
+    off: 'Sin energía. Desenergizar, bloquear, comprobar que no hay tensión.',
     energized: 'Energizado. Justificado abajo.',
   },
   modeChoice: { off: 'Sin energía', energized: 'Energizado' },
@@ -59,11 +59,11 @@ export const worksheet = {
   permitNeeded: 'Se necesita permiso de trabajo energizado.',
   noPermitNeeded: 'No se necesita permiso de trabajo energizado.',
 
-  proveDead: 'Probar que está muerto',
+  proveDead: 'Comprobar que no hay tensión',
   proofComes: 'Las lecturas vienen cuando el plan está firmado y en vigor.',
   noProofEnergized: 'El trabajo energizado no tiene prueba. Todo sigue vivo.',
   proofLine: (at: string, readings: number, ready: boolean) =>
-    `${at}: ${readings} lecturas, ${ready ? 'probado muerto' : 'sin probar'}`,
+    `${at}: ${readings} lecturas, ${ready ? 'comprobado sin tensión' : 'sin comprobar'}`,
   testedBy: (name: string) => `Prueba: ${name}`,
 
   boundary: {
@@ -176,12 +176,12 @@ export const worksheet = {
 
   notYetInForce: 'Todavía no está en vigor',
   toSignatures: 'A las firmas',
-  treatAsLive: 'Tratar como vivo',
-  notProved: 'Sin probar que está muerto',
-  notProvedTitle: 'Sin probar que está muerto: tratar como vivo',
+  treatAsLive: 'Trátelo como vivo',
+  notProved: 'Sin comprobar',
+  notProvedTitle: 'Sin comprobar: trátelo como vivo',
   notProvedBody:
     'Las distancias y el EPP valen hasta registrar la prueba en cada punto de trabajo.',
-  provedTitle: (time: string) => `Probado muerto, ${time}`,
+  provedTitle: (time: string) => `Comprobado sin tensión, ${time}`,
   provedBody:
     'Pruebe otra vez si el trabajo quedó solo, si se movió un candado, si cambió el turno u otra cosa.',
   energizedTitle: 'Trabajo energizado en vigor',
