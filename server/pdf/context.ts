@@ -11,14 +11,14 @@ export interface PdfContext extends PdfInput {
   locale: Locale;
   m: Messages;
   /** Date, clock and zone at the site. */
-  at(instant: string): string;
-  clock(instant: string): string;
+  at: (instant: string) => string;
+  clock: (instant: string) => string;
   /** A source with its confidence; `‡` marks what is from memory. */
-  source(citation: Citation): string;
+  source: (citation: Citation) => string;
   /** A crew member's name by the id inside the worksheet. */
-  crewName(id: string | undefined): string;
+  crewName: (id: string | undefined) => string;
   /** `3.2` for a source's id. */
-  wayNumber(id: string | undefined): string;
+  wayNumber: (id: string | undefined) => string;
 }
 
 /**

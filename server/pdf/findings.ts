@@ -23,7 +23,8 @@ const COLOR_OF = { stop: COLORS.red, open: COLORS.ink, caution: COLORS.ink } as 
 export function findingList(findings: readonly Finding[], context: PdfContext): Content[] {
   if (findings.length === 0) return [];
   const { locale, m, source } = context;
-  const body = findings.map((finding): TableCell[] => {
+  const { shown, left } = firstOfEachKind(findings);
+  const body = shown.map((finding): TableCell[] => {
     const words = findingWords(locale, finding, PRINT_UNITS);
     const severity = enumWord(locale, 'severity', finding.severity);
     return [
@@ -40,7 +41,32 @@ export function findingList(findings: readonly Finding[], context: PdfContext): 
       layout: rows,
       margin: [0, 4, 0, 0],
     },
+    ...left.map(({ finding, count }): Content => {
+      const { title } = findingWords(locale, finding, PRINT_UNITS);
+      return strong(m.pdf.findings.alike(title, count), { margin: [0, 3, 0, 0] });
+    }),
   ];
+}
+
+/** Of one kind so many are written out; a draft can have hundreds, one for each way and point. */
+const WRITTEN_OUT = 25;
+
+function firstOfEachKind(findings: readonly Finding[]): {
+  shown: Finding[];
+  left: { finding: Finding; count: number }[];
+} {
+  const counts = new Map<string, { finding: Finding; count: number }>();
+  const shown = findings.filter((finding) => {
+    const kind = `${finding.severity} ${finding.code}`;
+    const seen = counts.get(kind) ?? { finding, count: 0 };
+    seen.count += 1;
+    counts.set(kind, seen);
+    return seen.count <= WRITTEN_OUT;
+  });
+  const left = [...counts.values()]
+    .filter(({ count }) => count > WRITTEN_OUT)
+    .map(({ finding, count }) => ({ finding, count: count - WRITTEN_OUT }));
+  return { shown, left };
 }
 
 /** The verdict, every finding with it, cautions included, and the stops that were cleared. */

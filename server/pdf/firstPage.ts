@@ -13,7 +13,6 @@ import type { PdfContext } from './context';
 import {
   bold,
   cite,
-  COLORS,
   framed,
   framedBelow,
   headCell,
@@ -146,8 +145,15 @@ function statusLine(context: PdfContext): string {
   return `${first}. ${rest.charAt(0).toUpperCase()}${rest.slice(1)}`;
 }
 
+/** The first page has room for so much; the section has it whole. */
+const LONGEST = 90;
+
+function shortened(value: string): string {
+  return value.length <= LONGEST ? value : `${value.slice(0, LONGEST)}…`;
+}
+
 function cell(name: string, value: string | ContentText): TableCell {
-  const shown = typeof value === 'string' ? strong(value) : value;
+  const shown = typeof value === 'string' ? strong(shortened(value)) : value;
   return { stack: [label(name), shown] };
 }
 

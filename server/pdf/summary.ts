@@ -69,6 +69,11 @@ export function drawingColumn(
   ];
 }
 
+/** A name cut for the first page; section 2 has it whole. */
+function brief(name: string): string {
+  return name.length <= 40 ? name : `${name.slice(0, 40)}…`;
+}
+
 /** Section 2 in three sentences. */
 export function supplySummary(context: PdfContext, width: number): Content[] {
   const { m, locale, worksheet } = context;
@@ -83,7 +88,7 @@ export function supplySummary(context: PdfContext, width: number): Content[] {
   ].map((each) => volts(locale, each));
   const parts = [
     bold(`${supply.system ? `${supply.system} V` : m.common.notAnswered}. `),
-    text(`${words.at(supply.panel ?? unknown, supply.circuit ?? unknown, circuit)} `),
+    text(`${words.at(brief(supply.panel ?? unknown), brief(supply.circuit ?? unknown), circuit)} `),
   ];
   if (boundaries) parts.push(medium(`${words.entered(volts(locale, boundaries.volts))} `));
   if (readings.length > 0) parts.push(text(`${words.read(readings.join(', '))} ${fit(context)}`));

@@ -23,11 +23,11 @@ interface Renderer {
   pdfDocument: TaggedDocument;
   /** The one element that all others are in. */
   structure?: Structure;
-  renderPages(pages: object[]): void;
-  renderLine(line: Line, x: number, y: number): void;
-  renderVector(vector: object): void;
-  renderImage(image: Described): void;
-  renderSVG(svg: Described): void;
+  renderPages: (this: Renderer, pages: object[]) => void;
+  renderLine: (this: Renderer, line: Line, x: number, y: number) => void;
+  renderVector: (this: Renderer, vector: object) => void;
+  renderImage: (this: Renderer, image: Described) => void;
+  renderSVG: (this: Renderer, svg: Described) => void;
 }
 
 interface Described {

@@ -18,8 +18,8 @@ function barlow(): Face {
   if (face === undefined) {
     // The library that pdfmake sets type with; it has no types of its own.
     const require = createRequire(import.meta.url);
-    const { openSync } = require('fontkit') as { openSync(file: string): Face };
-    face = openSync(fontFile('400'));
+    const fontkit = require('fontkit') as { openSync(file: string): Face };
+    face = fontkit.openSync(fontFile('400'));
   }
   return face;
 }

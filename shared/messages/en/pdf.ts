@@ -192,6 +192,7 @@ export const pdf = {
     work: 'Of the proof',
     cleared: 'Stops that the lead cleared before signing',
     clearedText: 'They are not broken now. They stay on record.',
+    alike: (title: string, count: number) => `${title}: ${count} more of this kind.`,
     section: (place: string) => `Section ${place}`,
   },
   questions: {

@@ -194,6 +194,7 @@ export const pdf: Words<typeof english> = {
     work: 'De la prueba',
     cleared: 'Altos que el encargado resolvió antes de firmar',
     clearedText: 'Ya no se incumplen. Quedan en el registro.',
+    alike: (title, count) => `${title}: ${count} más de este tipo.`,
     section: (place) => `Sección ${place}`,
   },
   questions: {

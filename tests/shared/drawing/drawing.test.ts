@@ -309,7 +309,7 @@ describe('the widths of Barlow', () => {
     layout(text: string, features?: Record<string, boolean>): { advanceWidth: number };
   }
   const require = createRequire(import.meta.url);
-  const { openSync } = require('fontkit') as { openSync(file: string): Face };
+  const fontkit = require('fontkit') as { openSync(file: string): Face };
 
   it.each([
     [500, '500Medium'],
@@ -319,7 +319,7 @@ describe('the widths of Barlow', () => {
     const file = path.resolve(
       `node_modules/@expo-google-fonts/barlow/${folder}/Barlow_${folder}.ttf`,
     );
-    const face = openSync(file);
+    const face = fontkit.openSync(file);
     BARLOW_WIDTHS[weight].forEach((width, index) => {
       const code = FIRST_CHARACTER + index;
       if (!face.hasGlyphForCodePoint(code)) return expect(width).toBe(0);
