@@ -9,7 +9,7 @@ import type { Worksheet } from '../models/Worksheet';
 import { allows } from '../policies/worksheet';
 import { conflict, idTaken, wrongState } from '../problem';
 import { deleteObject, putObject } from '../storage';
-import { contentHash, sha256 } from './contentHash';
+import { contentHash, hashOfRow, sha256 } from './contentHash';
 import { lockWorksheet } from './findWorksheet';
 import { encodePhoto, PHOTO_TYPE } from './photoImage';
 import { currentRevision } from './readRecord';
@@ -92,7 +92,10 @@ function insert(actor: CurrentUser, worksheetId: string, insertion: Insertion) {
       revision: worksheet.revision,
       type: 'photo-added',
       actorId: actor.id,
-      payload: { attachmentId: id, sha256: row.sha256, section, state: worksheet.state },
+      payload: {
+        ...{ attachmentId: id, sha256: row.sha256, section, state: worksheet.state },
+        photoHash: hashOfRow(row),
+      },
     });
     return row;
   });

@@ -10,7 +10,7 @@ import { notReady } from '../problem';
 import { assessAt } from './assessAt';
 import { actOn, changeState } from './changeState';
 import { checkPin } from './checkPin';
-import { hashOf } from './contentHash';
+import { hashOf, hashOfRow } from './contentHash';
 import { currentRevision } from './readRecord';
 import { placeOf } from './siteOf';
 
@@ -19,7 +19,7 @@ type Photo = Pick<AttachmentRow, 'id' | 'sha256'>;
 /** What the event of a close-out vouches for: the record and its photos. */
 export function closeOutHash(row: CloseOutRow, photos: readonly Photo[]): string {
   return hashOf({
-    record: JSON.parse(JSON.stringify(row.get({ plain: true }))),
+    record: hashOfRow(row),
     photos: photos
       .map(({ id, sha256 }) => ({ id, sha256 }))
       .sort((one, other) => (one.id < other.id ? -1 : 1)),

@@ -19,6 +19,12 @@ export function hashOf(value: unknown): string {
   return sha256(canonicalJson(value));
 }
 
+/** The columns of a row as the database gives them back: dates as text, nothing undefined. */
+export function hashOfRow(row: { get(options: { plain: true }): object }): string {
+  const columns: unknown = JSON.parse(JSON.stringify(row.get({ plain: true })));
+  return hashOf(columns);
+}
+
 interface SignedAttachment {
   id: string;
   sha256: string;

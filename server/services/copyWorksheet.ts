@@ -2,6 +2,7 @@ import { v7 } from 'uuid';
 import type { WorksheetContent } from '@/shared/worksheet';
 import type { CurrentUser } from '../currentUser';
 import type { Worksheet } from '../models/Worksheet';
+import { applyRegister } from './applyRegister';
 import { insertWorksheet, isIdTaken, ownCreation } from './createWorksheet';
 import { currentRevision } from './readRecord';
 
@@ -22,7 +23,8 @@ function uncheckedGloves(gloves: GloveSet | undefined) {
 }
 
 function defined<T extends object>(object: T): T {
-  return Object.fromEntries(Object.entries(object).filter(([, value]) => value !== undefined)) as T;
+  const entries = Object.entries(object).filter(([, value]) => value !== undefined);
+  return Object.fromEntries(entries) as T;
 }
 
 /**
@@ -49,7 +51,7 @@ export function copiedContent(content: WorksheetContent): WorksheetContent {
         ['ready'],
       ),
     crew: crew?.map((member) => defined({ ...member, gloves: uncheckedGloves(member.gloves) })),
-  }) as WorksheetContent;
+  });
 }
 
 /** A new draft from an earlier worksheet. A repeat with the same id gives the one that was made. */
@@ -57,12 +59,15 @@ export async function copyWorksheet(
   actor: CurrentUser,
   { worksheet, id = v7() }: { worksheet: Worksheet; id?: string | undefined },
 ): Promise<{ worksheet: Worksheet; created: boolean }> {
-  const { content } = await currentRevision(worksheet);
+  const { leadId } = worksheet;
+  const copied = copiedContent((await currentRevision(worksheet)).content);
+  // Gloves tested since, a name that changed: today's register, not that of the earlier day.
+  const { content } = await applyRegister({ content: copied, leadId });
   try {
     const copy = await insertWorksheet({
       id,
-      leadId: worksheet.leadId,
-      content: copiedContent(content),
+      leadId,
+      content,
       actor,
       payload: { copiedFrom: worksheet.id },
     });

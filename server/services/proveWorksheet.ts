@@ -9,7 +9,7 @@ import { conflict, idTaken } from '../problem';
 import { assessAt } from './assessAt';
 import { actOn, changeState } from './changeState';
 import { checkPin } from './checkPin';
-import { hashOf } from './contentHash';
+import { hashOf, hashOfRow } from './contentHash';
 import { notify, supervisorsOf } from './notify';
 import { currentRevision } from './readRecord';
 import { recordEvent } from './recordEvent';
@@ -38,7 +38,7 @@ async function repeatOf(actor: CurrentUser, worksheetId: string, id: string, pro
 
 /** Everything that a proof says, for the event that vouches for it. */
 export function proofHash(row: ProofRow): string {
-  return hashOf(JSON.parse(JSON.stringify(row.get({ plain: true }))));
+  return hashOfRow(row);
 }
 
 function stopReason(assessment: Assessment): string | null {

@@ -2,11 +2,12 @@ import type { Transaction } from 'sequelize';
 import type { Assessment } from '@/hazard/types';
 import type { WorksheetState } from '@/shared/record';
 import { clock } from '../clock';
+import { Device } from '../models/Device';
 import type { Event } from '../models/Event';
 import { SignatureRow } from '../models/SignatureRow';
 import { awaitingAcknowledgement } from '../policies/worksheetActions';
 import { changeState } from './changeState';
-import { hashOf } from './contentHash';
+import { hashOf, hashOfRow } from './contentHash';
 import { notify, supervisorsOf } from './notify';
 import type { WorksheetNews } from './notify';
 import { offlinePart } from './signing';
@@ -46,7 +47,7 @@ async function tellThem(
 
 /** Everything that a signature says, for the event that vouches for it. */
 export function signatureHash(row: SignatureRow): string {
-  return hashOf(JSON.parse(JSON.stringify(row.get({ plain: true }))));
+  return hashOfRow(row);
 }
 
 interface Judged extends Held {
@@ -100,6 +101,10 @@ export async function putSignature(
     worksheet.signedCrewIds = [...new Set([...worksheet.signedCrewIds, ...worksheet.crewIds])];
   }
   const signature = await insertSignature(signing, judged, transaction);
+  if (signature.deviceId !== null) {
+    const where = { id: signature.deviceId };
+    await Device.update({ lastUsedAt: signature.receivedAt }, { where, transaction });
+  }
   const held = { worksheet, revision, signatures: [...judged.signatures, signature] };
   const from = worksheet.state;
   const event = await changeState(transaction, {

@@ -3,7 +3,7 @@ import { QueryTypes } from 'sequelize';
 import type { Transaction } from 'sequelize';
 import { clock } from '../clock';
 import { sequelize, transact } from '../db';
-import { Event } from '../models/Event';
+import type { Event } from '../models/Event';
 import { Seal } from '../models/Seal';
 import { hashOf } from './contentHash';
 import { mailSeal } from './mailSeal';

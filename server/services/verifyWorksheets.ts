@@ -1,4 +1,5 @@
 import { Op } from 'sequelize';
+import type { WorksheetContent } from '@/shared/worksheet';
 import { AttachmentRow } from '../models/AttachmentRow';
 import { CloseOutRow } from '../models/CloseOutRow';
 import { Event } from '../models/Event';
@@ -10,10 +11,11 @@ import { WorksheetRevision } from '../models/WorksheetRevision';
 import { getObject } from '../storage';
 import { photoKey } from './addAttachment';
 import { closeOutHash } from './closeWorksheet';
-import { contentHash, hashOf, sha256 } from './contentHash';
+import { contentHash, hashOf, hashOfRow, sha256 } from './contentHash';
 import { proofHash } from './proveWorksheet';
 import { signatureHash } from './putSignature';
 import type { Fault } from './verifyRecord';
+import { columnsOf } from './writeDraft';
 
 const BATCH = 200;
 
@@ -46,7 +48,7 @@ interface Vouching<T> {
   vouched: Vouched;
   /** The member of the payload that holds the hash. */
   member: string;
-  hash(row: T): string;
+  hash: (row: T) => string;
 }
 
 /** Each row has the event that vouches for it, and each such event its row. */
@@ -90,20 +92,36 @@ function judgeRevisions({ revisions, signatures, attachments }: Rows, report: Re
 }
 
 function judgeQuestions({ questions, events }: Rows, report: Report): void {
-  const asked = new Map<unknown, unknown>();
-  const answered = new Map<unknown, unknown>();
-  for (const { type, payload } of events) {
-    if (type === 'asked') asked.set(payload['questionId'], payload['textHash']);
-    if (type === 'answered') answered.set(payload['questionId'], payload['textHash']);
-  }
-  for (const { id, text, answer } of questions) {
-    if (asked.get(id) !== sha256(text)) report('questions', id, 'the question was changed');
-    if ((answered.get(id) ?? null) !== (answer === null ? null : sha256(answer))) {
-      report('questions', id, 'the answer was changed');
-    }
-    asked.delete(id);
+  const of = (type: string) =>
+    new Map(
+      events
+        .filter((event) => event.type === type)
+        .map((event) => [event.payload['questionId'], event]),
+    );
+  const asked = of('asked');
+  const answered = of('answered');
+  for (const row of questions) {
+    const question = asked.get(row.id);
+    const isAsAsked =
+      question?.payload['textHash'] === sha256(row.text) && question.actorId === row.askedById;
+    if (!isAsAsked) report('questions', row.id, 'the question was changed');
+    const answer = answered.get(row.id);
+    const isAsAnswered =
+      (answer?.payload['textHash'] ?? null) === (row.answer === null ? null : sha256(row.answer)) &&
+      (answer?.actorId ?? null) === row.answeredById;
+    if (!isAsAnswered) report('questions', row.id, 'the answer was changed');
+    asked.delete(row.id);
   }
   for (const id of asked.keys()) report('questions', String(id), 'the row is missing');
+}
+
+type Deciding = Pick<Worksheet, 'siteId' | 'startsAt' | 'endsAt' | 'mode' | 'crewIds'>;
+
+/** The columns that decide who sees it and when it is over must be those of the content. */
+function standsAsItsContent(worksheet: Worksheet, content: WorksheetContent): boolean {
+  const deciding = ({ siteId, startsAt, endsAt, mode, crewIds }: Deciding) =>
+    JSON.stringify([siteId, startsAt, endsAt, mode, crewIds]);
+  return deciding(worksheet) === deciding(columnsOf(content));
 }
 
 function judgeHead(worksheet: Worksheet, { revisions, events, proofs }: Rows, report: Report) {
@@ -118,6 +136,10 @@ function judgeHead(worksheet: Worksheet, { revisions, events, proofs }: Rows, re
   if (states.at(-1) !== state) wrong('its state is not the one that the trail ends with');
   if (Math.max(...revisions.map((row) => row.revision)) !== revision) {
     wrong('its revision is not the latest');
+  }
+  const head = revisions.find((row) => row.revision === revision);
+  if (head !== undefined && !standsAsItsContent(worksheet, head.content)) {
+    wrong('its place, hours, path or crew are not those of its content');
   }
   const latest = proofs.filter((row) => row.revision === revision).at(-1);
   if (proved !== (latest?.assessment.verdict === 'ready')) {
@@ -141,8 +163,8 @@ async function judgePhotos({ attachments, events }: Rows, report: Report): Promi
       table: 'attachments',
       rows: attachments,
       vouched,
-      member: 'sha256',
-      hash: (row) => row.sha256,
+      member: 'photoHash',
+      hash: hashOfRow,
     },
     report,
   );

@@ -226,11 +226,11 @@ describe('exports', () => {
     expect(answer.status).toBe(200);
     expect(answer.headers['content-type']).toBe('text/csv; charset=utf-8');
     expect(answer.text.charCodeAt(0)).toBe(0xfeff);
-    const rows = parseCsv(answer.text, {
+    const rows: Record<string, string>[] = parseCsv(answer.text, {
       bom: true,
       columns: true,
       record_delimiter: '\r\n',
-    }) as Record<string, string>[];
+    });
     expect(rows[0]).toMatchObject({ site: 'Marlow Annex', task: 'replace luminaire' });
     expect(rows.map(({ equipment }) => equipment)).toContain("'-stair lights");
     expect(

@@ -168,6 +168,7 @@ describe('verify', () => {
     ['questions', `UPDATE questions SET text = 'Anything?'`],
     ['questions', `UPDATE questions SET answer = 'No.'`],
     ['worksheets', `UPDATE worksheets SET state = 'in-force' WHERE state = 'closed'`],
+    ['worksheets', `UPDATE worksheets SET ends_at = ends_at + interval '1 day'`],
     ['worksheets', `UPDATE worksheets SET proved = NOT proved`],
     ['worksheets', `DELETE FROM worksheets WHERE state = 'closed'`],
     ['seals', `UPDATE seals SET count = count - 1`],
