@@ -20,7 +20,7 @@ export interface Session {
 function keptUser(): SessionUser | undefined {
   const kept = deviceStorage.get(KEPT_USER);
   if (kept === null) return undefined;
-  const parsed = sessionSchema.safeParse({ user: JSON.parse(kept) });
+  const parsed = sessionSchema.safeParse({ user: JSON.parse(kept) as unknown });
   return parsed.success ? parsed.data.user : undefined;
 }
 

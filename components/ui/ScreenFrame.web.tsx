@@ -3,7 +3,7 @@ import { StyleSheet, View, type ViewStyle } from 'react-native';
 import { useTheme } from '../theme/useTheme';
 
 /** React Native's types know neither `sticky` nor viewport units, which the web target takes. */
-const web = (style: Record<string, string | number>): ViewStyle => style as ViewStyle;
+const web = (style: Record<string, string | number>): ViewStyle => style;
 
 export interface ScreenFrameProps {
   header: ReactNode;

@@ -33,7 +33,7 @@ export interface TextFieldProps extends FieldProps {
 }
 
 /** One line, or several, of text. */
-export function TextField(props: TextFieldProps) {
+export function TextField({ ref, ...props }: TextFieldProps) {
   const { value, unit, secure, multiline, exact, reason, required } = props;
   const generated = useId();
   const id = props.id ?? generated;
@@ -56,7 +56,7 @@ export function TextField(props: TextFieldProps) {
         ]}
       >
         <TextInput
-          ref={props.ref}
+          ref={ref}
           id={id}
           {...webProps({ ...aria, 'aria-required': required })}
           value={value}

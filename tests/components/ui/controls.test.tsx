@@ -205,7 +205,7 @@ describe('NumberField', () => {
       <NumberField label="Watts" value={undefined} onChange={() => undefined} />,
     );
     rerender(<NumberField label="Watts" value={728} onChange={() => undefined} />);
-    expect((screen.getByRole('textbox', { name: 'Watts' }) as HTMLInputElement).value).toBe('728');
+    expect(screen.getByRole<HTMLInputElement>('textbox', { name: 'Watts' }).value).toBe('728');
   });
 });
 
