@@ -12,17 +12,13 @@ function isFields(value: unknown): value is Fields {
   return typeof value === 'object' && value !== null && !Array.isArray(value);
 }
 
-function isRow(value: unknown): value is Fields {
-  return isFields(value);
-}
-
 function escaped(key: string): string {
   return key.replaceAll('~', '~0').replaceAll('/', '~1');
 }
 
 /** Rows that carry an id are told apart by it: one put in front does not change all that follow. */
 function idOf(row: unknown): string | undefined {
-  return isRow(row) && typeof row['id'] === 'string' && row['id'] !== '' ? row['id'] : undefined;
+  return isFields(row) && typeof row['id'] === 'string' && row['id'] !== '' ? row['id'] : undefined;
 }
 
 function haveIds(rows: readonly unknown[]): boolean {
@@ -53,7 +49,7 @@ function differencesOfRows(
 
 /** A list of plain answers (topics, conditions) is one answer: it is shown whole. */
 function isListOfRows(value: unknown): value is unknown[] {
-  return Array.isArray(value) && value.length > 0 && value.every(isRow);
+  return Array.isArray(value) && value.length > 0 && value.every(isFields);
 }
 
 function isEmptyList(value: unknown): value is unknown[] {

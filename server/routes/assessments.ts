@@ -5,7 +5,7 @@ import { currentUser } from '../currentUser';
 import { requireUser } from '../middleware/requireUser';
 import { parse } from '../parse';
 import { assessAt } from '../services/assessAt';
-import { placeOf } from '../services/siteOf';
+import { placeOf } from '../services/placeOf';
 
 export const assessmentsRouter = Router();
 

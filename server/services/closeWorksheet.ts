@@ -12,7 +12,7 @@ import { actOn, changeState } from './changeState';
 import { checkPin } from './checkPin';
 import { hashOf, hashOfRow } from './contentHash';
 import { currentRevision } from './readRecord';
-import { placeOf } from './siteOf';
+import { placeOf } from './placeOf';
 
 type Photo = Pick<AttachmentRow, 'id' | 'sha256'>;
 

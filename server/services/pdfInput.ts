@@ -15,7 +15,7 @@ import { canonicalJson, signedForm } from './contentHash';
 import { listEvents, listRevisions, readRevision } from './readHistory';
 import { loadPeople } from './readRecord';
 import type { WorksheetParts } from './readRecord';
-import { placeOf } from './siteOf';
+import { placeOf } from './placeOf';
 
 type Printed = Omit<WorksheetRecord, 'actions'>;
 

@@ -13,7 +13,7 @@ import { hashOf, hashOfRow } from './contentHash';
 import { notify, supervisorsOf } from './notify';
 import { currentRevision } from './readRecord';
 import { recordEvent } from './recordEvent';
-import { placeOf } from './siteOf';
+import { placeOf } from './placeOf';
 import { metColumns } from './writeDraft';
 
 interface NewProof {

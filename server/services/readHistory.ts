@@ -10,7 +10,7 @@ import { notFound } from '../problem';
 import { assessAt } from './assessAt';
 import { loadPeople } from './readRecord';
 import type { People } from './readRecord';
-import { placeOf } from './siteOf';
+import { placeOf } from './placeOf';
 import { attachmentsOf } from './writeDraft';
 
 export interface RevisionParts {

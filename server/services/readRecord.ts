@@ -10,8 +10,8 @@ import { User } from '../models/User';
 import type { Worksheet } from '../models/Worksheet';
 import { WorksheetRevision } from '../models/WorksheetRevision';
 import { assessAt } from './assessAt';
-import { placeOf } from './siteOf';
-import type { WorksheetPlace } from './siteOf';
+import { placeOf } from './placeOf';
+import type { WorksheetPlace } from './placeOf';
 
 /** People by id, for names. Retired ones too: the record keeps who it was. */
 export type People = ReadonlyMap<string, Pick<User, 'id' | 'name' | 'role'>>;

@@ -6,7 +6,7 @@ import { conflict, hashMismatch, notReady, wrongState } from '../problem';
 import { applyRegister } from './applyRegister';
 import { assessAt } from './assessAt';
 import type { Held, Signing } from './signing';
-import { placeOf } from './siteOf';
+import { placeOf } from './placeOf';
 import { isSameContent } from './writeDraft';
 
 /** The state awaits this meaning, and nobody signs a revision twice. */

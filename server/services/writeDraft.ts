@@ -10,7 +10,7 @@ import { WorksheetRevision } from '../models/WorksheetRevision';
 import type { SeenStop } from '../models/WorksheetRevision';
 import { assessAt } from './assessAt';
 import { canonicalJson, contentHash } from './contentHash';
-import { placeOf } from './siteOf';
+import { placeOf } from './placeOf';
 
 /** The photos that a revision holds: its own and those of the revisions before. */
 export function attachmentsOf(
