@@ -1,4 +1,4 @@
-import type { Browser, Page } from 'playwright-core';
+import type { Browser, Locator, Page } from 'playwright-core';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import {
   drawSignature,
@@ -30,11 +30,16 @@ afterAll(async () => {
   await server?.stop();
 });
 
-const section = (page: Page, name: string) =>
-  page.getByRole('region', { name, exact: false }).first();
+/** One of the twelve sections, unfolded. */
+async function section(page: Page, name: string): Promise<Locator> {
+  const region = page.getByRole('region', { name }).first();
+  const head = region.getByRole('heading', { level: 2 }).getByRole('button');
+  if ((await head.getAttribute('aria-expanded')) === 'false') await head.click();
+  return region;
+}
 
 async function fillJob(page: Page): Promise<void> {
-  const job = section(page, 'Job');
+  const job = await section(page, 'Job');
   await select(job, 'Site', 'Ashgrove Commons');
   await type(job, 'Area', 'Level 2 corridor');
   await type(job, 'Equipment', 'LED luminaires C1, C3, C5, C6');
@@ -62,7 +67,7 @@ async function fillJob(page: Page): Promise<void> {
 }
 
 async function fillSupply(page: Page): Promise<void> {
-  const supply = section(page, 'Supply');
+  const supply = await section(page, 'Supply');
   await select(supply, 'System', /480Y\/277/);
   await pick(supply, 'Circuit voltage', /277/);
   await type(supply, 'Panel', 'LP-2');
@@ -95,7 +100,7 @@ interface Way {
 }
 
 async function addWay(page: Page, way: Way): Promise<void> {
-  const ways = section(page, 'Ways it can be live');
+  const ways = await section(page, 'Ways it can be live');
   await ways.getByRole('button', { name: 'Add a way it can be live' }).click();
   await select(ways, 'Kind of way', way.kind);
   await type(ways, 'Where it comes from', way.from);
@@ -111,7 +116,7 @@ async function addWay(page: Page, way: Way): Promise<void> {
 }
 
 async function fillSources(page: Page, battery: string): Promise<void> {
-  const ways = section(page, 'Ways it can be live');
+  const ways = await section(page, 'Ways it can be live');
   await tick(ways, 'Battery units');
   await pick(ways, 'Does it reach this equipment?', /It reaches this equipment/);
   await type(ways, 'Who runs the building and was told', 'Building control room');
@@ -147,20 +152,20 @@ async function fillSources(page: Page, battery: string): Promise<void> {
 }
 
 async function fillTheRest(page: Page): Promise<void> {
-  await pick(section(page, 'Off or energized'), 'Off or energized', /^Off/);
+  await pick(await section(page, 'Off or energized'), 'Off or energized', /^Off/);
 
-  const test = section(page, 'Test for absence of voltage');
+  const test = await section(page, 'Test for absence of voltage');
   await pick(test, 'Instrument', 'Contact tester');
   await pick(test, 'Measurement category', 'CAT III');
   await type(test, 'Rated for', '1000');
   await select(test, 'Who tests', new RegExp(LEAD.name));
   await tick(test, /instrument, leads and probes/);
 
-  const boundaries = section(page, 'Approach boundaries');
+  const boundaries = await section(page, 'Approach boundaries');
   await pick(boundaries, 'What is exposed', /two-wire circuit/);
   await pick(boundaries, 'Can a conductor swing toward someone?', /^No/);
 
-  const arc = section(page, 'Arc flash');
+  const arc = await section(page, 'Arc flash');
   await select(arc, 'Kind of equipment', /^Luminaire/);
   for (const condition of await arc.getByRole('checkbox').all()) await condition.click();
   await type(arc, 'Working distance, face and chest to the part', '18 in');
@@ -169,10 +174,10 @@ async function fillTheRest(page: Page): Promise<void> {
   await type(arc, 'Clearing time', '0.025');
   await type(arc, 'Lowest arc rating worn', '8');
 
-  const equipment = section(page, 'Protective equipment');
+  const equipment = await section(page, 'Protective equipment');
   await select(equipment, 'Gloves from the register', /AC-0-117/);
 
-  const around = section(page, 'Surroundings');
+  const around = await section(page, 'Surroundings');
   await around.getByRole('button', { name: 'Add a grounded surface' }).click();
   await select(around, 'Grounded surface', 'Ceiling grid');
   await pick(around, 'Is it in reach?', 'Yes');
@@ -194,21 +199,27 @@ async function fillTheRest(page: Page): Promise<void> {
 }
 
 async function fillCrew(page: Page): Promise<void> {
-  const crew = section(page, 'Crew and briefing');
+  const crew = await section(page, 'Crew and briefing');
   await select(crew, 'How close they come until it is proved dead', /restricted/i);
-  for (const line of [/work on the circuit/, /wear arc-rated/, /trained in release/])
-    await tick(crew, line);
+  for (const line of [/wear arc-rated/, /trained in release/]) await tick(crew, line);
+  const works = crew.getByRole('radiogroup', { name: 'Do they work on the circuit?' });
+  await works.nth(0).getByRole('radio', { name: 'Yes' }).click();
   await select(crew, 'Add a person of this site', new RegExp(HELPER.name));
+  await works.nth(1).getByRole('radio', { name: 'No' }).click();
   const closest = crew.getByRole('button', { name: /^How close they come/ }).nth(1);
   await closest.click();
   await pick(crew, 'How close they come until it is proved dead', /Outside all/i);
 }
 
+/** Ticks every line that is still open; each tick may bring new lines. */
+async function tickAll(where: Locator, name?: RegExp): Promise<void> {
+  const left = where.getByRole('checkbox', { checked: false, ...(name && { name }) });
+  while ((await left.count()) > 0) await left.first().click();
+}
+
 async function finish(page: Page): Promise<void> {
-  const equipment = section(page, 'Protective equipment');
-  for (const line of await equipment.getByRole('checkbox', { checked: false }).all())
-    await line.click();
-  const crew = section(page, 'Crew and briefing');
+  await tickAll(await section(page, 'Protective equipment'));
+  const crew = await section(page, 'Crew and briefing');
   for (const [label, value] of [
     ['Who to call', '911, then 555-0142'],
     ['Rescue', 'Second person with the insulated hook'],
@@ -217,11 +228,10 @@ async function finish(page: Page): Promise<void> {
   ] as const) {
     await type(crew, label, value);
   }
-  const topics = crew.getByRole('checkbox', {
-    checked: false,
-    name: /hazards|boundar|tasks|procedures|precautions|controls|equipment|close|plan|refusing/i,
-  });
-  while ((await topics.count()) > 0) await topics.first().click();
+  await tickAll(
+    crew,
+    /tasks|hazards|protection$|procedures|precautions|each source|Protective equipment|how close$|Emergency plan|refusing/,
+  );
 }
 
 describe('four LED drivers in a level 2 corridor, 480Y/277, LP-2/14', () => {

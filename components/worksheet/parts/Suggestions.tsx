@@ -27,6 +27,7 @@ export function Suggestions({ from, values, onTake }: Props) {
             icon="plus"
             onPress={() => onTake(value)}
             aria-label={words.worksheet.takeSuggestion(value)}
+            style={styles.button}
           />
         ))}
       </View>
@@ -36,5 +37,7 @@ export function Suggestions({ from, values, onTake }: Props) {
 
 const styles = StyleSheet.create({
   box: { gap: space.xs },
+  // A long suggestion takes a second line rather than widening the page.
+  button: { maxWidth: '100%', flexShrink: 1 },
   row: { flexDirection: 'row', flexWrap: 'wrap', gap: 10 },
 });

@@ -9,7 +9,7 @@ import { space } from '../../theme/tokens';
 import { useTheme } from '../../theme/useTheme';
 import { Button, CheckRow, FirstAidPanel, Select, StateMark, Text } from '../../ui';
 import { FieldCheck } from '../form/FieldCheck';
-import { FieldSelect, FieldText } from '../form/fields';
+import { FieldSelect, FieldText, FieldYesNo } from '../form/fields';
 import { useShowField } from '../form/shownFields';
 import { wordOf } from '../form/fieldWords';
 import { useFieldState, useWorksheetForm } from '../form/WorksheetFormContext';
@@ -63,9 +63,9 @@ function Member({ index, onRemove }: { index: number; onRemove: () => void }) {
       {member.userId === undefined && <FieldText name={at('name')} />}
       <FindingPanels findings={findings} />
       <FieldSelect name={at('closest')} values={CLOSEST} group="closest" />
+      <FieldYesNo name={at('worksOnCircuit')} />
       <View>
         <FieldCheck name={at('lead')} />
-        <FieldCheck name={at('worksOnCircuit')} />
         <FieldCheck name={at('arcRated')} />
         <FieldCheck name={at('rescueTrained')} />
       </View>
