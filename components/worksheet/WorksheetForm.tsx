@@ -148,7 +148,7 @@ function LiveForm({ record, kept, stale }: Props) {
     const handleTakeTheirs = async () => {
       await discard();
       rebase(record.version);
-      form.reset(record.content as FieldValues);
+      form.reset(record.content);
     };
     const handleKeepMine = () => {
       rebase(record.version);

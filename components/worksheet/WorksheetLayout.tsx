@@ -35,7 +35,7 @@ interface Props {
 }
 
 /** React Native's types do not know `sticky`; elsewhere than on the web the strip scrolls along. */
-const web = (style: Record<string, string | number>): ViewStyle => style as ViewStyle;
+const web = (style: Record<string, string | number>): ViewStyle => style;
 
 /** The strip stays in view; pressed, it unfolds into the drawing below it. */
 function Strip() {

@@ -19,7 +19,7 @@ const NO_FAULTS: never[] = [];
 export function WorksheetReadOnly({ record, stale }: Props) {
   const { worksheet: words } = useMessages();
   const sites = useSites();
-  const form = useForm<FieldValues>({ values: record.content as FieldValues });
+  const form = useForm<FieldValues>({ values: record.content });
   return (
     <FormProvider {...form}>
       <WorksheetFormProvider

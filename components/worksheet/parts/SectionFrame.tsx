@@ -12,6 +12,7 @@ import { useWorksheetForm } from '../form/WorksheetFormContext';
 import { openSectionsAtom, sectionAnchor } from '../worksheetAtoms';
 import { FindingPanels, isUnanswered } from './FindingPanels';
 import { SectionFacts } from './SectionFacts';
+import { SectionPhotos } from './SectionPhotos';
 import { sectionState } from './sectionState';
 
 interface Props {
@@ -56,6 +57,7 @@ export function SectionFrame({ section, folded, detail, state, readOnly, childre
           {editable ? children : (readOnly ?? <SectionFacts section={section} />)}
         </View>
         <HomelessFindings section={section} />
+        <SectionPhotos record={record} section={section} />
       </ShownFieldsProvider>
     </Section>
   );

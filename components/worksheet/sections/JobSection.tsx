@@ -12,8 +12,11 @@ import {
   FieldYesNo,
 } from '../form/fields';
 import { wordOf } from '../form/fieldWords';
+import { useSetField } from '../form/useSetField';
 import { useWorksheetForm } from '../form/WorksheetFormContext';
 import { SectionFrame } from '../parts/SectionFrame';
+import { Suggestions } from '../parts/Suggestions';
+import { useLastHere } from '../lastHere';
 import { useSites } from '../registerQueries';
 
 const TASKS_WITH_LAMPS = new Set([
@@ -44,6 +47,18 @@ function JobSummary() {
       )}
     </>
   );
+}
+
+/** What was so the last time, to be confirmed: people come and go. */
+function OccupiedSuggestion() {
+  const words = useMessages();
+  const { content } = useWorksheetForm();
+  const last = useLastHere();
+  const take = useSetField('job.occupied');
+  const before = last?.content.job?.occupied;
+  if (before === undefined || content.job?.occupied !== undefined) return null;
+  const value = before ? words.ui.yes : words.ui.no;
+  return <Suggestions from={last?.from ?? ''} values={[value]} onTake={() => take(before)} />;
 }
 
 /** 1. What, where, when. */
@@ -78,6 +93,7 @@ export function JobSection() {
       )}
       {off && <FieldNumber name="job.pointsOfWork" whole min={1} max={40} />}
       <FieldYesNo name="job.occupied" />
+      <OccupiedSuggestion />
       {off && <FieldYesNo name="job.crossesShift" />}
       {off && job.crossesShift === true && <FieldText name="job.handover" multiline />}
       <FieldMulti

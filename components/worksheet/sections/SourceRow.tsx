@@ -146,7 +146,7 @@ export function SourceRow({ index, readOnly, onRemove }: Props) {
     return (
       <View
         style={[styles.row, edge]}
-        aria-label={`3.${index + 1} ${name}, ${words.ui.state[state as 'stop' | 'open' | 'complete']}`}
+        aria-label={`3.${index + 1} ${name}, ${words.ui.state[state]}`}
       >
         <View style={styles.head}>
           <Head row={row} index={index} open={undefined} />
@@ -159,7 +159,7 @@ export function SourceRow({ index, readOnly, onRemove }: Props) {
       <Pressable
         role="button"
         aria-expanded={open}
-        aria-label={`3.${index + 1} ${name}, ${words.ui.state[state as 'stop' | 'open' | 'complete']}`}
+        aria-label={`3.${index + 1} ${name}, ${words.ui.state[state]}`}
         onPress={() => setOpenRows((before) => ({ ...before, [key]: !open }))}
         style={styles.head}
       >

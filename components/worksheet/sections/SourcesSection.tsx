@@ -2,14 +2,18 @@ import { useSetAtom } from 'jotai';
 import { useFieldArray } from 'react-hook-form';
 import { View, StyleSheet } from 'react-native';
 import { EGRESS_REACHES, EGRESS_SUPPLIES } from '@/hazard';
+import { list } from '@/shared/format';
+import { useLocale } from '../../i18n/preferences';
 import { useMessages } from '../../i18n/useMessages';
 import { space } from '../../theme/tokens';
 import { Button, Text } from '../../ui';
 import { FieldChoice, FieldMulti, FieldText } from '../form/fields';
+import { wordOf } from '../form/fieldWords';
 import { useSetField } from '../form/useSetField';
 import { useShowField } from '../form/shownFields';
 import { useFieldState, useWorksheetForm } from '../form/WorksheetFormContext';
 import { FindingPanels } from '../parts/FindingPanels';
+import { useLastHere } from '../lastHere';
 import { SectionFrame } from '../parts/SectionFrame';
 import { Suggestions } from '../parts/Suggestions';
 import { openSectionsAtom } from '../worksheetAtoms';
@@ -56,6 +60,7 @@ function Egress() {
         group="egressSupply"
         alone={['none after checking', 'unknown']}
       />
+      <EgressSuggestion />
       {named && <FieldChoice name="egressReaches" values={EGRESS_REACHES} group="egressReaches" />}
       {named && reaches && (
         <>
@@ -66,6 +71,23 @@ function Egress() {
       )}
     </>
   );
+}
+
+/** What fed the egress lighting the last time, to be confirmed; what was not known then is not offered. */
+function EgressSuggestion() {
+  const words = useMessages();
+  const locale = useLocale();
+  const { content } = useWorksheetForm();
+  const last = useLastHere();
+  const take = useSetField('egressSupply');
+  const before = last?.content.egressSupply ?? [];
+  const answered = (content.egressSupply ?? []).length > 0;
+  if (answered || before.length === 0 || before.includes('unknown')) return null;
+  const value = list(
+    locale,
+    before.map((supply) => wordOf(words, 'egressSupply', supply)),
+  );
+  return <Suggestions from={last?.from ?? ''} values={[value]} onTake={() => take(before)} />;
 }
 
 function DeskSuggestion({ desk, from }: { desk: string | undefined; from: string }) {

@@ -1,4 +1,3 @@
-import { useFormContext } from 'react-hook-form';
 import { StyleSheet, View } from 'react-native';
 import {
   CONDUCTOR_COLORS,
@@ -26,7 +25,11 @@ import {
 import { wordOf } from '../form/fieldWords';
 import { useWorksheetForm } from '../form/WorksheetFormContext';
 import { SectionFrame } from '../parts/SectionFrame';
-import { Suggestions } from '../parts/Suggestions';
+import {
+  CircuitSuggestions,
+  PanelSuggestions,
+  SystemSuggestions,
+} from '../parts/SupplySuggestions';
 
 const AT_SERVICE = new Set(['panelboard', 'switchboard', 'disconnect', 'transformer']);
 
@@ -110,25 +113,17 @@ function Readings() {
 
 /** 2. What feeds it: the system, the voltage, the circuit, and what the meter says of them. */
 export function SupplySection() {
-  const words = useMessages();
   const locale = useLocale();
-  const { content, site } = useWorksheetForm();
-  const { setValue } = useFormContext();
+  const { content } = useWorksheetForm();
   const supply = content.supply ?? {};
   const path = pathOf(content);
   const phaseToNeutral = supply.circuitVolts === 120 || supply.circuitVolts === 277;
   const lowVolts =
     content.decision?.reason === 'below 50 V' || content.job?.task === 'work on lighting control';
-  const setPanel = (name: string) => {
-    const panel = site?.panels.find((each) => each.name === name);
-    setValue('supply.panel', name, { shouldDirty: true });
-    if (panel?.system !== undefined && supply.system === undefined) {
-      setValue('supply.system', panel.system, { shouldDirty: true });
-    }
-  };
   return (
     <SectionFrame section="supply" folded={<SupplySummary />}>
       <FieldSelect name="supply.system" values={SYSTEMS} group="system" />
+      <SystemSuggestions />
       {supply.system !== undefined && (
         <FieldChoice
           name="supply.circuitVolts"
@@ -137,14 +132,9 @@ export function SupplySection() {
         />
       )}
       <FieldText name="supply.panel" exact />
-      <Suggestions
-        from={words.worksheet.fromSite}
-        values={(site?.panels ?? [])
-          .map(({ name }) => name)
-          .filter((name) => name !== supply.panel)}
-        onTake={setPanel}
-      />
+      <PanelSuggestions />
       <FieldText name="supply.circuit" exact />
+      <CircuitSuggestions />
       {AT_SERVICE.has(content.arcFlash?.equipment ?? '') && <FieldYesNo name="supply.atService" />}
       <FieldMulti name="supply.switching" values={SWITCHINGS} group="switching" alone={['none']} />
       {phaseToNeutral ? (
