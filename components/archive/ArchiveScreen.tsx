@@ -9,7 +9,7 @@ import { useLocale } from '../i18n/preferences';
 import { useMessages } from '../i18n/useMessages';
 import { layout, space } from '../theme/tokens';
 import { useBreakpoint } from '../theme/useBreakpoint';
-import { Button, Notice, PlacesList, Screen, Text, describeFault } from '../ui';
+import { Button, Notice, Screen, Text, describeFault } from '../ui';
 import { ArchiveList } from './ArchiveList';
 import { archiveQuery } from './archiveQueries';
 import { clearFilters, Filters } from './Filters';
@@ -182,7 +182,6 @@ export function ArchiveScreen() {
         onOpen={handleOpen}
       />
       {isPhone && <Exports filters={filters} />}
-      <PlacesList hidden={['archive']} />
     </Screen>
   );
 }

@@ -20,5 +20,8 @@ export function useListPlace(key: string, ready: boolean): void {
 
 /** A record that covers the list starts at its top. */
 export function useTopOf(record: string): void {
-  useEffect(() => window.scrollTo(0, 0), [record]);
+  useEffect(() => {
+    // Newer browsers answer a promise here, which is no clean-up.
+    void window.scrollTo(0, 0);
+  }, [record]);
 }

@@ -10,15 +10,7 @@ import { useMessages } from '../i18n/useMessages';
 import { rule, space } from '../theme/tokens';
 import { useBreakpoint } from '../theme/useBreakpoint';
 import { useTheme } from '../theme/useTheme';
-import {
-  LoadingScreen,
-  Notice,
-  OfflineScreen,
-  PlacesList,
-  ProblemScreen,
-  Screen,
-  Text,
-} from '../ui';
+import { LoadingScreen, Notice, OfflineScreen, ProblemScreen, Screen, Text } from '../ui';
 import { worksheetQuery } from '../worksheet/worksheetQueries';
 import { boardRowsQuery } from './boardQueries';
 import { boardRows, waitsForPerson, type BoardRow } from './boardRows';
@@ -182,7 +174,6 @@ export function BoardScreen() {
           <InForce rows={rows} now={now} />
         </View>
       </View>
-      <PlacesList hidden={['board']} />
     </Screen>
   );
 }

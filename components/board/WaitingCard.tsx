@@ -18,6 +18,14 @@ import { exceptionsOf, type Exception } from './exceptions';
 
 const MOST_DEVIATIONS = 4;
 
+/** Under this width the two columns of a wide screen leave no room for a column of numbers. */
+const NUMBER_BESIDE = 1500;
+
+function useStacked(): boolean {
+  const { isPhone, isWide, width } = useBreakpoint();
+  return isPhone || (isWide && width < NUMBER_BESIDE);
+}
+
 function ExceptionLine({ exception, first }: { exception: Exception; first: boolean }) {
   const { colors } = useTheme();
   const { mark, icon, title, note, citation } = exception;
@@ -145,7 +153,7 @@ interface Props {
 function Head({ row, now, open, end }: Pick<Props, 'row' | 'now' | 'open'> & { end: ReactNode }) {
   const messages = useMessages();
   const { board } = messages;
-  const { isPhone } = useBreakpoint();
+  const stacked = useStacked();
   const since = board.since(durationText(Date.parse(now) - Date.parse(row.updatedAt)));
   const crew = row.crew.length > 0 ? row.crew.map(({ name }) => name).join(', ') : row.leadName;
   const about = [
@@ -153,20 +161,20 @@ function Head({ row, now, open, end }: Pick<Props, 'row' | 'now' | 'open'> & { e
     crew,
     row.mode === 'energized' ? board.energized : board.off,
     board.revision(row.revision),
-    ...(isPhone || !open ? [since] : []),
+    ...(stacked || !open ? [since] : []),
   ];
   return (
-    <View style={isPhone ? styles.headPhone : styles.head}>
-      <Text variant="section" weight="700" style={[styles.number, !isPhone && styles.numberWide]}>
+    <View style={stacked ? styles.headPhone : styles.head}>
+      <Text variant="section" weight="700" style={[styles.number, !stacked && styles.numberWide]}>
         {row.number}
       </Text>
-      <View style={isPhone ? undefined : styles.words}>
+      <View style={stacked ? undefined : styles.words}>
         <Text variant="section" level={3} style={styles.title}>
           {taskWords(row, messages)}
         </Text>
         <Text variant="note" color="ink2">{`${about.join('. ')}.`}</Text>
       </View>
-      {!isPhone && open && (
+      {!stacked && open && (
         <Text variant="note" weight="600" style={styles.since}>
           {since}
         </Text>
@@ -182,11 +190,11 @@ export function WaitingCard({ row, record, now, open, onOpen }: Props) {
   const locale = useLocale();
   const units = useUnits();
   const { colors } = useTheme();
-  const { isPhone } = useBreakpoint();
+  const stacked = useStacked();
   const { board } = words;
   const exceptions =
     record.data === undefined ? undefined : exceptionsOf(record.data, { words, locale, units });
-  const inset = isPhone ? undefined : styles.inset;
+  const inset = stacked ? undefined : styles.inset;
   return (
     <View role="listitem" style={[styles.card, { borderTopColor: colors.ink }]}>
       <Head

@@ -31,7 +31,7 @@ function kindOf(row: WorksheetRow, now: string): BarKind {
   if (row.state === 'expired') return 'over';
   if (row.state !== 'in-force') return 'waits';
   // The clock may not have moved it on yet.
-  if (row.endsAt !== null && row.endsAt < now) return 'over';
+  if (row.endsAt !== null && Date.parse(row.endsAt) < Date.parse(now)) return 'over';
   if (row.mode === 'energized') return 'energized';
   return row.proved ? 'proved' : 'not-proved';
 }
@@ -81,6 +81,9 @@ function isOfToday(row: WorksheetRow, kind: BarKind, now: string): boolean {
   return true;
 }
 
+const endOf = ({ row }: BoardRow) =>
+  row.endsAt === null ? Number.MAX_SAFE_INTEGER : Date.parse(row.endsAt);
+
 /** Energized work that is over time stays with the energized. */
 function rank({ row, kind }: BoardRow): number {
   return kind === 'over' && row.mode === 'energized' ? -1 : ORDER.indexOf(kind);
@@ -101,5 +104,5 @@ export function boardRows(
       mark: MARKS[kind],
       words: wordsOf(row, kind, words, seen),
     }))
-    .sort((a, b) => rank(a) - rank(b) || (a.row.endsAt ?? '').localeCompare(b.row.endsAt ?? ''));
+    .sort((a, b) => rank(a) - rank(b) || endOf(a) - endOf(b));
 }

@@ -67,7 +67,7 @@ export function ticksOf(ruler: Ruler, width: number): Tick[] {
 /** The hours that are written, as far apart as their figures need. */
 export function hoursOf(ruler: Ruler, width: number): number[] {
   const pxPerHour = width / ((ruler.to - ruler.from) / HOUR);
-  const step = [1, 2, 3, 4, 6, 12].find((hours) => hours * pxPerHour >= 58) ?? 12;
+  const step = [1, 2, 3, 4, 6, 12].find((hours) => hours * pxPerHour >= 66) ?? 12;
   const hours: number[] = [];
   for (let minute = ruler.from; minute <= ruler.to; minute += HOUR) {
     if ((minute / HOUR) % step === 0) hours.push(minute);

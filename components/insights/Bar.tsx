@@ -12,7 +12,7 @@ const GAP = 3;
 /** More crossed squares than this are no longer counted by eye. */
 const MOST_SQUARES = 40;
 
-interface Amount {
+interface AmountProps {
   count: number;
   /** The largest count beside it: the full length of a bar. */
   most: number;
@@ -24,7 +24,7 @@ interface Amount {
 }
 
 /** A length for a count: squares while all counts are few, else a bar. */
-export function Amount({ count, most, leads, height = 22, squares = most <= FEW }: Amount) {
+export function Amount({ count, most, leads, height = 22, squares = most <= FEW }: AmountProps) {
   const { colors } = useTheme();
   const backgroundColor = leads ? colors.blue : colors.ink;
   if (squares) {

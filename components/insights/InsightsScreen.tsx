@@ -13,7 +13,6 @@ import {
   LoadingScreen,
   Notice,
   OfflineScreen,
-  PlacesList,
   ProblemScreen,
   Screen,
   Text,
@@ -157,7 +156,6 @@ export function InsightsScreen() {
         </>
       )}
       {!isWide && <View style={styles.below}>{side}</View>}
-      <PlacesList hidden={['insights']} />
     </Screen>
   );
 }

@@ -145,9 +145,11 @@ export function MonthChart({ byMonth, months, address }: Props) {
       </View>
       {asLines ? (
         <View role="list">
-          {columns.map((column, index) => (
-            <Line key={column.month.month} {...column} first={index === 0} />
-          ))}
+          {columns
+            .filter(({ month }) => month.worksheets > 0)
+            .map((column, index) => (
+              <Line key={column.month.month} {...column} first={index === 0} />
+            ))}
         </View>
       ) : (
         <View role="list" style={styles.columns}>

@@ -32,7 +32,13 @@ export function Redirect({ href }: { href: Href }) {
   return null;
 }
 
-export const router = { push: vi.fn(), replace: vi.fn(), back: vi.fn() };
+export const router = {
+  push: vi.fn(),
+  replace: vi.fn(),
+  back: vi.fn(),
+  setParams: vi.fn(),
+  canGoBack: () => false,
+};
 export const useRouter = () => router;
 export const usePathname = () => '/';
 export const useLocalSearchParams = () => ({});
