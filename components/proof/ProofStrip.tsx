@@ -8,7 +8,7 @@ import { DistanceStrip } from '../worksheet/DistanceStrip';
 import { SectionDrawing } from '../worksheet/SectionDrawing';
 
 /** React Native's types do not know `sticky`; elsewhere than on the web the strip scrolls along. */
-const web = (style: Record<string, string | number>): ViewStyle => style as ViewStyle;
+const web = (style: object): ViewStyle => style;
 
 /** The distances stay in view until it is proved dead; pressed, the strip unfolds into the drawing. */
 export function ProofStrip({ record }: { record: WorksheetRecord }) {

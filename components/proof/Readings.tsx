@@ -43,31 +43,30 @@ interface MatrixProps {
   lowImpedance: boolean;
 }
 
-function useCell({ state, name, lowImpedance }: MatrixProps) {
+/** One cell of the matrix, bound to what the form holds of it. */
+function BoundCell({ of: cell, state, name, lowImpedance }: MatrixProps & { of: Cell }) {
   const said = useMessages().proof.readings;
   const { form, plan, change, stamp } = state;
-  return (cell: Cell) => {
-    const key = cellKey(cell);
-    return (
-      <ReadingCell
-        id={`cell-${key.replace(/[^\w-]+/g, '-')}`}
-        label={cellWords(cell, name, plan, said)}
-        entries={form.readings[key] ?? []}
-        lowImpedance={lowImpedance}
-        stamp={stamp}
-        onChange={(entries) =>
-          change((before) => ({ ...before, readings: { ...before.readings, [key]: entries } }))
-        }
-      />
-    );
-  };
+  const key = cellKey(cell);
+  return (
+    <ReadingCell
+      id={`cell-${key.replace(/[^\w-]+/g, '-')}`}
+      label={cellWords(cell, name, plan, said)}
+      entries={form.readings[key] ?? []}
+      lowImpedance={lowImpedance}
+      stamp={stamp}
+      onChange={(entries) =>
+        change((before) => ({ ...before, readings: { ...before.readings, [key]: entries } }))
+      }
+    />
+  );
 }
 
 /** The circuit's own conductors, each to each. */
 function CircuitMatrix(props: MatrixProps) {
   const { state, place, name } = props;
   const said = useMessages().proof.readings;
-  const cell = useCell(props);
+  const cell = (of: Cell) => <BoundCell key={cellKey(of)} of={of} {...props} />;
   const { plan } = state;
   const rows = plan.conductors.slice(0, -1);
   const columns = plan.conductors.slice(1);
@@ -94,7 +93,7 @@ function SourceMatrix({ item, ...props }: MatrixProps & { item: SourceToRead }) 
   const { state, place, name } = props;
   const words = useMessages();
   const said = words.proof.readings;
-  const cell = useCell(props);
+  const cell = (of: Cell) => <BoundCell key={cellKey(of)} of={of} {...props} />;
   const { plan } = state;
   const { source, ac, dc } = item;
   const kind = source.kind === null ? '' : lowerFirst(wordOf(words, 'sourceKind', source.kind));

@@ -1,12 +1,11 @@
 import { assess } from '@/hazard';
 import type { WorksheetRecord } from '@/shared/record';
-import type { WorksheetContent } from '@/shared/worksheet';
 import { soundWorksheet } from './soundWorksheet';
 
 /** A record as the server answers it, for tests of screens: the sound worksheet, waiting for its crew. */
 export function buildRecord(changes: Partial<WorksheetRecord> = {}): WorksheetRecord {
   const { on, content } = soundWorksheet();
-  const shown = (changes.content ?? content) as WorksheetContent;
+  const shown = changes.content ?? content;
   return {
     id: '0190b5a4-0000-7000-8000-0000000000e1',
     number: '2026-000417',

@@ -4,6 +4,7 @@ import { afterEach, beforeEach, describe, expect, it, vi } from 'vitest';
 import { HelperScreen } from '@/components/helper/HelperScreen';
 import type { WorksheetRecord } from '@/shared/record';
 import type { SessionUser } from '@/shared/user';
+import { usePlainStyles } from '../../support/plainStyles';
 import { buildUser, renderScreen } from '../../support/renderScreen';
 import { buildRecord } from '../../support/worksheetRecord';
 
@@ -48,6 +49,7 @@ let record: WorksheetRecord;
 let seeEnd: () => void;
 
 beforeEach(() => {
+  usePlainStyles();
   posted = [];
   record = buildRecord();
   onPost = () => answer(200, record);
@@ -55,7 +57,7 @@ beforeEach(() => {
     if (init?.method !== 'POST') return Promise.resolve(answer(200, record));
     const post = {
       path: input.replace(/^\/api/, ''),
-      body: JSON.parse(String(init.body)) as Record<string, unknown>,
+      body: JSON.parse(init.body as string) as Record<string, unknown>,
     };
     posted.push(post);
     return Promise.resolve(onPost(post));

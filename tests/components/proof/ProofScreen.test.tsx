@@ -4,6 +4,7 @@ import { afterEach, beforeEach, describe, expect, it, vi } from 'vitest';
 import { ProofScreen } from '@/components/proof/ProofScreen';
 import type { WorksheetRecord } from '@/shared/record';
 import type { Proof, WorksheetContent } from '@/shared/worksheet';
+import { usePlainStyles } from '../../support/plainStyles';
 import { buildUser, renderScreen } from '../../support/renderScreen';
 import { soundWorksheet, withPath } from '../../support/soundWorksheet';
 import { buildRecord } from '../../support/worksheetRecord';
@@ -19,16 +20,17 @@ const answer = (status: number, body: unknown) =>
 let record: WorksheetRecord;
 let posted: { id: string; proof: Proof; pin: string }[];
 
-const inForce = (content: WorksheetContent = soundWorksheet().content as WorksheetContent) =>
+const inForce = (content: WorksheetContent = soundWorksheet().content) =>
   buildRecord({ state: 'in-force', actions: ['prove', 'stop', 'close'], content });
 
 beforeEach(() => {
+  usePlainStyles();
   vi.useFakeTimers({ now: new Date(NOW), toFake: ['Date'] });
   record = inForce();
   posted = [];
   vi.stubGlobal('fetch', (_input: string, init?: RequestInit) => {
     if (init?.method !== 'POST') return Promise.resolve(answer(200, record));
-    const body = JSON.parse(String(init.body)) as (typeof posted)[number];
+    const body = JSON.parse(init.body as string) as (typeof posted)[number];
     posted.push(body);
     return Promise.resolve(
       answer(201, { id: body.id, at: NOW, assessment: { verdict: 'open', findings: [] } }),
@@ -89,7 +91,7 @@ describe('the matrix of readings', () => {
 
   it('reads whole equipment phase by phase', async () => {
     record = inForce(
-      withPath(soundWorksheet().content, '/supply/exposure', 'whole equipment') as WorksheetContent,
+      withPath<WorksheetContent>(soundWorksheet().content, '/supply/exposure', 'whole equipment'),
     );
     await show();
     const table = screen.getByRole('table', { name: '1, the circuit, AC' });
@@ -99,7 +101,7 @@ describe('the matrix of readings', () => {
 
   it('asks a battery unit for AC to phase and ground and for DC', async () => {
     record = inForce(
-      withPath(soundWorksheet().content, '/sources/3', {
+      withPath<WorksheetContent>(soundWorksheet().content, '/sources/3', {
         id: 's4',
         kind: 'battery unit',
         from: 'in A2',
@@ -107,7 +109,7 @@ describe('the matrix of readings', () => {
         openedAt: 'battery connector',
         held: 'exclusive control',
         byCrewId: 'c1',
-      }) as WorksheetContent,
+      }),
     );
     await show();
     // The point that the source names stands first; the other is still without a name.
@@ -211,7 +213,7 @@ describe('the record of a proof', () => {
         {
           id: 'p1',
           at: NOW,
-          proof: proof as Proof,
+          proof,
           assessment: record.assessment,
           byId: record.leadId,
           byName: 'Ruth Ansbach',
@@ -235,7 +237,7 @@ describe('the record of a proof', () => {
 
   it('has nothing to record for energized work', async () => {
     record = inForce(
-      withPath(soundWorksheet().content, '/decision', { mode: 'energized' }) as WorksheetContent,
+      withPath<WorksheetContent>(soundWorksheet().content, '/decision', { mode: 'energized' }),
     );
     record = { ...record, actions: ['stop', 'close'] };
     await show();
