@@ -13,17 +13,19 @@ export function readCsv(csv: string): { lines: CsvLine[]; faults: CsvFault[] } {
   const text = csv.replace(/^\uFEFF/, '').replace(/\r\n?/g, '\n');
   let lastLine = 0;
   try {
-    const lines = parse(text, {
+    const records: string[][] = parse(text, {
       delimiter: delimiterOf(text),
       skip_empty_lines: true,
       relax_column_count: true,
       // Inches are written with the quote mark: `36"` is no fault.
       relax_quotes: true,
-      on_record: (cells: string[], { lines: end }: { lines: number }) => {
+      // The line on which the record begins goes before its cells.
+      on_record: (cells: string[], { lines: end }) => {
         lastLine = end;
-        return { line: end - cells.join('').split('\n').length + 1, cells };
+        return [String(end - cells.join('').split('\n').length + 1), ...cells];
       },
-    }) as unknown as CsvLine[];
+    });
+    const lines = records.map(([line, ...cells]) => ({ line: Number(line), cells }));
     return { lines, faults: [] };
   } catch (fault) {
     if (!(fault instanceof CsvError)) throw fault;

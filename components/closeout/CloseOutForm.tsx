@@ -23,6 +23,7 @@ import {
 import { findingsOf, usePinFault } from '../signing/SigningProblem';
 import { hintOf, labelOf } from '../worksheet/form/fieldWords';
 import { FindingPanels } from '../worksheet/parts/FindingPanels';
+import { SectionPhotos } from '../worksheet/parts/SectionPhotos';
 import { useNow } from '../worksheet/useAssessment';
 import { useWorksheetAct } from '../worksheet/worksheetQueries';
 
@@ -278,6 +279,7 @@ export function CloseOutForm({ record, kept }: Props) {
           <Egress kept={kept} findings={findings} />
           <FindingPanels findings={elsewhere} />
           <Notes kept={kept} />
+          <SectionPhotos record={record} section="closeOut" />
         </View>
       </Section>
       <Close record={record} kept={kept} left={left} />

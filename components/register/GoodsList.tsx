@@ -122,7 +122,7 @@ function useGoodsColumns({
       key: 'due',
       label: words.due,
       width: 88,
-      cell: ({ dueOn }) => (dueOn === '' ? '' : <TwoLines {...dateLines(dueOn)} />),
+      cell: ({ dueOn }) => (dueOn === '' ? '' : <TwoLines strong {...dateLines(dueOn)} />),
       ...sortable('due', sort, view),
     },
     {
@@ -191,7 +191,7 @@ export function GoodsList(props: Props) {
             title={item.serial}
             note={`${place}. ${enumerations.gloveClass[item.gloveClass]}`}
             state={<GoodsState inLine words={stateWords(item, todayAt(item))} />}
-            bar={parts && <TimeBar line={line} parts={parts} />}
+            bar={parts && <TimeBar alone line={line} parts={parts} />}
             onPress={() => view.open({ id: item.id })}
           />
         );

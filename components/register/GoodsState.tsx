@@ -11,7 +11,7 @@ export function GoodsState({ words, inLine }: { words: GoodsWords; inLine?: bool
     return (
       <View style={styles.row}>
         {mark !== undefined && <StateSymbol state={mark} size={18} />}
-        <TwoLines inLine first={first} second={second} over={over} />
+        <TwoLines inLine first={first} second={second} over={over ? 'first' : undefined} />
       </View>
     );
   }
@@ -19,7 +19,7 @@ export function GoodsState({ words, inLine }: { words: GoodsWords; inLine?: bool
     <View style={styles.row}>
       <View style={styles.mark}>{mark !== undefined && <StateSymbol state={mark} />}</View>
       <View style={styles.words}>
-        <TwoLines first={first} second={second} over={over} />
+        <TwoLines first={first} second={second} over={over ? 'first' : undefined} />
       </View>
     </View>
   );

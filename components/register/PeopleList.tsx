@@ -30,15 +30,15 @@ function useQualified(today: string) {
   const locale = useLocale();
   const words = register.people;
   return ({ qualifiedThrough: through }: Person) => {
-    if (through === null) return { first: words.notQualified, second: undefined, over: false };
+    if (through === null) return { first: words.notQualified, second: undefined, over: undefined };
     const days = daysBetween(today, through);
     const first = dateText(locale, through);
     if (days < 0) {
       const ago = words.ranOutAgo(register.days(-days));
-      return { first, second: `${words.ranOut} ${ago}`, over: true };
+      return { first, second: `${words.ranOut} ${ago}`, over: 'second' as const };
     }
     const second = days <= DUE_SOON_DAYS ? words.endsIn(register.days(days)) : undefined;
-    return { first, second, over: false };
+    return { first, second, over: undefined };
   };
 }
 
@@ -178,7 +178,7 @@ export function PeopleList({ people, sites, today, view }: Props) {
                 over={over}
               />
             }
-            bar={parts && <TimeBar line={line} parts={parts} />}
+            bar={parts && <TimeBar alone line={line} parts={parts} />}
             onPress={() => view.open({ id: person.id })}
           />
         );

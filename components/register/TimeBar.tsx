@@ -37,14 +37,22 @@ export function TimeRuler({ line }: { line: Timeline }) {
   );
 }
 
+interface Props {
+  line: Timeline;
+  parts: BarParts | undefined;
+  /** Under the words of a row, not beside them: the ruler's lines end with the bar. */
+  alone?: boolean;
+}
+
 /** One interval: elapsed solid, rest hollow, over red, not begun dashed; the line is today. */
-export function TimeBar({ line, parts }: { line: Timeline; parts: BarParts | undefined }) {
+export function TimeBar({ line, parts, alone }: Props) {
   const { colors } = useTheme();
+  const reach = alone === true ? styles.within : styles.through;
   const { elapsed, rest, overdue, waiting } = parts ?? {};
   return (
     <View aria-hidden style={[styles.row, { width: line.width }]}>
       {line.ticks.map(({ at }) => (
-        <View key={at} style={[styles.line, { left: at, backgroundColor: colors.hair }]} />
+        <View key={at} style={[styles.line, reach, { left: at, backgroundColor: colors.hair }]} />
       ))}
       {waiting !== undefined && (
         <View style={[styles.bar, styles.dashed, { borderColor: colors.ink }, box(waiting)]} />
@@ -66,7 +74,12 @@ export function TimeBar({ line, parts }: { line: Timeline; parts: BarParts | und
         <View style={[styles.bar, { backgroundColor: colors.zRed }, box(overdue)]} />
       )}
       <View
-        style={[styles.line, styles.today, { left: line.today, backgroundColor: colors.ink }]}
+        style={[
+          styles.line,
+          reach,
+          styles.today,
+          { left: line.today, backgroundColor: colors.ink },
+        ]}
       />
     </View>
   );
@@ -77,7 +90,9 @@ const styles = StyleSheet.create({
   tick: { position: 'absolute', bottom: -6, width: 1 },
   month: { position: 'absolute', top: 0 },
   row: { height: ROW },
-  line: { position: 'absolute', top: -OVER, bottom: -OVER, width: 1 },
+  line: { position: 'absolute', width: 1 },
+  through: { top: -OVER, bottom: -OVER },
+  within: { top: 4, bottom: 4 },
   today: { width: 2, marginLeft: -1 },
   bar: { position: 'absolute', top: (ROW - BAR) / 2, height: BAR },
   hollow: { borderWidth: 2 },

@@ -4,20 +4,33 @@ import { Text } from '../ui';
 interface Props {
   first: string;
   second: string | undefined;
-  /** Its time is over: the second line says so in the colour of danger. */
-  over?: boolean;
+  /** Which line says that its time is over, in the colour of danger. */
+  over?: 'first' | 'second';
+  /** The first line is what the list is read for. */
+  strong?: boolean;
   /** On a phone, one after the other. */
   inLine?: boolean;
 }
 
-/** A date and what follows from it. */
-export function TwoLines({ first, second, over, inLine }: Props) {
+/** A date or a state, and what follows from it. */
+export function TwoLines({ first, second, over, strong, inLine }: Props) {
+  const red = (line: 'first' | 'second') => over === line;
+  const heavy = strong === true || red('first') ? '600' : '400';
+  const start = (
+    <Text variant="note" weight={heavy} color={red('first') ? 'redText' : 'ink'}>
+      {first}
+    </Text>
+  );
   if (inLine === true) {
     return (
       <Text variant="note">
-        {first}
+        {start}
         {second !== undefined && (
-          <Text variant="note" weight="600" color={over === true ? 'redText' : 'ink'}>
+          <Text
+            variant="note"
+            weight={red('second') ? '600' : '400'}
+            color={red('second') ? 'redText' : 'ink2'}
+          >
             {`. ${second}`}
           </Text>
         )}
@@ -26,14 +39,12 @@ export function TwoLines({ first, second, over, inLine }: Props) {
   }
   return (
     <View>
-      <Text variant="note" weight={over === true ? '600' : '400'}>
-        {first}
-      </Text>
+      {start}
       {second !== undefined && (
         <Text
           variant="label"
-          weight={over === true ? '600' : '400'}
-          color={over === true ? 'redText' : 'ink2'}
+          weight={red('second') ? '600' : '400'}
+          color={red('second') ? 'redText' : 'ink2'}
         >
           {second}
         </Text>

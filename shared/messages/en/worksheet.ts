@@ -19,6 +19,7 @@ export const worksheet = {
   notADistance: (typed: string) =>
     `“${typed}” is not a distance. Write it as 3 ft 6 in, 42 in or 1.07 m.`,
   fromSite: 'From the site, to be confirmed',
+  fromLast: (number: string, day: string) => `From worksheet ${number} of ${day}, to be confirmed`,
   takeSuggestion: (value: string) => `Take ${value}`,
   siteFirst: 'Choose the site first. Start and end are on its clock.',
   occupied: { yes: 'People in the building.', no: 'Nobody in the building.' },

@@ -19,6 +19,7 @@ export const worksheet = {
   notADistance: (typed: string) =>
     `“${typed}” no es una distancia. Escríbala como 3 ft 6 in, 42 in o 1.07 m.`,
   fromSite: 'Del sitio, por confirmar',
+  fromLast: (number: string, day: string) => `De la hoja ${number} del ${day}, por confirmar`,
   takeSuggestion: (value: string) => `Tomar ${value}`,
   siteFirst: 'Elija primero el sitio. El inicio y el término van con su hora.',
   occupied: { yes: 'Hay gente en el edificio.', no: 'No hay nadie en el edificio.' },
