@@ -29,6 +29,11 @@ export interface DemoJob {
   decision?: WorksheetContent['decision'];
   arcFlash?: Section<'arcFlash'>;
   surroundings?: Section<'surroundings'>;
+  absenceTest?: Section<'absenceTest'>;
+  /** How near the lead comes; inside the restricted boundary where nothing is said. */
+  leadClosest?: 'restricted' | 'limited';
+  /** Who gives the permit that the energized path asks for. */
+  permitBy?: string;
   notes?: string;
   /** The helper knows how to release and revive, which energized work asks for. */
   helperTrainedInRescue?: boolean;
@@ -50,14 +55,17 @@ export function locked(source: Source): Source {
   };
 }
 
-function crewOf({ lead, helpers }: DemoSetting, { helperTrainedInRescue }: DemoJob) {
+function crewOf(
+  { lead, helpers }: DemoSetting,
+  { helperTrainedInRescue, leadClosest = 'restricted' }: DemoJob,
+) {
   return [
     {
       id: 'c1',
       userId: lead.id,
       name: lead.name,
       lead: true,
-      closest: 'restricted' as const,
+      closest: leadClosest,
       arcRated: true,
       rescueTrained: true,
       worksOnCircuit: true,
@@ -109,6 +117,12 @@ const SURROUNDINGS: NonNullable<WorksheetContent['surroundings']> = {
   outdoors: false,
 };
 
+function decisionOf({ endsAt }: DemoSetting, { decision, permitBy, job }: DemoJob) {
+  if (permitBy === undefined) return decision ?? { mode: 'off' as const };
+  const permit = { number: `EP-${job.workOrder ?? ''}`, approvedBy: permitBy, validUntil: endsAt };
+  return { ...decision, permit };
+}
+
 /** A whole plan for one invented job, with every answer that the job's rules ask for. */
 export function demoContent(setting: DemoSetting, demo: DemoJob): WorksheetContent {
   const { siteId, startsAt, endsAt, glovesId, emergency, on } = setting;
@@ -147,13 +161,14 @@ export function demoContent(setting: DemoSetting, demo: DemoJob): WorksheetConte
     sources: demo.sources ?? [
       locked({ id: 's1', kind: 'normal', from: `${panel} circuit ${circuit}` }),
     ],
-    decision: demo.decision ?? { mode: 'off' },
+    decision: decisionOf(setting, demo),
     absenceTest: {
       instrument: 'contact',
       category: 'III',
       ratedVolts: 1000,
       leadsInspected: true,
       byCrewId: 'c1',
+      ...demo.absenceTest,
     },
     arcFlash: { ...ARC_FLASH, ...demo.arcFlash },
     protectiveEquipment: {
@@ -218,6 +233,21 @@ export function demoProof(content: WorksheetContent, at: string): Proof {
       ...zeros(points, ['A', 'N', 'G'], at),
       ...separate.flatMap(({ id }) => zerosOf(id ?? '', points, at)),
     ],
+  };
+}
+
+/** The same test where one conductor of the first point still reads its full voltage to ground. */
+export function liveProof(content: WorksheetContent, at: string): Proof {
+  const proof = demoProof(content, at);
+  const volts = content.supply?.circuitVolts ?? 120;
+  const [point] = proof.readings ?? [];
+  return {
+    ...proof,
+    readings: (proof.readings ?? []).map((reading) =>
+      reading.point === point?.point && reading.from === 'A' && reading.to === 'G'
+        ? { ...reading, volts }
+        : reading,
+    ),
   };
 }
 

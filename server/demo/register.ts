@@ -1,12 +1,11 @@
-import type { GloveClass } from '@/hazard/enumerations';
-import type { RubberGoodsKind, Site } from '@/shared/register';
+import type { Site } from '@/shared/register';
 
 type DemoSite = Pick<
   Site,
   'name' | 'timeZone' | 'address' | 'systems' | 'panels' | 'emergency' | 'deskToTell'
 >;
 
-/** Three invented buildings of one invented company, each with the systems that its lighting hangs on. */
+/** Six invented buildings of one invented company, each with the systems that its lighting hangs on. */
 export const DEMO_SITES: DemoSite[] = [
   {
     name: 'Ashgrove Commons',
@@ -63,96 +62,57 @@ export const DEMO_SITES: DemoSite[] = [
     },
     deskToTell: 'Front desk, 555-0119',
   },
-];
-
-interface DemoRubberGoods {
-  site: number;
-  kind: RubberGoodsKind;
-  gloveClass: GloveClass;
-  serial: string;
-  size: string;
-  issuedMonths: number | null;
-  /** When, in months from today. */
-  tests: { months: number; passed: boolean; laboratory: string }[];
-}
-
-const laboratory = 'Tallgrass Dielectric, Millhaven';
-const passed = (months: number) => ({ months, passed: true, laboratory });
-
-/** In test, due soon, run out and failed: each state that the register shows. */
-export const DEMO_RUBBER_GOODS: DemoRubberGoods[] = [
   {
-    site: 0,
-    kind: 'gloves',
-    gloveClass: '0',
-    serial: 'AC-0-117',
-    size: '9',
-    issuedMonths: -8,
-    tests: [passed(-8), passed(-2)],
-  },
-  {
-    site: 0,
-    kind: 'gloves',
-    gloveClass: '0',
-    serial: 'AC-0-121',
-    size: '10',
-    issuedMonths: -1,
-    tests: [passed(-3)],
-  },
-  {
-    site: 0,
-    kind: 'gloves',
-    gloveClass: '00',
-    serial: 'AC-00-042',
-    size: '8',
-    issuedMonths: -14,
-    tests: [passed(-14), passed(-7)],
-  },
-  {
-    site: 0,
-    kind: 'sleeves',
-    gloveClass: '0',
-    serial: 'AC-S-009',
-    size: 'L',
-    issuedMonths: -5,
-    tests: [passed(-5)],
-  },
-  {
-    site: 1,
-    kind: 'gloves',
-    gloveClass: '0',
-    serial: 'BD-0-203',
-    size: '10',
-    issuedMonths: -6,
-    tests: [passed(-6), passed(-1)],
-  },
-  {
-    site: 1,
-    kind: 'blanket',
-    gloveClass: '1',
-    serial: 'BD-B-014',
-    size: '36 in',
-    issuedMonths: -4,
-    tests: [passed(-4)],
-  },
-  {
-    site: 2,
-    kind: 'gloves',
-    gloveClass: '00',
-    serial: 'CC-00-066',
-    size: '9',
-    issuedMonths: -4,
-    tests: [passed(-4)],
-  },
-  {
-    site: 2,
-    kind: 'gloves',
-    gloveClass: '00',
-    serial: 'CC-00-058',
-    size: '10',
-    ...{
-      issuedMonths: -9,
-      tests: [passed(-9), { months: -3, passed: false, laboratory }],
+    name: 'Dunmore Science Hall',
+    timeZone: 'America/New_York',
+    address: '7 Retort Lane, Dunmore Falls',
+    systems: ['480Y/277', '208Y/120'],
+    panels: [
+      { name: 'LH-1', system: '480Y/277', circuits: ['1', '3', '5', '7', '9', '11'] },
+      { name: 'LH-2', system: '480Y/277', circuits: ['2', '4', '6', '8'] },
+      { name: 'LR-1', system: '208Y/120', circuits: ['13', '15', '17'] },
+    ],
+    emergency: {
+      contact: '911, then campus dispatch: 555-0163',
+      rescue: 'Second person with the insulated hook, stair 2 landing',
+      firstAid: 'Prep room 104',
+      aedAt: 'Main stair, ground floor',
     },
+    deskToTell: 'Campus dispatch, 555-0163',
+  },
+  {
+    name: 'Eastlake Cold Store',
+    timeZone: 'America/Los_Angeles',
+    address: '2300 Quay Road, Eastlake',
+    systems: ['480Y/277', '120/240'],
+    panels: [
+      { name: 'CS-L1', system: '480Y/277', circuits: ['1', '2', '3', '4', '5', '6', '7', '8'] },
+      { name: 'CS-EM', system: '480Y/277', circuits: ['1', '2'] },
+      { name: 'OF-1', system: '120/240', circuits: ['10', '12', '14'] },
+    ],
+    emergency: {
+      contact: '911, then the plant room: 555-0155',
+      rescue: 'Plant room sends two people with the hook',
+      firstAid: 'Plant room, beside the lockers',
+      aedAt: 'Loading bay, by the time clock',
+    },
+    deskToTell: 'Plant room, 555-0155',
+  },
+  {
+    name: 'Fernhollow Library',
+    timeZone: 'America/Detroit',
+    address: '61 Bindery Street, Fernhollow',
+    systems: ['208Y/120'],
+    panels: [
+      { name: 'LB-1', system: '208Y/120', circuits: ['1', '3', '5', '7', '9', '11', '13'] },
+      { name: 'LB-2', system: '208Y/120', circuits: ['2', '4', '6', '8'] },
+    ],
+    emergency: {
+      contact: '911, then the loans desk: 555-0131',
+      rescue: 'Second person with the insulated hook, basement stair',
+      firstAid: 'Loans desk',
+      aedAt: 'Entrance hall, left of the door',
+    },
+    deskToTell: 'Loans desk, 555-0131',
   },
 ];

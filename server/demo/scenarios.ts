@@ -10,8 +10,22 @@ export type DemoStage =
   | 'proved'
   | 'returned'
   | 'stopped'
+  /** Stopped by its own proof, which found 50 V or more. */
+  | 'still-live'
   | 'expired'
+  | 'void'
+  /** Left as a draft until the nightly job voided it. */
+  | 'stale'
   | 'closed';
+
+/** What came between before the job was done: mended in the next revision. */
+export interface DemoSetback {
+  how: 'returned' | 'stopped' | 'expired' | 'still live';
+  reason?: string;
+}
+
+/** Drawn for the demo: where each belongs is in `photos.ts`. */
+export type DemoPhoto = 'label' | 'schedule' | 'cover' | 'finished';
 
 export interface DemoScenario {
   /** The work order: also what a later start knows the worksheet by. */
@@ -28,7 +42,9 @@ export interface DemoScenario {
   /** Saved first; the plan above then mends what it stops at. */
   first?: DemoJob;
   question?: { by: string; text: string; answer?: string };
-  /** Why it was returned or stopped; by the supervisor or the first helper. */
+  setbacks?: DemoSetback[];
+  photos?: DemoPhoto[];
+  /** Why it was returned, stopped or voided; by the supervisor, the first helper or the lead. */
   reason?: string;
 }
 
@@ -81,7 +97,7 @@ const clinicLamps: DemoJob = {
   },
 };
 
-/** The demo's worksheets, oldest first: every state that a worksheet can be met in. */
+/** The latest worksheets, oldest first: every state that a worksheet can be met in. */
 export const DEMO_SCENARIOS: DemoScenario[] = [
   {
     workOrder: 'AC-3107',
@@ -95,6 +111,7 @@ export const DEMO_SCENARIOS: DemoScenario[] = [
       ...batteryLeftConnected,
       job: { ...driversWithBattery.job, area: 'Level 1 corridor' },
     },
+    photos: ['label', 'schedule', 'cover', 'finished'],
     demo: { ...driversWithBattery, job: { ...driversWithBattery.job, area: 'Level 1 corridor' } },
     question: {
       by: 'ignacio',
@@ -183,6 +200,7 @@ export const DEMO_SCENARIOS: DemoScenario[] = [
     site: 'Ashgrove Commons',
     daysAgo: 0,
     until: 'in-force',
+    photos: ['schedule'],
     demo: {
       job: {
         area: 'Level 3 open office',
@@ -210,6 +228,7 @@ export const DEMO_SCENARIOS: DemoScenario[] = [
     site: 'Ashgrove Commons',
     daysAgo: 0,
     until: 'proved',
+    photos: ['label', 'cover'],
     demo: {
       job: {
         area: 'Parking level P1',

@@ -4,13 +4,12 @@ import type { Role } from '@/shared/user';
 import { hashSecret } from '../argon';
 import { clock } from '../clock';
 import { transact } from '../db';
-import { RubberGoods } from '../models/RubberGoods';
-import { RubberGoodsTest } from '../models/RubberGoodsTest';
 import { Site } from '../models/Site';
 import { SiteMember } from '../models/SiteMember';
 import { User } from '../models/User';
 import { recordEvent } from '../services/recordEvent';
-import { DEMO_RUBBER_GOODS, DEMO_SITES } from './register';
+import { dateOf, dayFrom, FOUNDED } from './days';
+import { DEMO_SITES } from './register';
 
 export const DEMO_PASSWORD = 'wide-berth-demo';
 
@@ -22,6 +21,8 @@ interface DemoPerson {
   /** Places in `DEMO_SITES`. */
   sites: number[];
   qualifiedMonths: number | null;
+  /** When they left, in months from today. */
+  retiredMonths?: number;
   locale?: 'es-MX';
 }
 
@@ -49,7 +50,7 @@ export const DEMO_ACCOUNTS: DemoPerson[] = [
     email: 'supervisor@wideberth.example',
     role: 'supervisor',
     pin: '864209',
-    sites: [0, 1, 2],
+    sites: [0, 1, 2, 3],
     qualifiedMonths: 28,
   },
   {
@@ -57,7 +58,7 @@ export const DEMO_ACCOUNTS: DemoPerson[] = [
     email: 'safety@wideberth.example',
     role: 'safety',
     pin: '975318',
-    sites: [0, 1, 2],
+    sites: [0, 1, 2, 3, 4, 5],
     qualifiedMonths: 11,
   },
 ];
@@ -84,7 +85,7 @@ const OTHERS: DemoPerson[] = [
     email: 'ignacio@wideberth.example',
     role: 'helper',
     pin: '318604',
-    sites: [0, 2],
+    sites: [0, 2, 5],
     qualifiedMonths: null,
     locale: 'es-MX',
   },
@@ -95,6 +96,56 @@ const OTHERS: DemoPerson[] = [
     pin: '692751',
     sites: [0, 1],
     qualifiedMonths: 33,
+  },
+  {
+    name: 'Ilse Vandermoor',
+    email: 'ilse@wideberth.example',
+    role: 'lead',
+    pin: '427160',
+    sites: [3, 4],
+    qualifiedMonths: 1,
+  },
+  {
+    name: 'Fintan Abellard',
+    email: 'fintan@wideberth.example',
+    role: 'lead',
+    pin: '860143',
+    sites: [4, 5],
+    qualifiedMonths: 14,
+  },
+  {
+    name: 'Anselm Brightwater',
+    email: 'anselm@wideberth.example',
+    role: 'lead',
+    pin: '539208',
+    sites: [2],
+    qualifiedMonths: -1,
+  },
+  {
+    name: 'Yolotzin Cardenal',
+    email: 'yolotzin@wideberth.example',
+    role: 'helper',
+    pin: '271835',
+    sites: [1, 3, 4],
+    qualifiedMonths: null,
+    locale: 'es-MX',
+  },
+  {
+    name: 'Rufus Tennyhill',
+    email: 'rufus@wideberth.example',
+    role: 'helper',
+    pin: '906417',
+    sites: [2, 5],
+    qualifiedMonths: null,
+    retiredMonths: -2,
+  },
+  {
+    name: 'Perpetua Langstroth',
+    email: 'perpetua@wideberth.example',
+    role: 'supervisor',
+    pin: '648052',
+    sites: [3, 4, 5],
+    qualifiedMonths: 20,
   },
 ];
 
@@ -111,37 +162,28 @@ export function demoUser(email: string): Promise<User> {
   return User.findOne({ where: where(fn('lower', col('email')), email), rejectOnEmpty: true });
 }
 
+/** How much work the demo holds: `few` are the worksheets of the last days. */
+export type DemoExtent = 'none' | 'few' | 'all';
+
 /**
  * Fills an empty database with an invented company, once, and moves the
  * demo's open worksheets to today. A database with people of its own is left alone.
  */
-export async function seedDemo(): Promise<void> {
-  if ((await User.count()) === 0) await seedRegister();
+export async function seedDemo({
+  worksheets = 'all',
+}: { worksheets?: DemoExtent } = {}): Promise<void> {
+  const isEmpty = (await User.count()) === 0;
+  if (isEmpty) await seedRegister();
   if (!(await hasDemo())) return;
-  const worksheets = await loadWorksheets();
-  await worksheets?.seedWorksheets();
-}
-
-interface WorksheetSeed {
-  /** Makes the demo's worksheets once; later it moves those that are open to today. */
-  seedWorksheets(): Promise<void>;
-}
-
-async function loadWorksheets(): Promise<WorksheetSeed | null> {
-  const file = './worksheets';
-  try {
-    return (await import(file)) as WorksheetSeed;
-  } catch (error) {
-    if (error instanceof Error && 'code' in error && /MODULE_NOT_FOUND$/.test(String(error.code))) {
-      return null;
-    }
-    throw error;
-  }
+  // Loaded late: it knows the people of this module.
+  const { growDemo, moveOpenWorksheetsToToday } = await import('./worksheets');
+  await (isEmpty ? growDemo(worksheets) : moveOpenWorksheetsToToday());
 }
 
 async function seedRegister(): Promise<void> {
   const now = clock.now();
-  const stamps = { createdAt: now, updatedAt: now };
+  const founded = dayFrom(now, FOUNDED);
+  const stamps = { createdAt: founded, updatedAt: founded };
   const passwordHash = await hashSecret(DEMO_PASSWORD);
   const people = await Promise.all(
     DEMO_PEOPLE.map(async (person) => ({
@@ -151,10 +193,12 @@ async function seedRegister(): Promise<void> {
     })),
   );
   const sites = DEMO_SITES.map((site) => ({ ...site, id: v7() }));
+  clock.set(founded);
   await transact(async (transaction) => {
     for (const site of sites) await Site.create({ ...site, ...stamps }, { transaction });
     for (const { name, email, role, pinHash, id, qualifiedMonths, locale } of people) {
-      const qualifiedThrough = qualifiedMonths === null ? null : dateInMonths(now, qualifiedMonths);
+      const qualifiedThrough =
+        qualifiedMonths === null ? null : dateOf(dayFrom(now, { months: qualifiedMonths }));
       await User.create(
         {
           id,
@@ -180,22 +224,6 @@ async function seedRegister(): Promise<void> {
       ),
       { transaction },
     );
-    for (const { site, tests, issuedMonths, ...item } of DEMO_RUBBER_GOODS) {
-      const siteId = sites[site]?.id;
-      if (siteId === undefined) continue;
-      const id = v7();
-      const issuedOn = issuedMonths === null ? null : dateInMonths(now, issuedMonths);
-      await RubberGoods.create({ ...item, id, siteId, issuedOn, ...stamps }, { transaction });
-      await RubberGoodsTest.bulkCreate(
-        tests.map(({ months, ...test }, position) => ({
-          rubberGoodsId: id,
-          position,
-          testedOn: dateInMonths(now, months),
-          ...test,
-        })),
-        { transaction },
-      );
-    }
     for (const { id } of people) {
       await recordEvent(transaction, {
         subjectType: 'user',
@@ -206,13 +234,5 @@ async function seedRegister(): Promise<void> {
         payload: { demo: true },
       });
     }
-  });
-}
-
-function dateInMonths(from: Date, months: number): string {
-  const date = new Date(from);
-  date.setUTCDate(1);
-  date.setUTCMonth(date.getUTCMonth() + months);
-  date.setUTCDate(Math.min(from.getUTCDate(), 28));
-  return date.toISOString().slice(0, 10);
+  }).finally(() => clock.set(null));
 }

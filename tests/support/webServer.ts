@@ -19,7 +19,7 @@ export async function startWebServer(): Promise<WebServer> {
   if (!existsSync(DIST)) throw new Error('The web app is not built: npm run build.');
   const { seedDemo } = await import('@/server/demo/seed');
   const { startServer } = await import('@/server/main');
-  await seedDemo();
+  await seedDemo({ worksheets: 'few' });
   const server = await startServer();
   return { base: `http://127.0.0.1:${server.port}`, stop: () => server.stop() };
 }
