@@ -1,6 +1,6 @@
 import compression from 'compression';
 import express from 'express';
-import type { Express } from 'express';
+import type { Express, RequestHandler } from 'express';
 import helmet from 'helmet';
 import { env, publicUrl } from './env';
 import { isLoopback } from './loopback';
@@ -80,7 +80,12 @@ function buildApi(): express.Router {
   });
   api.use(healthRouter);
   api.use(jsonBody, originCheck);
-  api.use(sessionMiddleware(), passport.initialize(), passport.session(), endStaleSession);
+  api.use(
+    sessionMiddleware(),
+    passport.initialize() as RequestHandler,
+    passport.session() as RequestHandler,
+    endStaleSession,
+  );
   api.use('/session', sessionRouter);
   api.use('/sessions', sessionsRouter);
   api.use('/password-resets', passwordResetsRouter);

@@ -1,4 +1,5 @@
-import { Algorithm, hash, verify } from '@node-rs/argon2';
+import { hash, verify } from '@node-rs/argon2';
+import type { Algorithm } from '@node-rs/argon2';
 import { env } from './env';
 
 const cost = {

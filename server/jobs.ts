@@ -31,9 +31,9 @@ export async function queueJob(
 ): Promise<void> {
   // Through Sequelize's own query() the numbered parameters of pg-boss would be taken for names.
   const { connection } = transaction as unknown as { connection: RawConnection };
-  const db = {
+  const db: PgBoss.Db = {
     executeSql: (text: string, values: unknown[]) => connection.query(text, values),
-  } as unknown as PgBoss.Db;
+  };
   await boss.send(queue, data, { ...options, db });
 }
 

@@ -180,7 +180,7 @@ class Teller {
 function shapeOf(schema: unknown): Record<string, unknown> | undefined {
   let inner = schema;
   while (inner instanceof z.ZodOptional) inner = inner.unwrap();
-  if (inner instanceof z.ZodObject) return inner.shape as Record<string, unknown>;
+  if (inner instanceof z.ZodObject) return inner.shape;
   return undefined;
 }
 

@@ -1,7 +1,7 @@
 import { z } from 'zod';
 
 /** PostgreSQL refuses U+0000 and RFC 8785 refuses unpaired surrogates: both are bad input, not a fault. */
-// eslint-disable-next-line no-control-regex
+
 const unstorable = /\u0000|[\uD800-\uDBFF](?![\uDC00-\uDFFF])|(?<![\uD800-\uDBFF])[\uDC00-\uDFFF]/;
 
 /** Text of at most `max` characters that the database and the canonical form can hold. */

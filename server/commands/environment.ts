@@ -31,11 +31,11 @@ export function provideSessionSecret(): void {
 export async function provideDatabase(): Promise<Cluster | null> {
   if (process.env['DATABASE_URL']) return null;
   const { cluster, started } = await ensureCluster();
-  useCluster(cluster);
+  pointAt(cluster);
   return started ? cluster : null;
 }
 
-function useCluster(cluster: Cluster): void {
+function pointAt(cluster: Cluster): void {
   process.env['DATABASE_URL'] = urlOf(cluster, 'runtime');
   process.env['DATABASE_OWNER_URL'] = urlOf(cluster, 'owner');
 }

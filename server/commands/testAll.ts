@@ -10,7 +10,7 @@ const bin = (name: string) => path.join(ROOT, 'node_modules', '.bin', name);
 
 interface Check {
   name: string;
-  run(): Promise<void>;
+  run: () => Promise<void>;
 }
 
 /** Runs a program with its output to the terminal; what it says when it fails is the reason. */

@@ -27,7 +27,7 @@ function settled(call: (done: (error?: unknown) => void) => void): Promise<void>
   return new Promise((resolve, reject) => {
     call((error) => {
       if (error === undefined || error === null) return resolve();
-      reject(error instanceof Error ? error : new Error(String(error)));
+      reject(error instanceof Error ? error : new Error('The session store failed.'));
     });
   });
 }

@@ -14,7 +14,7 @@ function keptTogether<T>(words: T): T {
     return ((...args: unknown[]) =>
       keptTogether((words as (...a: unknown[]) => unknown)(...args))) as T;
   }
-  if (Array.isArray(words)) return words.map(keptTogether) as T;
+  if (Array.isArray(words)) return (words as unknown[]).map(keptTogether) as T;
   const entries = Object.entries(words as object).map(([key, value]) => [key, keptTogether(value)]);
   return Object.fromEntries(entries) as T;
 }

@@ -264,10 +264,8 @@ describe('arguments of assessArcFlash', () => {
 
   it('refuses a missing voltage and working distance, also where nothing is likely', () => {
     const task = 'read panel meter';
-    expect(() => ask({ task, volts: undefined as unknown as number })).toThrow(/^volts/);
-    expect(() => ask({ task, workingDistanceInches: undefined as unknown as number })).toThrow(
-      /^workingDistanceInches/,
-    );
+    expect(() => ask({ task, volts: undefined })).toThrow(/^volts/);
+    expect(() => ask({ task, workingDistanceInches: undefined })).toThrow(/^workingDistanceInches/);
   });
 
   it('refuses what no list knows', () => {

@@ -189,7 +189,7 @@ describe('a further source', () => {
         const { content, proof } = soundWorksheet();
         const source = { id: 'new', from: 'LA-2 ckt 3', kind, openedAt: 'none' as const, ...HELD };
         const sources = [...(content.sources ?? []), source];
-        const result = assess({ ...content, sources }, { on: ON, stage: at as Stage, proof });
+        const result = assess({ ...content, sources }, { on: ON, stage: at, proof });
         expect(result.verdict).toBe('stop');
       }),
     );

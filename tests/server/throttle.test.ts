@@ -2,7 +2,7 @@ import supertest from 'supertest';
 import { expect, it } from 'vitest';
 import { buildApp } from '@/server/app';
 import { checkPin } from '@/server/services/checkPin';
-import { Problem } from '@/server/problem';
+import type { Problem } from '@/server/problem';
 import { deliverMails } from '../support/mail';
 import { buildUser, PASSWORD, PIN } from '../support/server';
 

@@ -21,7 +21,7 @@ import { asDatabaseUser, freePort } from '@/server/commands/postgresTools';
  * shell that waits on a pipe from this process: when this process ends, however
  * it ends, the pipe closes and the shell takes the server and its folder away.
  */
-export async function startTestCluster(): Promise<{ cluster: Cluster; stop(): Promise<void> }> {
+export async function startTestCluster(): Promise<{ cluster: Cluster; stop: () => Promise<void> }> {
   // /tmp, not $TMPDIR: the database's user must be able to enter it.
   const parent = mkdtempSync('/tmp/wideberth-test-');
   await chmod(parent, 0o755);
@@ -87,7 +87,7 @@ export async function withClient<T>(
 export async function createTestDatabase(
   cluster: Cluster,
   { empty = false }: { empty?: boolean } = {},
-): Promise<{ ownerUrl: string; runtimeUrl: string; drop(): Promise<void> }> {
+): Promise<{ ownerUrl: string; runtimeUrl: string; drop: () => Promise<void> }> {
   const name = `test_${randomUUID().replaceAll('-', '')}`;
   const admin = urlOf(cluster, 'admin', 'postgres');
   const template = empty ? 'template1' : DATABASE;

@@ -1,4 +1,3 @@
-import { it } from 'vitest';
 import { READ_AT } from '../../support/ruleEdits';
 import type { Edits, RuleRow } from '../../support/ruleTable';
 import { describeRule, eachValue, gone, onEach } from '../../support/ruleTable';

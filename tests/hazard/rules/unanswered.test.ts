@@ -372,11 +372,7 @@ describe('a value of the wrong type is not answered (convention 1)', () => {
     const spoilt = (value: unknown) => {
       const { on, stage, ...root } = whole;
       const { content, proof, closeOut } = root;
-      const changed = withPath(
-        { ...content, proof, closeOut } as Record<string, unknown>,
-        pointer,
-        value,
-      );
+      const changed = withPath({ ...content, proof, closeOut }, pointer, value);
       const { proof: newProof, closeOut: newCloseOut, ...newContent } = changed;
       return assessed({
         on,
@@ -384,7 +380,7 @@ describe('a value of the wrong type is not answered (convention 1)', () => {
         content: newContent,
         proof: newProof,
         closeOut: newCloseOut,
-      } as never);
+      });
     };
     const isMember = /\/\d+$/.test(pointer);
     const missing = spoilt(isMember ? {} : undefined);

@@ -107,11 +107,11 @@ describe('which voltage enters the table (convention 12, hazard.md)', () => {
     'never throws on the content %j',
     (content) => {
       for (const stage of ['plan', 'work', 'close-out'] as const) {
-        const result = assess(content as never, {
+        const result = assess(content, {
           on: READ_AT,
           stage,
-          proof: content as never,
-          closeOut: content as never,
+          proof: content,
+          closeOut: content,
         });
         expect(result.verdict).toBe('open');
       }
