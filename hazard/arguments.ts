@@ -5,7 +5,7 @@
  */
 
 function refuse(name: string, expected: string, value: unknown): never {
-  const given = typeof value === 'object' ? typeof value : String(value as string);
+  const given = typeof value === 'string' || typeof value === 'number' ? value : typeof value;
   throw new RangeError(`${name} must be ${expected}, not ${given}`);
 }
 

@@ -15,7 +15,10 @@ function keptTogether<T>(words: T): T {
       keptTogether((words as (...a: unknown[]) => unknown)(...args))) as T;
   }
   if (Array.isArray(words)) return (words as unknown[]).map(keptTogether) as T;
-  const entries = Object.entries(words as object).map(([key, value]) => [key, keptTogether(value)]);
+  const entries = Object.entries(words as Record<string, unknown>).map(([key, value]) => [
+    key,
+    keptTogether(value),
+  ]);
   return Object.fromEntries(entries) as T;
 }
 

@@ -77,7 +77,7 @@ describe('a foreign origin', () => {
   const out = (headers: Record<string, string>) =>
     agent.patch('/api/session').set(headers).send({ theme: 'dark' });
 
-  it.each([
+  it.each<Record<string, string>>([
     { Origin: 'https://elsewhere.example' },
     { Origin: 'null' },
     { Origin: 'nonsense' },

@@ -89,12 +89,13 @@ describe('writing people', () => {
   });
 
   it('takes the same creation twice as one', async () => {
-    const person = newUser({ id: v4() });
+    const id = v4();
+    const person = newUser({ id });
     const first = await safety.post('/api/users').send(person).expect(201);
     const again = await safety.post('/api/users').send(person).expect(200);
     expect(again.body).toEqual(first.body);
     const other = await signIn(app, await buildUser({ role: 'safety' }));
-    const { status, body } = await other.post('/api/users').send(newUser({ id: person.id }));
+    const { status, body } = await other.post('/api/users').send(newUser({ id }));
     expect([status, body.type]).toEqual([409, '/problems/id-taken']);
   });
 
