@@ -1,4 +1,4 @@
-import { useState } from 'react';
+import { useState, type ReactNode } from 'react';
 import { StyleSheet, View } from 'react-native';
 import { STOP_REASONS, type WorksheetRecord } from '@/shared/record';
 import { useMessages } from '../i18n/useMessages';
@@ -12,10 +12,12 @@ interface Props {
   first?: (typeof STOP_REASONS)[number];
   /** How a reason is written where somebody else presses for the person who gives it. */
   written?: (reason: string) => string;
+  /** The way back; not offered once a stop was pressed and waits for signal. */
+  children?: ReactNode;
 }
 
 /** Eight ready reasons, each one press; or own words. It works at once. */
-export function StopReasons({ record, first, written }: Props) {
+export function StopReasons({ record, first, written, children }: Props) {
   const words = useMessages();
   const said = words.stop;
   const [own, setOwn] = useState('');
@@ -76,6 +78,7 @@ export function StopReasons({ record, first, written }: Props) {
           onPress={() => give(own.trim())}
         />
       </View>
+      {children}
     </View>
   );
 }

@@ -31,8 +31,9 @@ function Content({ record }: { record: WorksheetRecord }) {
   return (
     <View style={styles.box}>
       <Text variant="answer">{said.body}</Text>
-      <StopReasons record={record} />
-      <Button kind="quiet" icon="left" label={said.noReason} href={href} />
+      <StopReasons record={record}>
+        <Button kind="quiet" icon="left" label={said.noReason} href={href} />
+      </StopReasons>
     </View>
   );
 }
