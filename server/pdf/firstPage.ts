@@ -5,26 +5,12 @@ import type {
   CustomTableLayout,
   TableCell,
 } from 'pdfmake/interfaces';
-import { list, windowText } from '@/shared/format';
+import { windowText } from '@/shared/format';
 import { enumWord } from '@/shared/messages';
 import type { Meaning, Signature } from '@/shared/record';
 import { bannersOf } from './banners';
 import type { PdfContext } from './context';
-import {
-  bold,
-  cite,
-  framed,
-  framedBelow,
-  headCell,
-  label,
-  medium,
-  PAGE,
-  rows,
-  rule,
-  sectionHead,
-  SIZE,
-  strong,
-} from './style';
+import { bold, cite, framed, framedBelow, label, medium, PAGE, rule, SIZE, strong } from './style';
 import { qrSvg } from './qr';
 import { markSvg } from './svg';
 import {
@@ -35,7 +21,7 @@ import {
   supplySummary,
   testSummary,
 } from './summary';
-import { text } from './text';
+import { waysTable } from './waysTable';
 
 /** The narrowest in which a section at 3/8 in to the foot has room for a person outside. */
 const LEFT = 286;
@@ -249,61 +235,4 @@ function check({ m, verifyUrl }: PdfContext): Column {
       cite(m.pdf.checkTitle, { alignment: 'center', fontSize: 6.5, margin: [0, 1, 0, 0] }),
     ],
   };
-}
-
-const tightRows: CustomTableLayout = {
-  ...rows,
-  paddingTop: () => 1.5,
-  paddingBottom: () => 1.5,
-};
-
-/** Section 3 on the first page: one row a way. */
-function waysTable(context: PdfContext): Content[] {
-  const { m, worksheet, locale } = context;
-  const words = m.pdf.ways;
-  const { sources = [], egressSupply } = worksheet.content;
-  const unknown = m.common.notAnswered;
-  const small = { fontSize: 9 };
-  const supplies = egressSupply?.map((supply) => enumWord(locale, 'egressSupply', supply)) ?? [];
-  const note = supplies.length > 0 ? words.egress(list(locale, supplies)) : words.egressNone;
-  const title = sectionHead({
-    number: 3,
-    title: m.common.sections.sources,
-    note: medium(note),
-    width: PAGE.textWidth,
-    gap: 7,
-  });
-  if (sources.length === 0) return [title, text(words.none)];
-  const body: TableCell[][] = [
-    ['', words.way, words.from, words.openedAt, words.held, words.lock, words.by].map((name) =>
-      headCell(name),
-    ),
-    ...sources.map((source, index) => [
-      bold(`3.${index + 1}`, small),
-      strong(source.kind ? enumWord(locale, 'sourceKind', source.kind) : unknown, small),
-      text(
-        [source.from, source.system && enumWord(locale, 'system', source.system)]
-          .filter(Boolean)
-          .join('. '),
-        small,
-      ),
-      text(source.openedAt ? enumWord(locale, 'openedAt', source.openedAt) : unknown, small),
-      text(source.held ? enumWord(locale, 'held', source.held) : unknown, small),
-      bold(source.lockNumber ?? '', small),
-      text(context.crewName(source.byCrewId), small),
-    ]),
-  ];
-  return [
-    title,
-    {
-      table: {
-        headerRows: 1,
-        keepWithHeaderRows: 1,
-        widths: [22, 100, '*', 73, 56, 34, 64],
-        body,
-        dontBreakRows: true,
-      },
-      layout: tightRows,
-    },
-  ];
 }
