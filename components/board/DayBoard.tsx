@@ -45,9 +45,11 @@ function RulerHead({ ruler, width }: Track) {
           </Text>
         );
       })}
-      <Svg width={width} height={RULER_HEIGHT} style={styles.overlay}>
-        <Path d={ticks} stroke={colors.ink} strokeWidth={1.5} />
-      </Svg>
+      <View style={styles.overlay}>
+        <Svg width={width} height={RULER_HEIGHT}>
+          <Path d={ticks} stroke={colors.ink} strokeWidth={1.5} />
+        </Svg>
+      </View>
     </View>
   );
 }
@@ -233,7 +235,7 @@ const styles = StyleSheet.create({
   gap: { width: NAME_WIDTH },
   headTrack: { flex: 1, minWidth: 0, height: RULER_HEIGHT },
   ruler: { height: RULER_HEIGHT },
-  overlay: { ...absolute, left: 0, top: 0, overflow: 'visible' },
+  overlay: { ...absolute, left: 0, top: 0 },
   hour: { ...absolute, top: 2, width: 60 },
   start: { textAlign: 'left' },
   middle: { textAlign: 'center' },
