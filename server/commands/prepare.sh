@@ -53,4 +53,7 @@ need_debian() {
 
 need_postgresql() { need_debian initdb '/usr/lib/postgresql/*/bin/initdb' -- postgresql; }
 need_chromium() { need_debian chromium -- chromium; }
-need_qpdf() { need_debian qpdf -- qpdf; }
+need_qpdf() {
+  need_debian qpdf -- qpdf
+  need_debian pdftotext -- poppler-utils
+}

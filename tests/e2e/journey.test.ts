@@ -1,3 +1,5 @@
+import { execFile } from 'node:child_process';
+import { once } from 'node:events';
 import type { Browser, Locator, Page } from 'playwright-core';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import {
@@ -13,10 +15,24 @@ import {
 } from '../support/browser';
 import { startWebServer, type WebServer } from '../support/webServer';
 
+/** A loaded machine takes its time to draw what was typed. */
+const SETTLED = { timeout: 10_000 };
 const PASSWORD = 'wide-berth-demo';
 const LEAD = { email: 'lead@wideberth.example', pin: '246810', name: 'Renata Quillfeather' };
 const HELPER = { pin: '135792', name: 'Teo Barrancas' };
 const SUPERVISOR = { email: 'supervisor@wideberth.example', pin: '864209' };
+
+const CLOSE = /^Close as lead/;
+
+/** The words of a PDF, by poppler's reader; every white space is one space. */
+async function textOfPdf(bytes: Buffer): Promise<string> {
+  const child = execFile('pdftotext', ['-layout', '-', '-'], { maxBuffer: 16_000_000 });
+  let text = '';
+  child.stdout?.on('data', (chunk: string) => (text += chunk));
+  child.stdin?.end(bytes);
+  await once(child, 'close');
+  return text.replace(/\s+/g, ' ');
+}
 
 let server: WebServer;
 let browser: Browser;
@@ -234,34 +250,158 @@ async function finish(page: Page): Promise<void> {
   );
 }
 
+async function signWith(page: Page, pin: string, button: RegExp): Promise<void> {
+  await page.locator('#signing-pin').fill(pin);
+  await drawSignature(page);
+  await page.getByRole('button', { name: button }).click();
+}
+
+/** The test for absence of voltage at each of four points, all at zero. */
+async function proveDead(page: Page): Promise<void> {
+  await page
+    .getByRole('button', { name: 'Prove it dead' })
+    .or(page.getByRole('link', { name: 'Prove it dead' }))
+    .first()
+    .click();
+  await page.getByRole('heading', { name: 'Prove it dead' }).waitFor();
+  for (const way of await page.getByRole('checkbox', { name: /^3\.\d/ }).all()) await way.click();
+  for (const half of await page.getByRole('checkbox', { name: /: (Up|Down|On)$/ }).all()) {
+    await half.click();
+  }
+  await page
+    .getByRole('checkbox', { name: 'The tester showed the known voltage', exact: true })
+    .click();
+  const points = page.getByRole('tab');
+  expect(await points.count()).toBe(4);
+  for (let point = 0; point < 4; point += 1) {
+    await points.nth(point).click();
+    for (const cell of await page.getByRole('table').getByRole('textbox').all())
+      await cell.fill('0.0');
+  }
+  await type(page, 'Current in the neutral, before it is parted', '0');
+  await page.getByRole('radio', { name: /covered or guarded/ }).click();
+  await page.getByRole('radio', { name: /Discharged/ }).click();
+  await page.getByRole('checkbox', { name: 'The tester showed the known voltage again' }).click();
+  await page.getByLabel(/PIN, 6 digits/).fill(LEAD.pin);
+  await page.getByRole('button', { name: /^Record: proved dead/ }).click();
+  await page
+    .getByText(/^Proved dead/)
+    .first()
+    .waitFor();
+}
+
+async function closeOut(page: Page): Promise<void> {
+  for (const question of [
+    'Are tools, jumpers and test leads out?',
+    'Are all covers back on?',
+    'Is everybody near warned that power returns?',
+    'Is each lock off, taken off by its owner?',
+    'Is everybody clear of the circuit?',
+    'Is the circuit restored?',
+  ]) {
+    await pick(page, question, 'Yes');
+  }
+  await type(page, 'Emergency lights tested on battery for', '30');
+  await page.getByLabel(/PIN, 6 digits/).fill(LEAD.pin);
+  await page.getByRole('button', { name: CLOSE }).click();
+}
+
 describe('four LED drivers in a level 2 corridor, 480Y/277, LP-2/14', () => {
   it('goes from sign-in to a closed record and its PDF through the interface alone', async () => {
     const { page, faults } = await newScreen(browser, server.base);
     await signInAs(page, LEAD.email, PASSWORD);
-    await page
-      .getByRole('link', { name: 'New worksheet' })
-      .or(page.getByRole('button', { name: 'New worksheet' }))
-      .click();
+    await page.getByRole('link', { name: 'New worksheet' }).click();
     await page.getByText('Ways it can be live').first().waitFor();
-
     await fillJob(page);
     await fillSupply(page);
     await fillCrew(page);
     await fillSources(page, 'Not opened');
-    await keepPicture(page, 'worksheet-stop');
-    // NFPA 70E-2024 Table 130.4(E)(a): 480 V, fixed 3 ft 6 in, restricted 1 ft 0 in.
     await fillTheRest(page);
+    await finish(page);
+
+    // NFPA 70E-2024 Table 130.4(E)(a), 480 V: limited 3 ft 6 in fixed, restricted 1 ft 0 in;
+    // Table 130.7(C)(15)(a), rows 2 and 6 together: arc flash 5 ft 0 in.
     const strip = page.getByRole('button', { name: /Limited/ }).first();
-    await expect.poll(() => strip.getAttribute('aria-label')).toMatch(/3\sft\s6\sin/);
+    await expect.poll(() => strip.getAttribute('aria-label'), SETTLED).toMatch(/3\sft\s6\sin/);
     expect(await strip.getAttribute('aria-label')).toMatch(/1\sft\s0\sin/);
     expect(await strip.getAttribute('aria-label')).toMatch(/5\sft\s0\sin/);
 
-    // The battery unit that is still connected stops the worksheet, with its reason and source.
-    await expect
-      .poll(() => page.getByRole('region', { name: /^Stop: / }).count())
-      .toBeGreaterThan(0);
+    // The battery unit that is still connected stops the worksheet, with its reason and its source.
+    const stop = page.getByRole('region', { name: /^Stop: .*battery/i }).first();
+    await stop.waitFor();
+    expect(await stop.textContent()).toMatch(/1910\.333|Common practice/);
+    await keepPicture(page, 'worksheet-stop');
+    const ways = await section(page, 'Ways it can be live');
+    await ways.locator('[aria-label^="3.4"]').first().click();
+    await select(ways, 'Opened at', 'Battery connector');
+    await tickAll(await section(page, 'Protective equipment'));
+    await keepPicture(page, 'worksheet-mended');
+    await page.getByText('Ready to sign', { exact: true }).first().waitFor();
+    await page
+      .getByText(/^Sent /)
+      .first()
+      .waitFor();
+    await keepPicture(page, 'worksheet-ready');
+    const address = page.url();
+
+    await page.getByRole('link', { name: /^Sign the plan/ }).click();
+    await signWith(page, LEAD.pin, /^Sign as lead/);
+    await page.getByRole('link', { name: `Hand the phone to ${HELPER.name}` }).click();
+
+    // The helper reads to the end and signs on the lead's phone with their own PIN.
+    await page.getByTestId('briefing-end').scrollIntoViewIfNeeded();
+    await keepPicture(page, 'helper');
+    await page.getByRole('button', { name: /^(I understand|Entiendo)/ }).click();
+    await signWith(page, '111222', /^(Sign|Firmar)/);
+    await page
+      .getByText(/The PIN is wrong|El PIN/)
+      .first()
+      .waitFor();
+    await page.locator('#signing-pin').fill(HELPER.pin);
+    await page.getByRole('button', { name: /^(Sign|Firmar)/ }).click();
+    await page
+      .getByText(/^(Signed|Firmado)/)
+      .first()
+      .waitFor();
+
+    const tablet = await newScreen(browser, server.base, { width: 820, height: 1180 });
+    await signInAs(tablet.page, SUPERVISOR.email, PASSWORD);
+    await tablet.page.goto(`${address}/sign/countersigned`);
+    await signWith(tablet.page, SUPERVISOR.pin, /^Countersign/);
+    await tablet.page
+      .getByText(/In force/)
+      .first()
+      .waitFor();
+    await keepPicture(tablet.page, 'countersigned');
+
+    await page.goto(address);
+    await page.getByText('Not proved dead: treat as live').first().waitFor();
+    await proveDead(page);
+    await keepPicture(page, 'proved');
+    await page.goto(`${address}/close`);
+    await closeOut(page);
+    await page.goto(address);
+    await page.getByText('Closed', { exact: true }).first().waitFor();
+    await keepPicture(page, 'closed');
+
+    const id = address.split('/').at(-1) ?? '';
+    const pdf = await page.request.get(`/api/worksheets/${id}/pdf`);
+    expect(pdf.status()).toBe(200);
+    expect(pdf.headers()['content-type']).toBe('application/pdf');
+    const text = await textOfPdf(await pdf.body());
+    for (const figure of [
+      '3 ft 6 in',
+      '1 ft 0 in',
+      '5 ft 0 in',
+      'LP-2',
+      '480Y/277',
+      '0417',
+      LEAD.name,
+      HELPER.name,
+    ]) {
+      expect(text).toContain(figure);
+    }
     expect(faults).toEqual([]);
-    await finish(page);
-    await keepPicture(page, 'worksheet-finished');
+    expect(tablet.faults).toEqual([]);
   });
 });

@@ -10,6 +10,7 @@ import { useTheme } from '../../theme/useTheme';
 import { Button, CheckRow, FirstAidPanel, Select, StateMark, Text } from '../../ui';
 import { FieldCheck } from '../form/FieldCheck';
 import { FieldSelect, FieldText, FieldYesNo } from '../form/fields';
+import { toggled, useListField } from '../form/useListField';
 import { useShowField } from '../form/shownFields';
 import { wordOf } from '../form/fieldWords';
 import { useFieldState, useWorksheetForm } from '../form/WorksheetFormContext';
@@ -127,7 +128,7 @@ function Topics() {
   const words = useMessages();
   const { content, assessment } = useWorksheetForm();
   const { findings } = useFieldState('briefing.topics');
-  const { setValue } = useFormContext();
+  const change = useListField<string>('briefing.topics');
   useShowField('briefing.topics');
   const covered = content.briefing?.topics ?? [];
   const asked = BRIEFING_TOPICS.filter(
@@ -146,13 +147,7 @@ function Topics() {
             note={say}
             checked={covered.includes(topic)}
             todo={!covered.includes(topic)}
-            onChange={(now) =>
-              setValue(
-                'briefing.topics',
-                now ? [...covered, topic] : covered.filter((each) => each !== topic),
-                { shouldDirty: true },
-              )
-            }
+            onChange={(now) => change((list) => toggled(list, topic, now))}
           />
         );
       })}

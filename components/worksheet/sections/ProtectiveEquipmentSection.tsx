@@ -9,6 +9,7 @@ import { space } from '../../theme/tokens';
 import { CheckRow, Citation, Select, StateMark, Text } from '../../ui';
 import { FieldCheck } from '../form/FieldCheck';
 import { FieldChoice, FieldDate } from '../form/fields';
+import { toggled, useListField } from '../form/useListField';
 import { useShowField } from '../form/shownFields';
 import { useFieldState, useWorksheetForm } from '../form/WorksheetFormContext';
 import { FindingPanels } from '../parts/FindingPanels';
@@ -99,7 +100,7 @@ function ItemRow({ item }: { item: RequiredItem }) {
   const locale = useLocale();
   const { content } = useWorksheetForm();
   const { findings } = useFieldState('protectiveEquipment.ready');
-  const { setValue } = useFormContext();
+  const change = useListField<string>('protectiveEquipment.ready');
   const ready = content.protectiveEquipment?.ready ?? [];
   const checked = ready.includes(item.id);
   const others = findings.filter(
@@ -111,13 +112,7 @@ function ItemRow({ item }: { item: RequiredItem }) {
         label={itemWords(locale, item)}
         checked={checked}
         todo={!checked}
-        onChange={(now) =>
-          setValue(
-            'protectiveEquipment.ready',
-            now ? [...ready, item.id] : ready.filter((id) => id !== item.id),
-            { shouldDirty: true },
-          )
-        }
+        onChange={(now) => change((list) => toggled(list, item.id, now))}
       />
       <FindingPanels findings={others} />
     </>

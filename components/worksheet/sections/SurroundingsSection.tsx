@@ -15,6 +15,7 @@ import { space } from '../../theme/tokens';
 import { Button, CheckRow, Facts, Text, type Fact } from '../../ui';
 import { FieldCheck } from '../form/FieldCheck';
 import { FieldChoice, FieldDistance, FieldSelect, FieldText, FieldYesNo } from '../form/fields';
+import { useListField } from '../form/useListField';
 import { useShowField } from '../form/shownFields';
 import { wordOf } from '../form/fieldWords';
 import { useFieldState, useWorksheetForm } from '../form/WorksheetFormContext';
@@ -114,6 +115,7 @@ function GroundedSurfaces() {
   const { content } = useWorksheetForm();
   const { setValue } = useFormContext();
   const surfaces = content.surroundings?.groundedSurfaces;
+  const change = useListField<object>('surroundings.groundedSurfaces');
   const set = (next: unknown) =>
     setValue('surroundings.groundedSurfaces', next, { shouldDirty: true });
   return (
@@ -126,7 +128,7 @@ function GroundedSurfaces() {
         <Surface
           key={index}
           index={index}
-          onRemove={() => set(surfaces?.filter((__, place) => place !== index))}
+          onRemove={() => change((list) => list.filter((__, place) => place !== index))}
         />
       ))}
       {(surfaces === undefined || surfaces.length === 0) && (
@@ -140,7 +142,7 @@ function GroundedSurfaces() {
       <Button
         icon="plus"
         label={words.worksheet.addSurface}
-        onPress={() => set([...(surfaces ?? []), {}])}
+        onPress={() => change((list) => [...list, {}])}
       />
       <ElementFindings path="/surroundings/groundedSurfaces" />
     </View>
