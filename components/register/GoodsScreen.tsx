@@ -10,7 +10,8 @@ import { useUser } from '../api/session';
 import { useLocale } from '../i18n/preferences';
 import { useMessages } from '../i18n/useMessages';
 import { Button, LoadingScreen, OfflineScreen, ProblemScreen, Text } from '../ui';
-import { rubberGoodsQuery, useSites } from '../worksheet/registerQueries';
+import { rubberGoodsQuery } from '../worksheet/registerQueries';
+import { useSitesByName } from './useSitesByName';
 import { FilterChips } from './FilterChips';
 import { GoodsForm } from './GoodsForm';
 import { GoodsList, siteOf } from './GoodsList';
@@ -86,7 +87,7 @@ function Filters({ goods, sites, todayAt, view }: ListProps) {
   );
 }
 
-function Buttons({ view }: { view: RegisterViewControl }) {
+function FileButtons({ view }: { view: RegisterViewControl }) {
   const { register } = useMessages();
   return (
     <>
@@ -100,12 +101,6 @@ function Buttons({ view }: { view: RegisterViewControl }) {
         label={register.importCsv}
         onPress={() => view.open({ act: 'import' })}
       />
-      <Button
-        kind="primary"
-        icon="plus"
-        label={register.goods.add}
-        onPress={() => view.open({ id: 'new' })}
-      />
     </>
   );
 }
@@ -113,6 +108,18 @@ function Buttons({ view }: { view: RegisterViewControl }) {
 interface RecordProps extends ListProps {
   today: (timeZone?: string) => string;
   mayWrite: boolean;
+}
+
+function AddButton({ view }: { view: RegisterViewControl }) {
+  const { register } = useMessages();
+  return (
+    <Button
+      kind="primary"
+      icon="plus"
+      label={register.goods.add}
+      onPress={() => view.open({ id: 'new' })}
+    />
+  );
 }
 
 /** What stands beside the list: a form, a record, or nothing. */
@@ -160,7 +167,7 @@ export function GoodsScreen() {
   const view = useRegisterView('/rubber-goods');
   const today = useToday();
   const list = useQuery(rubberGoodsQuery);
-  const sites = useSites();
+  const sites = useSitesByName();
   const mayWrite = useUser().role === 'safety';
   const words = register.goods;
   const goods = list.data?.items ?? NOTHING;
@@ -190,7 +197,8 @@ export function GoodsScreen() {
     <RegisterFrame
       place="rubberGoods"
       title={words.title}
-      buttons={mayWrite ? <Buttons view={view} /> : undefined}
+      primary={mayWrite ? <AddButton view={view} /> : undefined}
+      others={mayWrite ? <FileButtons view={view} /> : undefined}
       stale={list.isError}
       record={record}
       onClose={view.close}

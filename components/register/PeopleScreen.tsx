@@ -9,7 +9,8 @@ import { apiUrl } from '../api/request';
 import { useLocale } from '../i18n/preferences';
 import { useMessages } from '../i18n/useMessages';
 import { Button, LoadingScreen, OfflineScreen, ProblemScreen, Text } from '../ui';
-import { peopleQuery, useSites } from '../worksheet/registerQueries';
+import { peopleQuery } from '../worksheet/registerQueries';
+import { useSitesByName } from './useSitesByName';
 import { FilterChips } from './FilterChips';
 import { ImportScreen } from './ImportScreen';
 import { PeopleList } from './PeopleList';
@@ -77,7 +78,7 @@ function Filters({
   );
 }
 
-function Buttons({ view }: { view: RegisterViewControl }) {
+function FileButtons({ view }: { view: RegisterViewControl }) {
   const { register } = useMessages();
   return (
     <>
@@ -91,13 +92,19 @@ function Buttons({ view }: { view: RegisterViewControl }) {
         label={register.importCsv}
         onPress={() => view.open({ act: 'import' })}
       />
-      <Button
-        kind="primary"
-        icon="plus"
-        label={register.people.add}
-        onPress={() => view.open({ id: 'new' })}
-      />
     </>
+  );
+}
+
+function AddButton({ view }: { view: RegisterViewControl }) {
+  const { register } = useMessages();
+  return (
+    <Button
+      kind="primary"
+      icon="plus"
+      label={register.people.add}
+      onPress={() => view.open({ id: 'new' })}
+    />
   );
 }
 
@@ -159,7 +166,7 @@ export function PeopleScreen() {
   const view = useRegisterView('/people');
   const today = useToday()();
   const people = useQuery(peopleQuery);
-  const sites = useSites();
+  const sites = useSitesByName();
   const words = register.people;
   const everybody = people.data?.items ?? NOBODY;
   const record = useRecord(everybody, sites, view, today);
@@ -181,7 +188,8 @@ export function PeopleScreen() {
     <RegisterFrame
       place="people"
       title={words.title}
-      buttons={<Buttons view={view} />}
+      primary={<AddButton view={view} />}
+      others={<FileButtons view={view} />}
       stale={people.isError}
       record={record}
       onClose={view.close}

@@ -17,8 +17,10 @@ interface Props {
   /** The place in the header that is open. */
   place: 'people' | 'sites' | 'rubberGoods';
   title: string;
-  /** Buttons of the list. */
-  buttons?: ReactNode;
+  /** The button that adds a record. */
+  primary?: ReactNode;
+  /** Buttons for the list as a file; on a phone they stand below it. */
+  others?: ReactNode;
   stale: boolean;
   list: ReactNode;
   record?: { head: RecordHead; body: ReactNode };
@@ -44,7 +46,16 @@ function Words({ over, title, under, level }: RecordHead & { level?: 2 }) {
 }
 
 /** A list with the open record beside it; where there is no room beside, the record covers the list. */
-export function RegisterFrame({ place, title, buttons, stale, list, record, onClose }: Props) {
+export function RegisterFrame({
+  place,
+  title,
+  primary,
+  others,
+  stale,
+  list,
+  record,
+  onClose,
+}: Props) {
   const { register } = useMessages();
   const { isWide, isPhone } = useBreakpoint();
   if (record !== undefined && !isWide) {
@@ -64,8 +75,11 @@ export function RegisterFrame({ place, title, buttons, stale, list, record, onCl
       place={place}
       width={isWide ? 'full' : 'column'}
       titleEnd={
-        buttons === undefined ? undefined : (
-          <View style={[styles.buttons, isPhone && styles.stretch]}>{buttons}</View>
+        primary === undefined ? undefined : (
+          <View style={styles.buttons}>
+            {!isPhone && others}
+            {primary}
+          </View>
         )
       }
       asideWidth={layout.record}
@@ -91,6 +105,7 @@ export function RegisterFrame({ place, title, buttons, stale, list, record, onCl
       <View style={styles.list}>
         {stale && <Notice icon="clock">{register.asLastRead}</Notice>}
         {list}
+        {isPhone && others !== undefined && <View style={styles.buttons}>{others}</View>}
       </View>
     </Screen>
   );
@@ -99,7 +114,6 @@ export function RegisterFrame({ place, title, buttons, stale, list, record, onCl
 const styles = StyleSheet.create({
   words: { flex: 1, gap: 2 },
   buttons: { flexDirection: 'row', flexWrap: 'wrap', gap: 10 },
-  stretch: { width: '100%' },
   list: { gap: space.md },
   panel: { padding: space.xl, gap: space.md },
   head: { flexDirection: 'row', alignItems: 'flex-start', gap: space.xs },

@@ -85,14 +85,10 @@ function Plan({ site }: { site: Site }) {
   const known = rows.flatMap(([icon, label, text]) =>
     text === undefined || text === '' ? [] : [{ icon, text: `${label}: ${text}` }],
   );
-  return (
-    <Section id="site-plan" title={words.emergency}>
-      {known.length === 0 ? (
-        <Text>{words.noPlan}</Text>
-      ) : (
-        <FirstAidPanel title={words.emergency} rows={known} />
-      )}
-    </Section>
+  return known.length === 0 ? (
+    <Notice title={words.emergency}>{words.noPlan}</Notice>
+  ) : (
+    <FirstAidPanel title={words.emergency} rows={known} />
   );
 }
 
@@ -177,8 +173,8 @@ export function SitePanel({ site, people, view }: Props) {
           ...(site.deskToTell === '' ? [] : [{ label: words.desk, value: site.deskToTell }]),
         ]}
       />
+      <Plan site={site} />
       <View>
-        <Plan site={site} />
         <Panels site={site} />
         <Members site={site} people={people} />
       </View>

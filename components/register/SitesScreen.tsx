@@ -207,7 +207,7 @@ export function SitesScreen() {
     <RegisterFrame
       place="sites"
       title={words.title}
-      buttons={
+      primary={
         <Button
           kind="primary"
           icon="plus"

@@ -48,20 +48,29 @@ interface Props {
 export function TimeBar({ line, parts, alone }: Props) {
   const { colors } = useTheme();
   const reach = alone === true ? styles.within : styles.through;
-  const { elapsed, rest, overdue, waiting } = parts ?? {};
+  const { elapsed, rest, overdue, waiting, runsOn } = parts ?? {};
   return (
     <View aria-hidden style={[styles.row, { width: line.width }]}>
       {line.ticks.map(({ at }) => (
         <View key={at} style={[styles.line, reach, { left: at, backgroundColor: colors.hair }]} />
       ))}
       {waiting !== undefined && (
-        <View style={[styles.bar, styles.dashed, { borderColor: colors.ink }, box(waiting)]} />
+        <View
+          style={[
+            styles.bar,
+            styles.dashed,
+            runsOn && styles.openEnd,
+            { borderColor: colors.ink },
+            box(waiting),
+          ]}
+        />
       )}
       {rest !== undefined && rest[1] > 0 && (
         <View
           style={[
             styles.bar,
             styles.hollow,
+            runsOn && styles.openEnd,
             { borderColor: colors.ink, backgroundColor: colors.paper },
             box(rest),
           ]}
@@ -96,5 +105,6 @@ const styles = StyleSheet.create({
   today: { width: 2, marginLeft: -1 },
   bar: { position: 'absolute', top: (ROW - BAR) / 2, height: BAR },
   hollow: { borderWidth: 2 },
+  openEnd: { borderRightWidth: 0 },
   dashed: { borderWidth: 2, borderStyle: 'dashed' },
 });

@@ -24,6 +24,8 @@ export interface Timeline {
   width: number;
   today: number;
   ticks: readonly Tick[];
+  /** The last day of the ruler. */
+  last: string;
   /** Where a date lies, held inside the ruler. */
   at: (date: string) => number;
 }
@@ -34,12 +36,14 @@ export function timeline(today: string, width: number, locale: Locale): Timeline
   const from = startOfMonth(addMonths(day, -BEFORE));
   const to = endOfMonth(addMonths(day, AFTER));
   const first = format(from, 'yyyy-MM-dd');
-  const days = daysBetween(first, format(to, 'yyyy-MM-dd')) + 1;
+  const last = format(to, 'yyyy-MM-dd');
+  const days = daysBetween(first, last) + 1;
   const at = (date: string) =>
     Math.min(width, Math.max(0, (daysBetween(first, date) / days) * width));
   const month = new Intl.DateTimeFormat(locale, { month: 'short' });
   return {
     width,
+    last,
     today: at(today),
     ticks: eachMonthOfInterval({ start: from, end: to }).map((start) => ({
       at: at(format(start, 'yyyy-MM-dd')),
@@ -58,6 +62,8 @@ export interface BarParts {
   rest?: [number, number];
   overdue?: [number, number];
   waiting?: [number, number];
+  /** It ends past the ruler: its end is not drawn. */
+  runsOn?: boolean;
 }
 
 interface BarDates {
@@ -82,8 +88,9 @@ export function barParts(line: Timeline, { from, until, today, waits }: BarDates
       overdue: [left, width],
     };
   }
-  if (waits === true) return { waiting: [start, Math.max(2, end - start)] };
+  const runsOn = until > line.last;
+  if (waits === true) return { runsOn, waiting: [start, Math.max(2, end - start)] };
   const rest: [number, number] = [line.today, Math.max(0, end - line.today)];
-  if (from === undefined) return { rest };
-  return { elapsed: [start, Math.max(0, line.today - start)], rest };
+  if (from === undefined) return { runsOn, rest };
+  return { runsOn, elapsed: [start, Math.max(0, line.today - start)], rest };
 }
