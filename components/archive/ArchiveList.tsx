@@ -19,17 +19,25 @@ function dayOf(row: WorksheetRow, locale: Locale): string {
   return dateText(locale, calendarDate(row.startsAt ?? row.createdAt, row.timeZone));
 }
 
-/** What was met on the way to the signature: the first by name, the rest by number. */
-export function foundWords(row: WorksheetRow, words: Messages): string | undefined {
-  const [first, ...rest] = row.metCodes ?? [];
+/** What was met on the way to the signature: the first by name, what was searched for before the others, the rest by number. */
+function foundWords(
+  row: WorksheetRow,
+  asked: readonly string[],
+  words: Messages,
+): string | undefined {
+  const met = row.metCodes ?? [];
+  const [first, ...rest] = [
+    ...met.filter((code) => asked.includes(code)),
+    ...met.filter((code) => !asked.includes(code)),
+  ];
   if (first === undefined) return undefined;
   const title = findingTitle(words, first);
   return rest.length === 0 ? title : `${title}, ${words.archive.andMore(rest.length)}`;
 }
 
-function Found({ row }: { row: WorksheetRow }) {
+function Found({ row, asked }: { row: WorksheetRow; asked: readonly string[] }) {
   const words = useMessages();
-  const found = foundWords(row, words);
+  const found = foundWords(row, asked, words);
   if (found === undefined) {
     return (
       <Text variant="note" color="ink2">
@@ -124,12 +132,21 @@ function useColumns({ address, width }: Pick<Props, 'address' | 'width'>): Colum
       cell: (row) => <TaskAndPlace row={row} />,
     },
     ...(width >= WITH_CIRCUIT ? [circuit] : []),
-    { key: 'found', label: archive.columns.found, share: 1, cell: (row) => <Found row={row} /> },
+    {
+      key: 'found',
+      label: archive.columns.found,
+      share: 1,
+      cell: (row) => <Found row={row} asked={filters.finding} />,
+    },
     { key: 'state', label: archive.columns.state, width: 128, cell: (row) => <State row={row} /> },
   ];
 }
 
-function PhoneList({ rows, onOpen }: Pick<Props, 'rows' | 'onOpen'>) {
+function PhoneList({
+  rows,
+  asked,
+  onOpen,
+}: Pick<Props, 'rows' | 'onOpen'> & { asked: readonly string[] }) {
   const words = useMessages();
   const locale = useLocale();
   return (
@@ -144,7 +161,7 @@ function PhoneList({ rows, onOpen }: Pick<Props, 'rows' | 'onOpen'>) {
               taskWords(row, words),
               `${placeWords(row, words)}, ${row.leadName}`,
               words.enumerations.state[row.state],
-              foundWords(row, words),
+              foundWords(row, asked, words),
             ]
               .filter((part) => part !== undefined)
               .join('. ')}
@@ -161,7 +178,9 @@ export function ArchiveList({ rows, address, width, onOpen }: Props) {
   const { archive } = useMessages();
   const { isPhone } = useBreakpoint();
   const columns = useColumns({ address, width });
-  if (isPhone) return <PhoneList rows={rows} onOpen={onOpen} />;
+  if (isPhone) {
+    return <PhoneList rows={rows} asked={address.filters.finding} onOpen={onOpen} />;
+  }
   return (
     <View style={styles.table}>
       <Table

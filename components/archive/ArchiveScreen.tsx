@@ -157,7 +157,6 @@ export function ArchiveScreen() {
               key={record}
               id={record}
               onClose={() => address.set({ record: undefined })}
-              onLeave={() => keepListPlace(query)}
             />
           </View>
         ) : undefined

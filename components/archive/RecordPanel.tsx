@@ -138,7 +138,7 @@ function Head({ record, onClose }: { record: WorksheetRecord; onClose?: () => vo
   );
 }
 
-function Shown({ record, onClose, onLeave }: { record: WorksheetRecord } & Omit<Props, 'id'>) {
+function Shown({ record, onClose }: { record: WorksheetRecord } & Omit<Props, 'id'>) {
   const words = useMessages();
   const locale = useLocale();
   const { archive } = words;
@@ -168,7 +168,6 @@ function Shown({ record, onClose, onLeave }: { record: WorksheetRecord } & Omit<
           <Button
             label={archive.openInFull}
             href={{ pathname: '/worksheets/[worksheetId]', params }}
-            onPress={onLeave}
           />
         </View>
         <View style={styles.whole}>
@@ -190,7 +189,6 @@ interface Props {
   id: string;
   /** Beside the list: a cross at its head. */
   onClose?: () => void;
-  onLeave?: () => void;
 }
 
 /** One record of the archive: whether it is unaltered, its PDF, what happened, what was read and met. */

@@ -15,7 +15,7 @@ export const board: Words<typeof en> = {
   nothingWaitsForSupervisor: 'Nada espera a un supervisor.',
   since: (duration) => `Espera ${duration}`,
   revision: (revision) => `Revisión ${revision}`,
-  off: 'Apagado',
+  off: 'Sin energía',
   energized: 'Energizado',
   noExceptions: 'Sin excepciones',
   readingExceptions: 'Leyendo las excepciones',
@@ -40,7 +40,7 @@ export const board: Words<typeof en> = {
   deviation: (label, was, is) => `${label}: ${is}, antes ${was}`,
   more: (count) => (count === 1 ? 'y 1 más' : `y ${count} más`),
   everyField: 'Todos los datos',
-  sendBack: 'Regresar',
+  sendBack: 'Devolver',
   countersign: 'Refrendar',
   readAndSign: 'Leer y firmar',
   read: 'Leerla',
@@ -52,7 +52,7 @@ export const board: Words<typeof en> = {
     [
       `${inForce} en vigor`,
       over > 0 ? `${over} fuera de tiempo` : '',
-      stopped > 0 ? (stopped === 1 ? '1 parada' : `${stopped} paradas`) : '',
+      stopped > 0 ? (stopped === 1 ? '1 detenida' : `${stopped} detenidas`) : '',
     ]
       .filter((part) => part !== '')
       .join(', '),
@@ -64,9 +64,9 @@ export const board: Words<typeof en> = {
     energized: 'Energizado',
     notProved: 'Sin comprobar: trátelo como vivo',
     notProvedShort: 'Sin comprobar',
-    proved: 'Apagado, comprobado sin tensión',
+    proved: 'Comprobado sin tensión',
     over: (duration) => `${duration} de más, sin cerrar`,
-    stopped: (time, name) => (name === '' ? `Parado ${time}` : `Parado ${time} por ${name}`),
+    stopped: (time, name) => (name === '' ? `Detenida ${time}` : `Detenida ${time} por ${name}`),
     waitsForYou: 'Espera su firma',
     waitsForSupervisor: 'Espera a un supervisor',
     waitsForCrew: (count) =>
