@@ -3,6 +3,7 @@ import { useState, type ReactNode } from 'react';
 import { StyleSheet, View } from 'react-native';
 import { dayText, durationText } from '@/shared/format';
 import type { WorksheetRecord, WorksheetRow } from '@/shared/record';
+import { useUser } from '../api/session';
 import { links } from '../home/links';
 import { placeWords, taskWords } from '../home/rowWords';
 import { useLocale, useUnits } from '../i18n/preferences';
@@ -191,6 +192,7 @@ export function WaitingCard({ row, record, now, open, onOpen }: Props) {
   const units = useUnits();
   const { colors } = useTheme();
   const stacked = useStacked();
+  const { role } = useUser();
   const { board } = words;
   const exceptions =
     record.data === undefined ? undefined : exceptionsOf(record.data, { words, locale, units });
@@ -205,7 +207,7 @@ export function WaitingCard({ row, record, now, open, onOpen }: Props) {
           open ? undefined : (
             <Button
               iconEnd="right"
-              label={board.readAndSign}
+              label={role === 'supervisor' ? board.readAndSign : board.read}
               onPress={onOpen}
               style={styles.read}
             />

@@ -1,7 +1,6 @@
 /** The archive: every worksheet, found by number, place, panel, people or finding. */
 export const archive = {
   title: 'Archive',
-  loading: 'Loading the archive',
   search: 'Search',
   searchHint: 'Number, panel and circuit, place, task, people, notes',
   clearSearch: 'Clear the search',
@@ -10,7 +9,6 @@ export const archive = {
     count === 0 ? 'None found' : count === 1 ? '1 worksheet' : `${count} worksheets`,
   shown: (count: number) => `${count} shown, more below`,
   more: 'Show more',
-  loadingMore: 'Loading more',
   nothing: 'No worksheet fits this search.',
   nothingHint: 'Take out a filter, or search for fewer words.',
   clearAll: 'Take out every filter',
@@ -37,7 +35,6 @@ export const archive = {
   },
   from: (date: string) => `From ${date}`,
   to: (date: string) => `To ${date}`,
-  any: 'Any',
   span: { month: 'This month', quarter: '3 months', year: '12 months' },
   sort: {
     '-createdAt': 'Newest first',
@@ -63,7 +60,6 @@ export const archive = {
   closeRecord: 'Close the record',
   backToList: 'List',
   loadingRecord: 'Loading the record',
-  recordNotRead: 'The record could not be read.',
   head: (number: string, revision: number, state: string) =>
     `${number}, revision ${revision}, ${state}`,
   pdf: 'PDF',
@@ -71,11 +67,8 @@ export const archive = {
   trail: 'Trail and revisions',
   happened: 'What happened',
   readings: 'Readings',
-  readingsNote: 'Latest proof',
   highest: (volts: string, count: number) =>
     count === 1 ? `${volts}, 1 reading` : `${volts} at most, ${count} readings`,
-  noProof: 'No proof was recorded.',
   foundHere: 'Found here',
   findOthers: 'Find the others',
-  pair: (from: string, to: string) => `${from} to ${to}`,
 };

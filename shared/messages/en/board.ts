@@ -41,7 +41,6 @@ export const board = {
   readAndSign: 'Read and sign',
   read: 'Read it',
   heldByQuestion: 'A question has no answer yet',
-  onCrew: 'You are on this crew. Another supervisor signs.',
 
   inForce: 'In force now',
   counts: (inForce: number, over: number, stopped: number) =>
@@ -54,12 +53,10 @@ export const board = {
       .join(', '),
   nothingInForce: 'Nothing is in force.',
   now: (time: string) => `Now, ${time}`,
-  asOf: (time: string) => `As of ${time}`,
   crew: (lead: string, others: number) => (others === 0 ? lead : `${lead} and ${others}`),
   bar: {
     energized: 'Energized',
     notProved: 'Not proved dead: treat as live',
-    notProvedShort: 'Not proved dead',
     proved: 'Off, proved dead',
     over: (duration: string) => `${duration} over, not closed`,
     stopped: (time: string, name: string) =>
@@ -68,9 +65,7 @@ export const board = {
     waitsForSupervisor: 'Waits for a supervisor',
     waitsForCrew: (count: number) =>
       count === 1 ? 'Waits for 1 of the crew' : `Waits for ${count} of the crew`,
-    until: (time: string) => `until ${time}`,
   },
   window: (from: string, to: string) => `${from} to ${to}`,
-  otherDay: (from: string, to: string) => `Planned ${from} to ${to}`,
   zone: (zone: string) => `Site time, ${zone}`,
 };

@@ -3,7 +3,6 @@ import type { Words } from '../words';
 
 export const archive: Words<typeof en> = {
   title: 'Archivo',
-  loading: 'Cargando el archivo',
   search: 'Buscar',
   searchHint: 'Número, tablero y circuito, lugar, tarea, personas, notas',
   clearSearch: 'Borrar la búsqueda',
@@ -16,7 +15,6 @@ export const archive: Words<typeof en> = {
         : `${count} hojas de trabajo`,
   shown: (count) => `${count} a la vista, hay más abajo`,
   more: 'Mostrar más',
-  loadingMore: 'Cargando más',
   nothing: 'Ninguna hoja de trabajo coincide.',
   nothingHint: 'Quite un filtro, o busque con menos palabras.',
   clearAll: 'Quitar todos los filtros',
@@ -43,7 +41,6 @@ export const archive: Words<typeof en> = {
   },
   from: (date) => `Desde ${date}`,
   to: (date) => `Hasta ${date}`,
-  any: 'Cualquiera',
   span: { month: 'Este mes', quarter: '3 meses', year: '12 meses' },
   sort: {
     '-createdAt': 'La más nueva primero',
@@ -69,18 +66,14 @@ export const archive: Words<typeof en> = {
   closeRecord: 'Cerrar el registro',
   backToList: 'Lista',
   loadingRecord: 'Cargando el registro',
-  recordNotRead: 'No se pudo leer el registro.',
   head: (number, revision, state) => `${number}, revisión ${revision}, ${state}`,
   pdf: 'PDF',
   openInFull: 'Abrir completo',
   trail: 'Historial y revisiones',
   happened: 'Qué pasó',
   readings: 'Lecturas',
-  readingsNote: 'Última prueba',
   highest: (volts, count) =>
     count === 1 ? `${volts}, 1 lectura` : `${volts} como máximo, ${count} lecturas`,
-  noProof: 'No se anotó ninguna prueba.',
   foundHere: 'Hallado aquí',
   findOthers: 'Buscar las demás',
-  pair: (from, to) => `${from} a ${to}`,
 };

@@ -45,7 +45,6 @@ export const board: Words<typeof en> = {
   readAndSign: 'Leer y firmar',
   read: 'Leerla',
   heldByQuestion: 'Una pregunta no tiene respuesta',
-  onCrew: 'Usted está en esta cuadrilla. Firma otro supervisor.',
 
   inForce: 'En vigor ahora',
   counts: (inForce, over, stopped) =>
@@ -58,12 +57,10 @@ export const board: Words<typeof en> = {
       .join(', '),
   nothingInForce: 'Nada está en vigor.',
   now: (time) => `Ahora, ${time}`,
-  asOf: (time) => `A las ${time}`,
   crew: (lead, others) => (others === 0 ? lead : `${lead} y ${others}`),
   bar: {
     energized: 'Energizado',
     notProved: 'Sin comprobar: trátelo como vivo',
-    notProvedShort: 'Sin comprobar',
     proved: 'Comprobado sin tensión',
     over: (duration) => `${duration} de más, sin cerrar`,
     stopped: (time, name) => (name === '' ? `Detenida ${time}` : `Detenida ${time} por ${name}`),
@@ -71,9 +68,7 @@ export const board: Words<typeof en> = {
     waitsForSupervisor: 'Espera a un supervisor',
     waitsForCrew: (count) =>
       count === 1 ? 'Espera a 1 de la cuadrilla' : `Espera a ${count} de la cuadrilla`,
-    until: (time) => `hasta las ${time}`,
   },
   window: (from, to) => `${from} a ${to}`,
-  otherDay: (from, to) => `Previsto ${from} a ${to}`,
   zone: (zone) => `Hora del sitio, ${zone}`,
 };
