@@ -126,11 +126,10 @@ function AddMember({ onAdd }: { onAdd: (person: Person) => void }) {
 
 function Topics() {
   const words = useMessages();
-  const { content, assessment } = useWorksheetForm();
+  const { assessment } = useWorksheetForm();
   const { findings } = useFieldState('briefing.topics');
-  const change = useListField<string>('briefing.topics');
+  const [covered, change] = useListField<string>('briefing.topics');
   useShowField('briefing.topics');
-  const covered = content.briefing?.topics ?? [];
   const asked = BRIEFING_TOPICS.filter(
     (topic) => topic !== 'permit' || assessment.permit.required || covered.includes(topic),
   );

@@ -98,10 +98,8 @@ function RequiredItems() {
 
 function ItemRow({ item }: { item: RequiredItem }) {
   const locale = useLocale();
-  const { content } = useWorksheetForm();
   const { findings } = useFieldState('protectiveEquipment.ready');
-  const change = useListField<string>('protectiveEquipment.ready');
-  const ready = content.protectiveEquipment?.ready ?? [];
+  const [ready, change] = useListField<string>('protectiveEquipment.ready');
   const checked = ready.includes(item.id);
   const others = findings.filter(
     ({ severity, params }) => severity !== 'open' && params.item === item.id,

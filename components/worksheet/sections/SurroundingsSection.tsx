@@ -115,7 +115,7 @@ function GroundedSurfaces() {
   const { content } = useWorksheetForm();
   const { setValue } = useFormContext();
   const surfaces = content.surroundings?.groundedSurfaces;
-  const change = useListField<object>('surroundings.groundedSurfaces');
+  const [, change] = useListField<object>('surroundings.groundedSurfaces');
   const set = (next: unknown) =>
     setValue('surroundings.groundedSurfaces', next, { shouldDirty: true });
   return (
