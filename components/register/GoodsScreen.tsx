@@ -151,7 +151,7 @@ function useRecord({ goods, sites, todayAt, today, view, mayWrite }: RecordProps
   return {
     head: {
       over: enumerations.gloveClass[item.gloveClass],
-      title: item.serial,
+      title: view.act === 'test' && mayWrite ? words.recordTestOf(item.serial) : item.serial,
       under: item.retired ? `${under}. ${words.retiredAs(because ?? '')}` : under,
     },
     body: <GoodsPanel key={item.id} item={item} today={todayAt(item)} view={view} />,

@@ -9,6 +9,10 @@ import { Table, Text } from '../ui';
 type Fault = ImportAnswer['errors'][number];
 type Row = ImportAnswer['rows'][number];
 
+/** `qualifiedThrough` as it may be written too, and as it can break: `qualified through`. */
+export const columnName = (column: string) =>
+  column.replace(/[A-Z]/g, (letter) => ` ${letter.toLowerCase()}`);
+
 /** Lines shown before the rest is only counted. */
 const MOST_SHOWN = 100;
 
@@ -34,7 +38,11 @@ function Faults({ errors }: { errors: readonly Fault[] }) {
             style={[styles.fault, { borderBottomColor: colors.hair }]}
           >
             <Text variant="strong">
-              {[words.lineNumber(line), column, value === '' ? undefined : `“${value}”`]
+              {[
+                words.lineNumber(line),
+                column && columnName(column),
+                value === '' ? undefined : `“${value}”`,
+              ]
                 .filter((part) => part !== undefined && part !== null)
                 .join(', ')}
             </Text>
@@ -56,7 +64,12 @@ function Faults({ errors }: { errors: readonly Fault[] }) {
           width: 70,
           cell: ({ line }) => <Text variant="strong">{String(line)}</Text>,
         },
-        { key: 'column', label: words.where, width: 150, cell: ({ column }) => column ?? '' },
+        {
+          key: 'column',
+          label: words.where,
+          width: 150,
+          cell: ({ column }) => columnName(column ?? ''),
+        },
         {
           key: 'value',
           label: words.stands,
@@ -111,7 +124,7 @@ function Rows({ rows, columns }: { rows: readonly Row[]; columns: readonly strin
             { key: 'line', label: words.line, width: 60, cell: ({ line }) => String(line) },
             ...used.map((column) => ({
               key: column,
-              label: column,
+              label: columnName(column),
               share: ['name', 'email', 'sites', 'site', 'laboratory'].includes(column) ? 2 : 1,
               cell: ({ cells }: Row) => cells[column] ?? '',
             })),

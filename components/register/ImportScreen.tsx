@@ -9,7 +9,7 @@ import { space } from '../theme/tokens';
 import { useBreakpoint } from '../theme/useBreakpoint';
 import { Button, describeFault, ErrorSummary, Facts, Notice, Screen, Text, TextField } from '../ui';
 import { files } from './files';
-import { ImportAnswerView } from './ImportAnswerView';
+import { columnName, ImportAnswerView } from './ImportAnswerView';
 import { useImport } from './registerMutations';
 import type { RegisterViewControl } from './useRegisterView';
 
@@ -28,7 +28,10 @@ function Columns({ subject }: { subject: ImportSubject }) {
     <View>
       <Text variant="strong">{csv.columns}</Text>
       <Facts
-        facts={COLUMNS[subject].map((column) => ({ label: column, value: csv.column[column] }))}
+        facts={COLUMNS[subject].map((column) => ({
+          label: columnName(column),
+          value: csv.column[column],
+        }))}
       />
     </View>
   );
@@ -86,6 +89,7 @@ function Lines({ subject, csv, onChange, onCheck, checking }: LinesProps) {
         }}
         error={error}
         multiline
+        lines={14}
         exact
       />
       <Button

@@ -114,7 +114,7 @@ export function RegisterFrame({
 const styles = StyleSheet.create({
   words: { flex: 1, gap: 2 },
   buttons: { flexDirection: 'row', flexWrap: 'wrap', gap: 10 },
-  list: { gap: space.md },
+  list: { gap: space.md, paddingBottom: space.lg },
   panel: { padding: space.xl, gap: space.md },
   head: { flexDirection: 'row', alignItems: 'flex-start', gap: space.xs },
   close: {

@@ -94,8 +94,8 @@ function useLabels(): (name: string) => string {
   return (name) => {
     const [, index, field] = /^panels\.(\d+)\.(\w+)/.exec(name) ?? [];
     if (index !== undefined && field !== undefined) {
-      const label = field === 'name' ? words.panelName : (labels[field] ?? field);
-      return `${words.panel(Number(index) + 1)}, ${label}`;
+      const panel = words.panel(Number(index) + 1);
+      return field === 'name' ? panel : `${panel}, ${labels[field] ?? field}`;
     }
     return labels[name.split('.').at(-1) ?? ''] ?? name;
   };

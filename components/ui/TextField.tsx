@@ -17,6 +17,8 @@ export interface TextFieldProps extends FieldProps {
   /** Printed after the value: V, ft, W. */
   unit?: string;
   multiline?: boolean;
+  /** How many lines are seen at once, where more than a few are expected. */
+  lines?: number;
   /** A password, with Show and Hide. */
   secure?: boolean;
   /** For tags, numbers and names: the keyboard corrects nothing. */
@@ -31,6 +33,9 @@ export interface TextFieldProps extends FieldProps {
   reason?: string;
   ref?: Ref<TextInput>;
 }
+
+/** Height of a line of several, px. */
+const LINE = 24;
 
 /** One line, or several, of text. */
 export function TextField({ ref, ...props }: TextFieldProps) {
@@ -74,7 +79,12 @@ export function TextField({ ref, ...props }: TextFieldProps) {
           autoCorrect={exact === true ? false : undefined}
           spellCheck={exact === true ? false : undefined}
           autoFocus={props.autoFocus}
-          style={[styles.input, multiline === true && styles.lines, { color: colors.ink }]}
+          style={[
+            styles.input,
+            multiline === true && styles.lines,
+            props.lines !== undefined && { minHeight: props.lines * LINE },
+            { color: colors.ink },
+          ]}
         />
         {unit !== undefined && (
           <Text variant="label" color="ink2" style={styles.unit}>
