@@ -168,7 +168,12 @@ export function SignaturesSection() {
             ? words.waitsForPoints(left)
             : words.signedOf(signed, lines.length)
       }
-      folded={list}
+      folded={
+        <>
+          {list}
+          <PrepareButton />
+        </>
+      }
       readOnly={list}
     >
       {list}
