@@ -5,6 +5,10 @@ import { ApiProblem, isProblem } from '../api/ApiProblem';
 import { json, request } from '../api/request';
 import type { SendOutcome } from '../drafts/useDraft';
 
+/** States in which somebody else's act is waited for, or may stop the work. */
+const OTHERS_ACT: ReadonlySet<string> = new Set(['briefing', 'countersign', 'in-force']);
+const OTHERS_ACT_MS = 15_000;
+
 export const worksheetKeys = {
   all: ['worksheets'] as const,
   detail: (worksheetId: string) => ['worksheets', 'detail', worksheetId] as const,
@@ -14,6 +18,10 @@ export function worksheetQuery(worksheetId: string) {
   return queryOptions({
     queryKey: worksheetKeys.detail(worksheetId),
     queryFn: ({ signal }) => request(worksheetSchema, `/worksheets/${worksheetId}`, { signal }),
+    // Others sign and stop on their own devices: an opened record is always asked for again.
+    refetchOnMount: 'always',
+    refetchInterval: ({ state }) =>
+      OTHERS_ACT.has(state.data?.state ?? 'draft') ? OTHERS_ACT_MS : false,
   });
 }
 
