@@ -9,7 +9,7 @@ import { SignedOutFrame } from './SignedOutFrame';
 
 /** Only a path of our own is followed after sign-in, never another site. */
 function inside(to: string | undefined): Href {
-  return to !== undefined && /^\/(?![/\\])/.test(to) ? (to) : '/';
+  return to !== undefined && /^\/(?![/\\])/.test(to) ? to : '/';
 }
 
 function faultText(error: unknown, messages: Messages): string {

@@ -103,7 +103,7 @@ export function factDifferences(
       return [{ path, section, label, after: words.otherEntry }];
     }
     return pairs.map((pair) => {
-      const { fact, group } = (pair.after ?? pair.before);
+      const { fact, group } = pair.after ?? pair.before;
       return {
         path: fact.path,
         section: group.section,

@@ -74,7 +74,11 @@ export function portIsTaken(port: number, host: string): Promise<boolean> {
 }
 
 /** Runs a program of PostgreSQL as the calling user, with its output to the terminal. */
-export function stream(program: string, args: string[], env: Record<string, string>): Promise<void> {
+export function stream(
+  program: string,
+  args: string[],
+  env: Record<string, string>,
+): Promise<void> {
   return new Promise((resolve, reject) => {
     const child = spawn(path.join(postgresFolder(), program), args, {
       stdio: 'inherit',
