@@ -99,7 +99,7 @@ interface WaitingProps {
 export function WaitingTile({ photo, onCaption, onSend, onDrop }: WaitingProps) {
   const { photos: words } = useMessages();
   const { colors } = useTheme();
-  const { sending, fault, hopeless, caption } = photo;
+  const { sending, fault, hopeless, caption, name } = photo;
   return (
     <View style={[styles.waiting, { borderColor: colors.ink }]}>
       {hopeless !== true && (
@@ -113,7 +113,7 @@ export function WaitingTile({ photo, onCaption, onSend, onDrop }: WaitingProps) 
       <View style={styles.fields}>
         {fault !== undefined && (
           <Text variant="strong" aria-live="polite">
-            {fault}
+            {name === undefined ? fault : `${name}: ${fault}`}
           </Text>
         )}
         {hopeless !== true && (

@@ -69,7 +69,9 @@ export const photoFiles: PhotoFiles = {
       input.accept = TYPES;
       if (from === 'camera') input.setAttribute('capture', 'environment');
       else input.multiple = true;
-      input.addEventListener('change', () => resolve(Array.from(input.files ?? [])));
+      input.addEventListener('change', () =>
+        resolve(Array.from(input.files ?? []).map((file) => ({ file, name: file.name }))),
+      );
       input.addEventListener('cancel', () => resolve([]));
       input.click();
     }),

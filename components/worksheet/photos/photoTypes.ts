@@ -18,7 +18,7 @@ export interface PhotoFiles {
   readonly canPick: boolean;
   /** Whether there is a camera to hold up, as on a phone. */
   hasCamera: () => boolean;
-  pick: (from: 'camera' | 'files') => Promise<Blob[]>;
+  pick: (from: 'camera' | 'files') => Promise<{ file: Blob; name: string }[]>;
   /** Sends one photo; throws an `ApiProblem`, or a `TypeError` where no answer came. */
   send: (
     worksheetId: string,

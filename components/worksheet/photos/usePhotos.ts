@@ -19,6 +19,8 @@ const MOST_BYTES = 15 * 1024 * 1024;
 
 export interface ShownPhoto extends WaitingPhoto {
   url: string;
+  /** What the file is called, to tell several apart. */
+  name?: string;
   /** Percent gone while it is being sent. */
   sending?: number;
   /** In words: why it was not taken. */
@@ -125,10 +127,10 @@ export function usePhotos({ id: worksheetId }: WorksheetRecord, section: AskedSe
   return {
     waiting,
     async choose(from: 'camera' | 'files') {
-      const chosen = (await photoFiles.pick(from)).map((file): ShownPhoto => {
+      const chosen = (await photoFiles.pick(from)).map(({ file, name }): ShownPhoto => {
         const fault = words.ofFile(file);
         const url = photoFiles.urlOf(file);
-        return { id: newId(), caption: '', file, url, fault, hopeless: fault !== undefined };
+        return { id: newId(), caption: '', file, name, url, fault, hopeless: fault !== undefined };
       });
       hold([...held.current, ...chosen]);
     },
