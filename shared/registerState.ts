@@ -34,6 +34,12 @@ export function latestTest({ tests }: Pick<RubberGoods, 'tests'>) {
   );
 }
 
+/** Until when it may be used; undefined for what may not be used whatever the date. */
+export function dueDay(item: RubberGoods): string | undefined {
+  if (item.retired || item.dueOn === '' || latestTest(item)?.passed === false) return undefined;
+  return item.dueOn;
+}
+
 /** From when the present interval runs: the issue, or the test where that came later. */
 export function intervalStart({ issuedOn, lastTestedOn }: RubberGoods): string {
   return issuedOn !== null && issuedOn > lastTestedOn ? issuedOn : lastTestedOn;

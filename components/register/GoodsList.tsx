@@ -1,6 +1,7 @@
 import { View } from 'react-native';
 import { dateText } from '@/shared/format';
 import type { RubberGoods, Site } from '@/shared/register';
+import { dueDay } from '@/shared/registerState';
 import { useLocale } from '../i18n/preferences';
 import { useMessages } from '../i18n/useMessages';
 import { useBreakpoint } from '../theme/useBreakpoint';
@@ -122,7 +123,10 @@ function useGoodsColumns({
       key: 'due',
       label: words.due,
       width: 88,
-      cell: ({ dueOn }) => (dueOn === '' ? '' : <TwoLines strong {...dateLines(dueOn)} />),
+      cell: (item) => {
+        const due = dueDay(item);
+        return due === undefined ? '' : <TwoLines strong {...dateLines(due)} />;
+      },
       ...sortable('due', sort, view),
     },
     {

@@ -2,7 +2,7 @@ import { StyleSheet, View } from 'react-native';
 import { citation } from '@/hazard';
 import { dateText } from '@/shared/format';
 import type { RubberGoods } from '@/shared/register';
-import { goodsState, latestTest } from '@/shared/registerState';
+import { dueDay, goodsState, latestTest } from '@/shared/registerState';
 import { useUser } from '../api/session';
 import { useLocale } from '../i18n/preferences';
 import { useMessages } from '../i18n/useMessages';
@@ -84,6 +84,7 @@ function Dates({ item }: { item: RubberGoods }) {
   const locale = useLocale();
   const words = register.goods;
   const day = (date: string) => dateText(locale, date);
+  const due = dueDay(item);
   return (
     <Section id="goods-dates" title={words.follows}>
       <Facts
@@ -96,7 +97,7 @@ function Dates({ item }: { item: RubberGoods }) {
             label: words.issued,
             value: item.issuedOn === null ? words.inStore : day(item.issuedOn),
           },
-          ...(item.dueOn === '' ? [] : [{ label: words.due, value: day(item.dueOn) }]),
+          ...(due === undefined ? [] : [{ label: words.due, value: day(due) }]),
         ]}
       />
       <Citation citation={[citation('osha1910.137.tableI-4'), citation('osha1910.137.tableI-5')]} />

@@ -1,6 +1,6 @@
 import { dateText } from '@/shared/format';
 import type { RubberGoods } from '@/shared/register';
-import { daysBetween, goodsState, intervalStart, latestTest } from '@/shared/registerState';
+import { daysBetween, dueDay, goodsState, intervalStart, latestTest } from '@/shared/registerState';
 import { useLocale } from '../i18n/preferences';
 import { useMessages } from '../i18n/useMessages';
 import type { MarkState } from '../ui';
@@ -53,12 +53,13 @@ export function useGoodsWords(): (item: RubberGoods, today: string) => GoodsWord
   };
 }
 
-/** The bar of an item; none where no test was passed or where it has left use. */
+/** The bar of an item; none where it may not be used whatever the date. */
 export function goodsBar(line: Timeline, item: RubberGoods, today: string): BarParts | undefined {
-  if (item.retired || item.dueOn === '') return undefined;
+  const until = dueDay(item);
+  if (until === undefined) return undefined;
   return barParts(line, {
     from: intervalStart(item),
-    until: item.dueOn,
+    until,
     today,
     waits: item.issuedOn === null,
   });

@@ -3,6 +3,7 @@ import type { RubberGoods } from '@/shared/register';
 import {
   accountState,
   daysBetween,
+  dueDay,
   goodsState,
   intervalStart,
   latestTest,
@@ -55,6 +56,14 @@ describe('how an item stands', () => {
     ];
     expect(latestTest({ tests })).toEqual(tests[2]);
     expect(latestTest({ tests: [] })).toBeUndefined();
+  });
+
+  it('names no day for what may not be used whatever the date', () => {
+    expect(dueDay(item())).toBe('2026-10-01');
+    expect(dueDay(item({ retired: true }))).toBeUndefined();
+    expect(dueDay(item({ dueOn: '' }))).toBeUndefined();
+    const failed = { testedOn: '2026-05-01', passed: false };
+    expect(dueDay(item({ tests: [...item().tests, failed] }))).toBeUndefined();
   });
 
   it('counts days over a change of the clocks', () => {
