@@ -143,6 +143,11 @@ export function WaitingTile({ photo, onCaption, onSend, onDrop }: WaitingProps) 
                 onPress={onSend}
               />
             )}
+            {hopeless !== true && (
+              <Text variant="label" weight="400" color="ink2">
+                {words.keptHere}
+              </Text>
+            )}
             <Button kind="quiet" icon="close" label={words.drop} onPress={onDrop} />
           </>
         )}
