@@ -1,66 +1,23 @@
 import { z } from 'zod';
 import { GLOVE_CLASSES, type GloveClass } from '@/hazard/enumerations';
+import {
+  byLine,
+  markRepeats,
+  reader,
+  readTable,
+  type CsvLine,
+  type CsvReading,
+  type CsvRow,
+} from './csvTable';
 import { RUBBER_GOODS_KINDS, type RubberGoodsKind } from './register';
-import { date, requiredText, text } from './text';
 import { LOCALES, ROLES, UNITS, type Locale, type Role, type Units } from './user';
 
 /**
- * People and rubber goods as rows of a spreadsheet. The text itself is cut
- * into cells by the server; what the cells mean, and every line that is not
- * right, is decided here.
+ * People and rubber goods as rows of a spreadsheet: what the cells mean, and
+ * every line that is not right.
  */
 
-/** One record of the file: the line on which it begins, from 1, and its cells. */
-export interface CsvLine {
-  line: number;
-  cells: readonly string[];
-}
-
-export interface CsvFault {
-  line: number;
-  /** The heading of the column, or null where the line as a whole is meant. */
-  column: string | null;
-  code: CsvFaultCode;
-  /** What stands there. */
-  value: string;
-}
-
-export const CSV_FAULTS = [
-  'unreadable',
-  'no-rows',
-  'too-many-rows',
-  'unknown-column',
-  'column-twice',
-  'missing-column',
-  'too-many-cells',
-  'required',
-  'too-long',
-  'unstorable',
-  'email',
-  'role',
-  'date',
-  'after-today',
-  'no-such-site',
-  'language',
-  'units',
-  'kind',
-  'class',
-  'class-zero',
-  'result',
-  'twice',
-  'taken',
-] as const;
-export type CsvFaultCode = (typeof CSV_FAULTS)[number];
-
-export interface CsvRow<T> {
-  line: number;
-  value: T;
-}
-
-export interface CsvReading<T> {
-  rows: CsvRow<T>[];
-  faults: CsvFault[];
-}
+export type { CsvFault, CsvLine, CsvReading } from './csvTable';
 
 export const PEOPLE_COLUMNS = [
   'name',
@@ -87,113 +44,6 @@ type RubberGoodsColumn = (typeof RUBBER_GOODS_COLUMNS)[number];
 
 /** Columns that an export adds; an import passes them over, so that an exported file can be read again. */
 export const EXPORT_ONLY_COLUMNS = ['account', 'dueOn', 'inTest', 'retired', 'retiredBecause'];
-
-export const MOST_CSV_ROWS = 1000;
-
-/** A heading and a value count whatever their case, spaces and dashes. */
-const plain = (value: string) => value.toLowerCase().replace(/[\s_-]+/g, '');
-
-/** An export writes `'` before a cell that a spreadsheet would take for a formula; it is no part of the value. */
-const withoutGuard = (cell: string) => (/^'[=+\-@\t\r]/.test(cell) ? cell.slice(1) : cell);
-
-interface Columns<C extends string> {
-  all: readonly C[];
-  needed: readonly C[];
-}
-
-interface Cells<C extends string> {
-  line: number;
-  cell: (column: C) => string;
-}
-
-/** The heading line as positions; every fault of it is named. */
-function readHeading<C extends string>(
-  heading: CsvLine | undefined,
-  { all, needed }: Columns<C>,
-): { positions: Map<C, number>; faults: CsvFault[] } {
-  const positions = new Map<C, number>();
-  const faults: CsvFault[] = [];
-  const line = heading?.line ?? 1;
-  const passedOver = new Set(EXPORT_ONLY_COLUMNS.map(plain));
-  heading?.cells.forEach((cell, position) => {
-    const column = all.find((each) => plain(each) === plain(cell));
-    if (column === undefined) {
-      if (cell.trim() === '' || passedOver.has(plain(cell))) return;
-      faults.push({ line, column: null, code: 'unknown-column', value: cell });
-    } else if (positions.has(column)) {
-      faults.push({ line, column, code: 'column-twice', value: cell });
-    } else positions.set(column, position);
-  });
-  for (const column of needed) {
-    if (!positions.has(column)) faults.push({ line, column, code: 'missing-column', value: '' });
-  }
-  return { positions, faults };
-}
-
-/** The lines under the heading, each with its cells by column. */
-function readTable<C extends string>(
-  lines: readonly CsvLine[],
-  columns: Columns<C>,
-): { table: Cells<C>[]; faults: CsvFault[] } {
-  const [heading, ...body] = lines;
-  const { positions, faults } = readHeading(heading, columns);
-  // Without its columns no cell means anything: naming a thousand lines would hide the one that is wrong.
-  if (faults.length > 0) return { table: [], faults };
-  const filled = body.filter(({ cells }) => cells.some((cell) => cell.trim() !== ''));
-  if (filled.length === 0) {
-    const line = heading?.line ?? 1;
-    return { table: [], faults: [{ line, column: null, code: 'no-rows', value: '' }] };
-  }
-  if (filled.length > MOST_CSV_ROWS) {
-    const line = filled[MOST_CSV_ROWS]?.line ?? 1;
-    const value = String(filled.length);
-    return { table: [], faults: [{ line, column: null, code: 'too-many-rows', value }] };
-  }
-  const width = heading?.cells.length ?? 0;
-  const table = filled.map(({ line, cells }) => {
-    const extra = cells.slice(width).find((cell) => cell.trim() !== '');
-    if (extra !== undefined) {
-      faults.push({ line, column: null, code: 'too-many-cells', value: extra });
-    }
-    const cell = (column: C) => withoutGuard((cells[positions.get(column) ?? -1] ?? '').trim());
-    return { line, cell };
-  });
-  return { table, faults };
-}
-
-/** Reads the cells of one line and gathers what is wrong with them. */
-function reader<C extends string>({ line, cell }: Cells<C>, faults: CsvFault[]) {
-  const fault = (column: C, code: CsvFaultCode) => {
-    faults.push({ line, column, code, value: cell(column) });
-    return undefined;
-  };
-  return {
-    fault,
-    /** Text of the register; undefined after a fault. */
-    text(column: C, needed = false): string | undefined {
-      const value = cell(column);
-      if (needed && value === '') return fault(column, 'required');
-      const parsed = (needed ? requiredText() : text()).safeParse(value);
-      if (parsed.success) return parsed.data;
-      const tooLong = parsed.error.issues.some((issue) => issue.code === 'too_big');
-      return fault(column, tooLong ? 'too-long' : 'unstorable');
-    },
-    /** One of a closed list; undefined after a fault or where nothing stands. */
-    oneOf<T extends string>(column: C, values: readonly T[], code: CsvFaultCode): T | undefined {
-      const value = cell(column);
-      if (value === '') return undefined;
-      return values.find((each) => plain(each) === plain(value)) ?? fault(column, code);
-    },
-    date(column: C): string | undefined {
-      const value = cell(column);
-      if (value === '') return undefined;
-      return date.safeParse(value).success ? value : fault(column, 'date');
-    },
-    need<T>(column: C, value: T | undefined): T | undefined {
-      return value === undefined && cell(column) === '' ? fault(column, 'required') : value;
-    },
-  };
-}
 
 export interface CsvSite {
   id: string;
@@ -232,22 +82,6 @@ const siteNames = (cell: string) =>
     .map((name) => name.trim())
     .filter((name) => name !== '');
 
-/** Marks the second and every later line that says the same as one before. */
-function markRepeats<C extends string>(
-  keys: readonly { line: number; column: C; key: string; value: string }[],
-  taken: ReadonlySet<string>,
-): CsvFault[] {
-  const seen = new Set<string>();
-  return keys.flatMap(({ line, column, key, value }): CsvFault[] => {
-    if (taken.has(key)) return [{ line, column, code: 'taken', value }];
-    if (seen.has(key)) return [{ line, column, code: 'twice', value }];
-    seen.add(key);
-    return [];
-  });
-}
-
-const byLine = (one: CsvFault, other: CsvFault) => one.line - other.line;
-
 /** People from the lines of a file: every line that is right, and every fault of the others. */
 export function readPeople(
   lines: readonly CsvLine[],
@@ -256,6 +90,7 @@ export function readPeople(
   const { table, faults } = readTable<PeopleColumn>(lines, {
     all: PEOPLE_COLUMNS,
     needed: ['name', 'email', 'role', 'sites'],
+    passedOver: EXPORT_ONLY_COLUMNS,
   });
   const rows = table.flatMap((cells): CsvRow<CsvPerson>[] => {
     const before = faults.length;
@@ -323,6 +158,7 @@ export function readRubberGoods(
   const { table, faults } = readTable<RubberGoodsColumn>(lines, {
     all: RUBBER_GOODS_COLUMNS,
     needed: ['site', 'kind', 'class', 'serial', 'testedOn', 'result'],
+    passedOver: EXPORT_ONLY_COLUMNS,
   });
   const rows = table.flatMap((cells): CsvRow<CsvRubberGoods>[] => {
     const before = faults.length;

@@ -32,6 +32,7 @@ import {
   siteSchema,
   siteUpdateSchema,
 } from '@/shared/register';
+import { importAnswerSchema, importSchema } from '@/shared/registerCsv';
 import {
   changePasswordSchema,
   changePinSchema,
@@ -340,6 +341,23 @@ const others: ApiRoute[] = [
   },
 ];
 
+/** People and rubber goods as a spreadsheet, in and out. */
+const csvRoutes = (path: string, subject: string): ApiRoute[] => [
+  {
+    method: 'post',
+    path: `${path}/import`,
+    summary: `Check the lines of a CSV of ${subject}; with confirm, add all of them or none`,
+    body: importSchema,
+    answer: importAnswerSchema,
+  },
+  {
+    method: 'get',
+    path: `${path}/export.csv`,
+    summary: `All ${subject} as CSV`,
+    answer: 'text/csv',
+  },
+];
+
 /** Every route, for the OpenAPI document and for the test that compares it with what answers. */
 export const API_ROUTES: readonly ApiRoute[] = [
   ...session,
@@ -359,5 +377,7 @@ export const API_ROUTES: readonly ApiRoute[] = [
     input: rubberGoodsInputSchema,
     update: rubberGoodsUpdateSchema,
   }),
+  ...csvRoutes('/users', 'people'),
+  ...csvRoutes('/rubber-goods', 'rubber goods'),
   ...others,
 ];
