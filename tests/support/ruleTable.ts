@@ -51,8 +51,8 @@ interface Whole {
   closeOut: CloseOut | undefined;
 }
 
-/** The base with the edits made; what is required is at hand unless an edit says what is. */
-export function edited(base: Base, edits: Edits = {}): Whole {
+/** The base with the edits made. */
+export function withEdits(base: Base, edits: Edits = {}): Whole {
   const [path = 'O', late] = base.split(' ') as ['O' | 'T' | 'W', ('work' | 'close')?];
   const sound = BUILDERS[path]();
   const stage: Stage = late ? STAGES[late] : 'plan';
@@ -64,7 +64,12 @@ export function edited(base: Base, edits: Edits = {}): Whole {
   };
   for (const [pointer, value] of Object.entries(edits)) root = withPath(root, pointer, value);
   const { on, proof, closeOut, ...content } = root;
-  const whole = { content, on, stage, proof, closeOut } as Whole;
+  return { content, on, stage, proof, closeOut } as Whole;
+}
+
+/** The base with the edits made; what is required is at hand unless an edit says what is. */
+export function edited(base: Base, edits: Edits = {}): Whole {
+  const whole = withEdits(base, edits);
   const saysWhatIsAtHand = Object.keys(edits).some((pointer) =>
     /^protectiveEquipment(\/ready.*)?$/.test(pointer),
   );
@@ -86,11 +91,13 @@ export function assessed({ content, ...options }: Whole): Assessment {
   expect(result.verdict).toBe(
     severities.includes('stop') ? 'stop' : severities.includes('open') ? 'open' : 'ready',
   );
-  for (const { code, path, citation } of result.findings) {
-    expect(path, code).toMatch(/^\/[a-zA-Z]/);
-    expect(CONFIDENCES, code).toContain(citation?.confidence);
-    expect(citation.standard, code).not.toBe('');
-  }
+  const unsourced = result.findings.filter(
+    ({ path, citation }) =>
+      !/^\/[a-zA-Z]/.test(path) ||
+      !CONFIDENCES.includes(citation?.confidence) ||
+      citation.standard === '',
+  );
+  expect(unsourced).toHaveLength(0);
   return result;
 }
 

@@ -128,7 +128,25 @@ const content: WorksheetContent = {
       airTested: true,
       leatherProtectors: true,
     },
-    ready: [],
+    ready: [
+      'rubber-insulating-gloves',
+      'leather-protectors',
+      'insulated-probes',
+      'safety-glasses',
+      'nonconductive-hard-hat',
+      'nonmelting-clothing',
+      'arc-rated-shirt-and-trousers',
+      'hearing-protection',
+      'leather-footwear',
+      'arc-rated-face-shield-or-hood',
+      'contact-tester',
+      'known-source',
+      'clamp-ammeter',
+      'lock-and-tag',
+      'written-lockout-procedure',
+      'nonconductive-ladder',
+      'work-light',
+    ],
   },
   surroundings: {
     groundedSurfaces: [
@@ -225,22 +243,31 @@ const closeOut: CloseOut = {
 };
 
 /**
- * A copy of `root` with the value at a JSON Pointer replaced. `undefined`
+ * `root` with the value at a JSON Pointer replaced. `undefined`
  * takes the key (or the list's member) out; missing parents are made.
  */
 export function withPath<T>(root: T, pointer: string, value: unknown): T {
-  const copy = structuredClone(root);
-  const keys = pointer.split('/').filter((key) => key !== '');
-  const last = keys.pop();
-  if (last === undefined) return value as T;
-  let parent = copy as Record<string, unknown>;
-  for (const key of keys) {
-    if (typeof parent[key] !== 'object' || parent[key] === null) parent[key] = {};
-    parent = parent[key] as Record<string, unknown>;
-  }
-  if (value !== undefined) parent[last] = value;
-  else if (Array.isArray(parent)) parent.splice(Number(last), 1);
-  else delete parent[last];
+  return replaced(
+    root,
+    pointer.split('/').filter((key) => key !== ''),
+    value,
+  ) as T;
+}
+
+/** Copies along the way only: the rest is shared, and nothing here changes what it is given. */
+function replaced(node: unknown, keys: string[], value: unknown): unknown {
+  const [key, ...rest] = keys;
+  if (key === undefined) return value;
+  const copy: unknown = Array.isArray(node)
+    ? [...(node as unknown[])]
+    : typeof node === 'object' && node !== null
+      ? { ...node }
+      : {};
+  const parent = copy as Record<string, unknown>;
+  if (rest.length > 0) parent[key] = replaced(parent[key], rest, value);
+  else if (value !== undefined) parent[key] = value;
+  else if (Array.isArray(copy)) copy.splice(Number(key), 1);
+  else delete parent[key];
   return copy;
 }
 
@@ -253,16 +280,32 @@ export function withEverythingAtHand(
   return withPath(given, '/protectiveEquipment/ready', ready);
 }
 
+/** What is at hand is typed out, not asked of `assess`: a sound worksheet is made before any test runs. */
 function built(edits: Record<string, unknown>): SoundWorksheet {
-  let edited = withPath(content, '/briefing/topics', [...BRIEFING_TOPICS]);
+  let edited = withPath(structuredClone(content), '/briefing/topics', [...BRIEFING_TOPICS]);
   for (const [pointer, value] of Object.entries(edits)) edited = withPath(edited, pointer, value);
   return {
     on,
-    content: withEverythingAtHand(edited, { on }),
+    content: edited,
     proof: structuredClone(proof),
     closeOut: structuredClone(closeOut),
   };
 }
+
+/** What both energized paths ask for at the sound worksheet's circuit. */
+const AT_HAND_LIVE = [
+  'rubber-insulating-gloves',
+  'leather-protectors',
+  'insulated-tools',
+  'safety-glasses',
+  'nonconductive-hard-hat',
+  'nonmelting-clothing',
+  'arc-rated-shirt-and-trousers',
+  'hearing-protection',
+  'leather-footwear',
+  'arc-rated-face-shield-or-hood',
+  'nonconductive-ladder',
+];
 
 /** Two pendants replaced with the circuit off: `ready` at every stage. */
 export function soundWorksheet(): SoundWorksheet {
@@ -281,6 +324,7 @@ export function soundTestingWorksheet(): SoundWorksheet {
     },
     '/arcFlash/task': 'voltage test',
     '/crew/1/rescueTrained': true,
+    '/protectiveEquipment/ready': [...AT_HAND_LIVE, 'contact-tester', 'known-source'],
   });
 }
 
@@ -304,5 +348,6 @@ export function soundEnergizedWorksheet(): SoundWorksheet {
     '/arcFlash/task': 'energized work',
     '/surroundings/groundedSurfaces/0/covered': true,
     '/crew/1/rescueTrained': true,
+    '/protectiveEquipment/ready': [...AT_HAND_LIVE, 'insulating-covers'],
   });
 }

@@ -2,7 +2,8 @@ import { describe, expect, it } from 'vitest';
 import { assess } from '@/hazard';
 import { BELOW_FIFTY } from '../../support/ruleEdits';
 import type { Base, Edits } from '../../support/ruleTable';
-import { assessBase, assessed, edited, gone, unsettled } from '../../support/ruleTable';
+import { assessBase, assessed, edited, gone, unsettled, withEdits } from '../../support/ruleTable';
+import { sampled } from '../../support/propertyRuns';
 import { withPath } from '../../support/soundWorksheet';
 
 const ON = '2026-12-01T09:00:00-06:00';
@@ -349,12 +350,15 @@ function leaves(value: unknown, pointer = ''): [string, string][] {
 }
 
 const EVERY_BASE: Base[] = ['O', 'T', 'W', 'O work', 'O close'];
-const LEAVES: Leaf[] = EVERY_BASE.flatMap((base) => {
-  const { content, proof, closeOut } = edited(base);
+const EVERY_LEAF: Leaf[] = EVERY_BASE.flatMap((base) => {
+  const { content, proof, closeOut } = withEdits(base);
   return leaves({ ...content, proof, closeOut })
     .filter(([pointer]) => pointer !== '/proof' || base.includes('work'))
     .map(([pointer, kind]): Leaf => [base, pointer, kind]);
 });
+
+/** All of them; where every program of thousands is asked, a part. */
+const LEAVES = sampled(EVERY_LEAF);
 
 /** Values that are no answer, by the type of the answer that they replace. */
 const NO_ANSWER: Record<string, unknown[]> = {

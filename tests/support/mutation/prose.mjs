@@ -12,19 +12,20 @@ const PROSE_PROPERTIES = new Set([
 ]);
 const PROSE_CALLS = new Set(['RangeError', 'Error', 'refuse', 'citation', 'clause']);
 
-function isProse(path) {
-  if (path.isObjectProperty()) return PROSE_PROPERTIES.has(path.node.key.name);
-  if (path.isCallExpression() || path.isNewExpression()) {
-    return PROSE_CALLS.has(path.node.callee.name);
+function isProse(node) {
+  if (node.isObjectProperty()) return PROSE_PROPERTIES.has(node.node.key.name);
+  if (node.isCallExpression() || node.isNewExpression()) {
+    return PROSE_CALLS.has(node.node.callee.name);
   }
   return false;
 }
 
 export const strykerPlugins = [
   declareValuePlugin(PluginKind.Ignore, 'prose', {
-    shouldIgnore(path) {
-      const isText = path.isStringLiteral() || path.isTemplateLiteral();
-      return isText && path.findParent(isProse) !== null
+    shouldIgnore(node) {
+      const isText = node.isStringLiteral() || node.isTemplateLiteral();
+      const isNamed = isText || node.isArrayExpression();
+      return isNamed && node.findParent(isProse) !== null
         ? 'Prose or the name of a clause.'
         : undefined;
     },
