@@ -23,6 +23,7 @@ import {
 import { findingsOf, usePinFault } from '../signing/SigningProblem';
 import { hintOf, labelOf } from '../worksheet/form/fieldWords';
 import { FindingPanels } from '../worksheet/parts/FindingPanels';
+import { FoldedPoints } from '../worksheet/parts/PointsList';
 import { SectionPhotos } from '../worksheet/parts/SectionPhotos';
 import { useNow } from '../worksheet/useAssessment';
 import { useWorksheetAct } from '../worksheet/worksheetQueries';
@@ -176,6 +177,7 @@ function Close({ record, kept, left }: Props & { left: readonly Finding[] }) {
     <Section id="close-record" title={said.record} state={left.length > 0 ? 'waits' : 'open'}>
       <View style={styles.questions}>
         <Text color="ink2">{said.recordNote}</Text>
+        <FoldedPoints findings={left} />
         <PinField
           id="close-pin"
           value={pin}

@@ -6,6 +6,7 @@ import { space } from '../theme/tokens';
 import { Button, Notice, PinField, StateMark, Text, describeFault } from '../ui';
 import { usePinFault } from '../signing/SigningProblem';
 import { FindingPanels } from '../worksheet/parts/FindingPanels';
+import { FoldedPoints } from '../worksheet/parts/PointsList';
 import { MOST_READINGS, hasUnreadable, pointNames } from './proofForm';
 import type { ProofState } from './useProof';
 import { useRecordProof } from './useRecordProof';
@@ -59,6 +60,7 @@ export function Record({ state, onRecorded }: Props) {
           <FindingPanels findings={others} />
         </>
       )}
+      <FoldedPoints findings={left} />
       {left.length === 0 && <StateMark state="ready" word={said.ready} />}
       <PinField
         id="proof-pin"

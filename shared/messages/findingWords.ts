@@ -204,15 +204,17 @@ function sentenceOf(entry: Entry, words: Messages, finding: Said): string {
   );
 }
 
+export interface FindingWords {
+  title: string;
+  /** What is so and what to do, in one or two sentences. */
+  text: string;
+}
+
 /**
  * A finding in words: a title for lists, and a sentence that says what is so and
  * then what to do. Params that the finding does not carry leave no hole.
  */
-export function findingWords(
-  locale: Locale,
-  finding: Said,
-  units: Units = 'feet',
-): { title: string; text: string } {
+export function findingWords(locale: Locale, finding: Said, units: Units = 'feet'): FindingWords {
   const words = messages(locale);
   const { unanswered, ...rules }: Readonly<Record<string, Entry>> = words.findings;
   const entry = finding.code.endsWith('.unanswered') ? unanswered : rules[finding.code];

@@ -5,9 +5,11 @@ import { useUser } from '../../api/session';
 import { useLocale } from '../../i18n/preferences';
 import { useMessages } from '../../i18n/useMessages';
 import { space } from '../../theme/tokens';
+import { useBreakpoint } from '../../theme/useBreakpoint';
 import { useTheme } from '../../theme/useTheme';
 import { Button, StateMark, Text, type ButtonProps } from '../../ui';
 import { useWorksheetForm } from '../form/WorksheetFormContext';
+import { FoldedOpenPoints } from '../parts/OpenPoints';
 import { SectionFrame } from '../parts/SectionFrame';
 
 interface Line {
@@ -125,7 +127,7 @@ function PrepareButton() {
     faults.length > 0
       ? words.fieldsToMend(faults.length)
       : left > 0
-        ? words.waitsForPoints(left)
+        ? words.pointsLeft(left)
         : undefined;
   return (
     <Button
@@ -145,11 +147,14 @@ function PrepareButton() {
 /** 11. Lead, each of the crew, supervisor. */
 export function SignaturesSection() {
   const words = useMessages().worksheet;
-  const { assessment } = useWorksheetForm();
+  const { assessment, editable } = useWorksheetForm();
+  const { isWide } = useBreakpoint();
   const lines = useLines();
   const signed = lines.filter(({ signature }) => signature !== undefined).length;
   const left = assessment.findings.filter(({ severity }) => severity !== 'caution').length;
   const all = signed === lines.length;
+  // A wide screen has them beside the form.
+  const points = editable && !isWide && <FoldedOpenPoints />;
   const list = (
     <View role="list">
       {lines.map((line) => (
@@ -171,12 +176,14 @@ export function SignaturesSection() {
       folded={
         <>
           {list}
+          {points}
           <PrepareButton />
         </>
       }
       readOnly={list}
     >
       {list}
+      {points}
       <PrepareButton />
     </SectionFrame>
   );

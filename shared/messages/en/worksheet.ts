@@ -6,6 +6,8 @@ export const worksheet = {
   state: 'State',
   sections: 'Sections',
   openPoints: 'Open points',
+  showPoints: (n: number) => `Show all ${n} points with their sources`,
+  hidePoints: 'Hide the points',
   saved: 'Saved',
   asLastRead: 'As last read, no answer',
   restored: 'What was typed here before had not been sent. It is shown again and is being sent.',
@@ -157,6 +159,7 @@ export const worksheet = {
   enteredBy: (name: string) => `on the device of ${name}`,
   signedOf: (signed: number, all: number) => `${signed} of ${all} signed`,
   waitsForPoints: (count: number) => (count === 1 ? 'for 1 point' : `for ${count} points`),
+  pointsLeft: (count: number) => (count === 1 ? '1 point is left' : `${count} points are left`),
   fieldsToMend: (count: number) =>
     count === 1 ? '1 field is not readable' : `${count} fields are not readable`,
   signPlan: 'Sign the plan',

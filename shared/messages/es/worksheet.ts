@@ -6,6 +6,8 @@ export const worksheet = {
   state: 'Estado',
   sections: 'Secciones',
   openPoints: 'Puntos abiertos',
+  showPoints: (n: number) => `Ver los ${n} puntos con su fuente`,
+  hidePoints: 'Ocultar los puntos',
   saved: 'Guardado',
   asLastRead: 'Última lectura, sin respuesta',
   restored: 'Lo que se escribió aquí no se había enviado. Se muestra de nuevo y se está enviando.',
@@ -160,6 +162,7 @@ export const worksheet = {
   enteredBy: (name: string) => `en el aparato de ${name}`,
   signedOf: (signed: number, all: number) => `${signed} de ${all} firmas`,
   waitsForPoints: (count: number) => (count === 1 ? 'por 1 punto' : `por ${count} puntos`),
+  pointsLeft: (count: number) => (count === 1 ? 'queda 1 punto' : `quedan ${count} puntos`),
   fieldsToMend: (count: number) =>
     count === 1 ? '1 campo no se puede leer' : `${count} campos no se pueden leer`,
   signPlan: 'Firmar el plan',
