@@ -1,5 +1,6 @@
 import { readdirSync } from 'node:fs';
 import path from 'node:path';
+import { setTimeout as wait } from 'node:timers/promises';
 import { QueryTypes, Sequelize } from 'sequelize';
 import { Umzug } from 'umzug';
 import type { MigrationParams, UmzugStorage } from 'umzug';
@@ -20,6 +21,8 @@ interface MigrationModule {
 const FOLDER = path.join(import.meta.dirname, 'migrations');
 /** Any number will do, as long as every release uses the same. */
 const ADVISORY_LOCK = 7_071_301;
+const TURN_MILLISECONDS = 250;
+const TURN_TRIES = 480;
 
 /** Names of what ran, in a table made by plain SQL. */
 const storage: UmzugStorage<MigrationContext> = {
@@ -60,6 +63,23 @@ function migrationFiles() {
     });
 }
 
+/**
+ * Waits until no other process migrates. It asks again and again: a statement
+ * that waits for the lock would hold a snapshot, and an index that another
+ * process makes CONCURRENTLY waits for every snapshot to end.
+ */
+async function takeTurn(sequelize: Sequelize): Promise<void> {
+  for (let tries = 0; tries < TURN_TRIES; tries += 1) {
+    const [answer] = await sequelize.query<{ mine: boolean }>(
+      `SELECT pg_try_advisory_lock(${ADVISORY_LOCK}) AS mine`,
+      { type: QueryTypes.SELECT },
+    );
+    if (answer?.mine === true) return;
+    await wait(TURN_MILLISECONDS);
+  }
+  throw new Error('Another process has been migrating this database for two minutes.');
+}
+
 interface MigrateOptions {
   ownerUrl: string;
   runtimeUrl: string;
@@ -77,7 +97,7 @@ async function withMigrations<T>(
     pool: { max: 1, min: 1, idle: 3_600_000 },
   });
   try {
-    await sequelize.query(`SET lock_timeout = '120s'; SELECT pg_advisory_lock(${ADVISORY_LOCK})`);
+    await takeTurn(sequelize);
     await sequelize.query(`SET lock_timeout = '5s'`);
     const role = decodeURIComponent(new URL(runtimeUrl).username).replaceAll('"', '""');
     const context = { sequelize, runtimeRole: `"${role}"`, ownerUrl };
@@ -92,6 +112,13 @@ async function withMigrations<T>(
 /** Brings the schema up to date; answers the names of what ran. */
 export function migrateUp(options: MigrateOptions): Promise<string[]> {
   return withMigrations(options, async (umzug) => (await umzug.up()).map(({ name }) => name));
+}
+
+/** Takes back this migration and every later one. Only for a database of a test. */
+export function migrateDownTo(options: MigrateOptions, name: string): Promise<string[]> {
+  return withMigrations(options, async (umzug) =>
+    (await umzug.down({ to: name })).map((migration) => migration.name),
+  );
 }
 
 /** Takes every migration back. Only for an empty database of a test. */

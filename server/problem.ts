@@ -140,9 +140,9 @@ function constraintOf(error: object): string {
   return typeof cause.constraint === 'string' ? cause.constraint : '';
 }
 
-/** The primary key decides whose id it is; the other unique columns are named to the client. */
+/** The key decides whose id it is; the other unique columns are named to the client. */
 function uniqueProblem(constraint: string): Problem {
-  if (constraint.endsWith('_pkey')) return idTaken();
+  if (constraint.endsWith('_pkey') || constraint === 'rubber_goods_tests_id_key') return idTaken();
   if (constraint === 'users_email_key') {
     const message = 'Another account has this e-mail address.';
     return conflict(message, [{ pointer: '#/email', code: 'taken', message }]);

@@ -103,6 +103,8 @@ export const attachmentInputSchema = z.strictObject({
   section: z.enum(ATTACHMENT_SECTIONS),
   caption: text().default(''),
 });
+/** What of a photo may change until somebody signs. */
+export const attachmentUpdateSchema = z.strictObject({ caption: text() });
 export const assessSchema = z.strictObject({
   content: worksheetContentSchema,
   stage: z.enum(['plan', 'work', 'close-out']).optional(),

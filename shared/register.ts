@@ -80,6 +80,8 @@ const rubberGoodsTest = z.strictObject({
   passed: z.boolean(),
   laboratory: text().optional(),
 });
+/** One more test of an item. One that failed retires the item. */
+export const rubberGoodsTestInputSchema = rubberGoodsTest.extend({ id: id.optional() });
 
 export const rubberGoodsInputSchema = z.strictObject({
   id: id.optional(),

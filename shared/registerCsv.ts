@@ -138,7 +138,8 @@ export interface CsvRubberGoods {
 }
 
 /** By what two items are the same one: the site and the serial number, whatever its case. */
-export const serialKey = (siteId: string, serial: string) => `${siteId} ${serial.toLowerCase()}`;
+export const serialKey = (siteId: string, serial: string) =>
+  `${siteId} ${serial.trim().toLowerCase()}`;
 
 /** How an export writes a class: a spreadsheet cuts a bare `00` to `0`, which is another class. */
 export const classCell = (gloveClass: GloveClass) => `class ${gloveClass}`;

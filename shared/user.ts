@@ -97,6 +97,9 @@ export const updateUserSchema = createUserSchema
   .partial()
   .extend({ retired: z.boolean().optional() });
 
+/** There is nothing to say: the invitation goes to the address of the register. */
+export const inviteAgainSchema = z.strictObject({});
+
 export const ownSessionSchema = z.object({
   id: z.string(),
   current: z.boolean(),

@@ -27,6 +27,7 @@ function sentenceOf(event: WorksheetEvent, said: Said, who: string): string {
     case 'proof-recorded':
     case 'closed':
     case 'photo-added':
+    case 'photo-captioned':
     case 'photo-removed':
       return said[type](who);
     default:

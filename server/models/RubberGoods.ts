@@ -13,6 +13,8 @@ export class RubberGoods extends Model<
   declare kind: RubberGoodsKind;
   declare gloveClass: GloveClass;
   declare serial: string;
+  /** A double from before serials were unique, until the office corrects it. */
+  declare serialRepeats: CreationOptional<boolean>;
   declare size: CreationOptional<string>;
   declare issuedOn: CreationOptional<string | null>;
   declare retiredAt: CreationOptional<Date | null>;
@@ -28,6 +30,7 @@ RubberGoods.init(
     kind: { type: DataTypes.TEXT, allowNull: false },
     gloveClass: { type: DataTypes.TEXT, allowNull: false },
     serial: { type: DataTypes.TEXT, allowNull: false },
+    serialRepeats: { type: DataTypes.BOOLEAN, allowNull: false, defaultValue: false },
     size: { type: DataTypes.TEXT, allowNull: false, defaultValue: '' },
     issuedOn: DataTypes.DATEONLY,
     retiredAt: DataTypes.DATE,

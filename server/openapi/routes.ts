@@ -4,6 +4,7 @@ import {
   answerSchema,
   assessSchema,
   attachmentSchema,
+  attachmentUpdateSchema,
   closeSchema,
   copySchema,
   createWorksheetSchema,
@@ -27,6 +28,7 @@ import {
 import {
   rubberGoodsInputSchema,
   rubberGoodsSchema,
+  rubberGoodsTestInputSchema,
   rubberGoodsUpdateSchema,
   siteInputSchema,
   siteSchema,
@@ -37,6 +39,7 @@ import {
   changePasswordSchema,
   changePinSchema,
   createUserSchema,
+  inviteAgainSchema,
   ownSessionSchema,
   personSchema,
   requestResetSchema,
@@ -292,6 +295,13 @@ const worksheets: ApiRoute[] = [
     summary: 'A photo, small',
     answer: 'image/jpeg',
   },
+  {
+    method: 'patch',
+    path: '/attachments/{attachmentId}',
+    summary: 'Change the caption of a photo that nobody has signed',
+    body: attachmentUpdateSchema,
+    answer: attachmentSchema,
+  },
   { method: 'delete', path: '/attachments/{attachmentId}', summary: 'Take a photo off a draft' },
   {
     method: 'get',
@@ -306,6 +316,24 @@ const worksheets: ApiRoute[] = [
     summary: 'The printed records of the list',
     query: worksheetFiltersSchema,
     answer: 'application/zip',
+  },
+];
+
+const registerActs: ApiRoute[] = [
+  {
+    method: 'post',
+    path: '/users/{id}/invitation',
+    summary: 'Mail the invitation again to somebody who has not chosen a password',
+    body: inviteAgainSchema,
+    answer: personSchema,
+  },
+  {
+    method: 'post',
+    path: '/rubber-goods/{id}/tests',
+    summary: 'Record one more test; one that failed retires the item',
+    body: rubberGoodsTestInputSchema,
+    answer: rubberGoodsSchema,
+    status: 201,
   },
 ];
 
@@ -377,6 +405,7 @@ export const API_ROUTES: readonly ApiRoute[] = [
     input: rubberGoodsInputSchema,
     update: rubberGoodsUpdateSchema,
   }),
+  ...registerActs,
   ...csvRoutes('/users', 'people'),
   ...csvRoutes('/rubber-goods', 'rubber goods'),
   ...others,

@@ -1,14 +1,17 @@
 import { Router } from 'express';
 import type { Request, Response } from 'express';
+import { attachmentUpdateSchema } from '@/shared/record';
 import { currentUser } from '../currentUser';
 import type { CurrentUser } from '../currentUser';
 import { requireUser } from '../middleware/requireUser';
 import { AttachmentRow } from '../models/AttachmentRow';
-import { parseId } from '../parse';
+import { parse, parseId } from '../parse';
 import { isLead } from '../policies/worksheet';
+import { presentAttachment } from '../presenters/worksheet';
 import { notAllowed, notFound } from '../problem';
 import { photoKey, thumbnailKey } from '../services/addAttachment';
 import { findWorksheet } from '../services/findWorksheet';
+import { recaptionAttachment } from '../services/recaptionAttachment';
 import { removeAttachment } from '../services/removeAttachment';
 import { getObject } from '../storage';
 
@@ -44,6 +47,14 @@ attachmentsRouter.get('/:attachmentId/thumbnail', async (req, res) => {
   // The bytes behind an id never change.
   res.setHeader('Cache-Control', 'private, max-age=86400');
   await sendBytes(res, photo, thumbnailKey(photo.id));
+});
+
+attachmentsRouter.patch('/:attachmentId', async (req, res) => {
+  const actor = currentUser(req);
+  const { photo, worksheet } = await photoFor(actor, req);
+  if (!isLead(actor, worksheet)) throw notAllowed();
+  const { caption } = parse(attachmentUpdateSchema, req.body);
+  res.json(presentAttachment(await recaptionAttachment(actor, photo, caption)));
 });
 
 attachmentsRouter.delete('/:attachmentId', async (req, res) => {

@@ -1,11 +1,16 @@
 import { Router } from 'express';
-import { rubberGoodsInputSchema, rubberGoodsUpdateSchema } from '@/shared/register';
+import {
+  rubberGoodsInputSchema,
+  rubberGoodsTestInputSchema,
+  rubberGoodsUpdateSchema,
+} from '@/shared/register';
 import { pageSchema } from '../keyset';
 import { currentUser, requireRole, requireUser } from '../middleware/requireUser';
 import type { RubberGoods } from '../models/RubberGoods';
 import { parse, parseId } from '../parse';
 import { presentRubberGoods } from '../presenters/rubberGoods';
 import { notAllowed } from '../problem';
+import { addRubberGoodsTest } from '../services/addRubberGoodsTest';
 import { findRubberGoods, listRubberGoods, partsOf } from '../services/listRubberGoods';
 import { createRubberGoods, updateRubberGoods } from '../services/saveRubberGoods';
 
@@ -35,6 +40,15 @@ rubberGoodsRouter.patch('/:goodsId', async (req, res) => {
   if (actor.role !== 'safety') throw notAllowed();
   const changes = parse(rubberGoodsUpdateSchema, req.body);
   res.json(await inFull(await updateRubberGoods(actor, id, changes)));
+});
+
+rubberGoodsRouter.post('/:goodsId/tests', async (req, res) => {
+  const actor = currentUser(req);
+  const { id } = await findRubberGoods(actor, parseId(req.params.goodsId));
+  if (actor.role !== 'safety') throw notAllowed();
+  const test = parse(rubberGoodsTestInputSchema, req.body);
+  const { goods, created } = await addRubberGoodsTest(actor, id, test);
+  res.status(created ? 201 : 200).json(await inFull(goods));
 });
 
 async function inFull(goods: RubberGoods) {

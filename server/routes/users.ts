@@ -1,11 +1,12 @@
 import { Router } from 'express';
-import { createUserSchema, updateUserSchema } from '@/shared/user';
+import { createUserSchema, inviteAgainSchema, updateUserSchema } from '@/shared/user';
 import { currentUser, requireRole, requireUser } from '../middleware/requireUser';
 import { pageSchema } from '../keyset';
 import type { User } from '../models/User';
 import { parse, parseId } from '../parse';
 import { presentPerson, presentPersonInFull } from '../presenters/user';
 import { notAllowed } from '../problem';
+import { inviteAgain } from '../services/inviteAgain';
 import { findPerson, listPeople, placesOf } from '../services/listPeople';
 import { createUser, updateUser } from '../services/saveUser';
 
@@ -39,6 +40,14 @@ usersRouter.patch('/:userId', async (req, res) => {
   const { id } = await findPerson(actor, parseId(req.params.userId));
   if (actor.role !== 'safety') throw notAllowed();
   res.json(await inFull(await updateUser(actor, id, parse(updateUserSchema, req.body))));
+});
+
+usersRouter.post('/:userId/invitation', async (req, res) => {
+  const actor = currentUser(req);
+  const { id } = await findPerson(actor, parseId(req.params.userId));
+  if (actor.role !== 'safety') throw notAllowed();
+  parse(inviteAgainSchema, req.body ?? {});
+  res.json(await inFull(await inviteAgain(actor, id)));
 });
 
 async function inFull(user: User) {

@@ -34,6 +34,13 @@ export function checkPhotoState({ state }: Worksheet, section: Attachment['secti
   if (!allows(state, act)) throw wrongState(state);
 }
 
+/** What a signed revision holds never changes, also while a later one is written. */
+export function checkUnsigned(worksheet: Worksheet, { section, revision }: AttachmentRow): void {
+  checkPhotoState(worksheet, section);
+  if (revision === worksheet.revision) return;
+  throw wrongState(worksheet.state, 'An earlier revision that was signed holds this photo.');
+}
+
 /** Brings the content hash of a draft up to the photos that it now holds. */
 export async function rehash(worksheet: Worksheet, transaction: Transaction): Promise<void> {
   const { id: worksheetId, revision } = worksheet;
@@ -112,11 +119,9 @@ export async function addAttachment(
   if (earlier !== null) return { row: earlier, created: false };
   checkPhotoState(worksheet, section);
   const { photo, thumbnail } = await encodePhoto(file);
-  await Promise.all([
-    putObject(photoKey(id), photo, PHOTO_TYPE),
-    putObject(thumbnailKey(id), thumbnail, PHOTO_TYPE),
-  ]);
   try {
+    await putObject(photoKey(id), photo, PHOTO_TYPE);
+    await putObject(thumbnailKey(id), thumbnail, PHOTO_TYPE);
     const row = await insert(actor, worksheet.id, { id, section, caption, photo, received });
     return { row, created: true };
   } catch (fault) {

@@ -21,7 +21,7 @@ function several<T extends z.ZodType>(item: T) {
 export const SORTS = ['createdAt', 'updatedAt', 'startsAt', 'endsAt', 'number'] as const;
 const sorts = SORTS.flatMap((column) => [column, `-${column}` as const]);
 
-const filters = {
+const filterFields = {
   q: text(200).optional(),
   state: several(z.enum(STATES)),
   siteId: several(id),
@@ -29,16 +29,17 @@ const filters = {
   circuitVolts: several(z.coerce.number().nonnegative()),
   mode: several(z.enum(MODES)),
   person: id.optional(),
+  rubberGoods: id.optional(),
   finding: several(text(100)),
   from: date.optional(),
   to: date.optional(),
 };
-export const worksheetFiltersSchema = z.strictObject(filters);
+export const worksheetFiltersSchema = z.strictObject(filterFields);
 export type WorksheetFilters = z.infer<typeof worksheetFiltersSchema>;
 
 /** `GET /api/worksheets`: filters, order and page. A leading minus means from the last to the first. */
 export const worksheetListSchema = z.strictObject({
-  ...filters,
+  ...filterFields,
   sort: z.enum(sorts as [string, ...string[]]).optional(),
   cursor: z.string().max(500).optional(),
   limit: z.coerce.number().int().min(1).max(200).optional(),
@@ -69,6 +70,12 @@ function namedOn(person: string): WhereOptions<Worksheet> {
   };
 }
 
+/** Whose plan named this pair, in any revision: an inspector asks where it was worn. */
+function wornOn(rubberGoods: string) {
+  return literal(`"Worksheet"."id" IN (SELECT worksheet_id FROM worksheet_revisions
+    WHERE content #>> '{protectiveEquipment,rubberGoodsId}' = ${sequelize.escape(rubberGoods)})`);
+}
+
 /** `from` and `to` are whole days, both included, on the calendar of the worksheet's site. */
 function createdWithin(from: string | undefined, to: string | undefined) {
   const zone = `coalesce((SELECT time_zone FROM sites WHERE sites.id = "Worksheet"."site_id"), 'UTC')`;
@@ -82,8 +89,10 @@ function createdWithin(from: string | undefined, to: string | undefined) {
 /** All conditions of a list, for the list itself, the exports and the counts. */
 export function worksheetConditions(
   actor: CurrentUser,
-  { q, state, siteId, system, circuitVolts, mode, person, finding, from, to }: WorksheetFilters,
+  filters: WorksheetFilters,
 ): WhereOptions<Worksheet> {
+  const { q, state, siteId, system, circuitVolts, mode, person, rubberGoods, finding } = filters;
+  const { from, to } = filters;
   const conditions: unknown[] = [...visibleTo(actor), ...createdWithin(from, to)];
   if (q !== undefined && q.trim() !== '') {
     conditions.push(literal(`"Worksheet"."search" @@ search_query(${sequelize.escape(q)})`));
@@ -93,6 +102,7 @@ export function worksheetConditions(
     if (values !== undefined && values.length > 0) conditions.push({ [column]: values });
   }
   if (person !== undefined) conditions.push(namedOn(person));
+  if (rubberGoods !== undefined) conditions.push(wornOn(rubberGoods));
   if (finding !== undefined && finding.length > 0) {
     conditions.push({
       [Op.or]: [

@@ -1,9 +1,8 @@
 import type { CurrentUser } from '../currentUser';
 import { transact } from '../db';
 import { AttachmentRow } from '../models/AttachmentRow';
-import { wrongState } from '../problem';
 import { deleteObject } from '../storage';
-import { checkPhotoState, photoKey, rehash, thumbnailKey } from './addAttachment';
+import { checkUnsigned, photoKey, rehash, thumbnailKey } from './addAttachment';
 import { lockWorksheet } from './findWorksheet';
 import { recordEvent } from './recordEvent';
 
@@ -12,10 +11,7 @@ export async function removeAttachment(actor: CurrentUser, photo: AttachmentRow)
   const { id, worksheetId, section } = photo;
   await transact(async (transaction) => {
     const worksheet = await lockWorksheet(worksheetId, transaction);
-    checkPhotoState(worksheet, section);
-    if (photo.revision !== worksheet.revision) {
-      throw wrongState(worksheet.state, 'An earlier revision that was signed holds this photo.');
-    }
+    checkUnsigned(worksheet, photo);
     await AttachmentRow.destroy({ where: { id }, transaction });
     if (section !== 'closeOut') await rehash(worksheet, transaction);
     await recordEvent(transaction, {

@@ -9,6 +9,8 @@ import { RubberGoods } from '../models/RubberGoods';
 import { RubberGoodsTest } from '../models/RubberGoodsTest';
 import { Site } from '../models/Site';
 import { invalidField, notFound } from '../problem';
+import { isSameTest } from './addRubberGoodsTest';
+import type { TestFields } from './addRubberGoodsTest';
 import { createOnce } from './createOnce';
 import { recordEvent } from './recordEvent';
 
@@ -63,10 +65,13 @@ export function updateRubberGoods(
     if (goods === null) throw notFound();
     if (fields.siteId !== undefined) await checkSite(fields.siteId, transaction);
     const now = clock.now();
+    // A double from before counts as corrected, and is judged as any other, once its serial or place is written anew.
+    const isRewritten = fields.serial !== undefined || fields.siteId !== undefined;
     const isRetired = retired ?? goods.retiredAt !== null;
     await goods.update(
       {
         ...fields,
+        ...(isRewritten ? { serialRepeats: false } : {}),
         retiredAt: isRetired ? (goods.retiredAt ?? now) : null,
         retiredBecause: isRetired ? (retiredBecause ?? goods.retiredBecause) : null,
         updatedAt: now,
@@ -90,20 +95,22 @@ async function checkSite(siteId: string, transaction: Transaction): Promise<void
   throw invalidField('#/siteId', 'not-in-register', 'No such site.');
 }
 
-/** The list replaces the one before; the events keep what it was. */
+/** The list replaces the one before; the events keep what it was. A test that stays keeps its id. */
 async function setTests(
   rubberGoodsId: string,
   tests: NewRubberGoods['tests'],
   transaction: Transaction,
 ): Promise<void> {
-  await RubberGoodsTest.destroy({ where: { rubberGoodsId }, transaction });
-  await RubberGoodsTest.bulkCreate(
-    tests.map(({ laboratory = null, ...test }, position) => ({
-      rubberGoodsId,
-      position,
-      ...test,
-      laboratory,
-    })),
-    { transaction },
-  );
+  const where = { rubberGoodsId };
+  const before = await RubberGoodsTest.findAll({ where, order: ['position'], transaction });
+  const idOf = (test: TestFields) => {
+    const place = before.findIndex((row) => isSameTest(row, test));
+    return place < 0 ? v7() : (before.splice(place, 1)[0]?.id ?? v7());
+  };
+  const rows = tests.map(({ laboratory = null, ...test }, position) => ({
+    ...{ rubberGoodsId, position, ...test, laboratory },
+    id: idOf({ ...test, laboratory }),
+  }));
+  await RubberGoodsTest.destroy({ where, transaction });
+  await RubberGoodsTest.bulkCreate(rows, { transaction });
 }

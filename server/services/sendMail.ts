@@ -1,6 +1,7 @@
 import { createHash, randomBytes } from 'node:crypto';
 import { createTransport } from 'nodemailer';
 import type { Transporter } from 'nodemailer';
+import { Op } from 'sequelize';
 import { messages } from '@/shared/messages';
 import { clock } from '../clock';
 import { env, publicUrl } from '../env';
@@ -34,6 +35,13 @@ async function linkMail({ link, userId }: Extract<MailJob, { kind: 'link' }>) {
   const token = randomBytes(32).toString('base64url');
   const now = clock.now();
   const tokenHash = hashToken(token);
+  // Of several invitations only the one that was mailed last may be used.
+  if (link === 'invitation') {
+    await PasswordReset.update(
+      { usedAt: now },
+      { where: { userId, kind: link, usedAt: { [Op.is]: null } } },
+    );
+  }
   await PasswordReset.create({
     tokenHash,
     userId,

@@ -157,6 +157,11 @@ async function judgePhotos({ attachments, events }: Rows, report: Report): Promi
     events.filter(({ type }) => type === 'photo-added'),
     'attachmentId',
   );
+  // The latest words under a photo are vouched for by the event that changed them.
+  for (const event of events) {
+    const id = String(event.payload['attachmentId']);
+    if (event.type === 'photo-captioned' && vouched.has(id)) vouched.set(id, event);
+  }
   for (const id of taken) vouched.delete(String(id));
   judgeRows(
     {

@@ -11,6 +11,7 @@ import {
   create,
   energizedContentFor,
   prove,
+  read,
   toBriefing,
   toInForce,
 } from '../support/record';
@@ -176,6 +177,45 @@ describe('filters', () => {
     expect(cursor.status).toBe(422);
     const nul = await company.safety.agent.get('/api/worksheets').query({ q: 'a\u0000b' });
     expect(nul.status).toBe(422);
+  });
+});
+
+describe('the pair that was worn', () => {
+  it('finds the worksheets whose plan named it in any revision, as far as the person sees them', async () => {
+    const worn = async (serial: string) => {
+      const { body } = await company.safety.agent.post('/api/rubber-goods').send({
+        siteId: company.site.id,
+        kind: 'gloves',
+        gloveClass: '00',
+        serial,
+        tests: [{ testedOn: '2026-11-20', passed: true }],
+      });
+      return (body as { id: string }).id;
+    };
+    const pair = await worn('LST-1');
+    const other = await worn('LST-2');
+    const { id } = corridor;
+    const planned = await read(company.lead, id);
+    const saveWith = async (rubberGoodsId: string | undefined) => {
+      const { version, content } = await read(company.lead, id);
+      const { protectiveEquipment } = content;
+      const answer = await company.lead.agent
+        .put(`/api/worksheets/${id}`)
+        .set('If-Match', `"${version}"`)
+        .send({
+          content: { ...content, protectiveEquipment: { ...protectiveEquipment, rubberGoodsId } },
+        });
+      expect(answer.status).toBe(200);
+    };
+    await saveWith(pair);
+    expect(await ids(company.safety, { rubberGoods: pair })).toEqual([id]);
+    expect(await ids(company.lead, { rubberGoods: pair.toUpperCase() })).toEqual([id]);
+    expect(await ids(company.safety, { rubberGoods: other })).toEqual([]);
+    expect(await ids(company.stranger, { rubberGoods: pair })).toEqual([]);
+    await saveWith(planned.content.protectiveEquipment?.rubberGoodsId);
+    expect(await ids(company.safety, { rubberGoods: pair })).toEqual([]);
+    const bad = await company.safety.agent.get('/api/worksheets').query({ rubberGoods: 'x' });
+    expect([bad.status, bad.body.errors[0].pointer]).toEqual([422, '#/rubberGoods']);
   });
 });
 

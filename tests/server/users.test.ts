@@ -1,3 +1,4 @@
+import supertest from 'supertest';
 import { beforeAll, describe, expect, it } from 'vitest';
 import { v4 } from 'uuid';
 import { buildApp } from '@/server/app';
@@ -5,7 +6,8 @@ import { Event } from '@/server/models/Event';
 import type { Site } from '@/server/models/Site';
 import type { User } from '@/server/models/User';
 import { personSchema } from '@/shared/user';
-import { buildSite, buildUser, signIn } from '../support/server';
+import { deliverMails, linkMailedTo } from '../support/mail';
+import { buildSite, buildUser, receivedMails, signIn } from '../support/server';
 
 const app = buildApp();
 let site: Site;
@@ -188,5 +190,57 @@ describe('writing people', () => {
     const [event] = await Event.findAll({ where: { subjectId: person.id } });
     expect(event).toMatchObject({ subjectType: 'user', type: 'changed' });
     expect(event?.payload).toEqual({ siteIds: [elsewhere.id] });
+  });
+});
+
+describe('an invitation', () => {
+  const invite = (agent: typeof safety, id: string) => agent.post(`/api/users/${id}/invitation`);
+  const choice = { password: 'a password of my own', pin: '583920' };
+
+  it('is mailed again until a password is chosen; only the latest link works', async () => {
+    const { body } = await safety.post('/api/users').send(newUser()).expect(201);
+    const first = await linkMailedTo(body.email);
+    const again = await invite(safety, body.id).expect(200);
+    expect(personSchema.parse(again.body)).toMatchObject({ id: body.id, hasPin: false });
+    expect(again.body.invitedAt >= body.invitedAt).toBe(true);
+    await supertest(app).post(`/api/password-resets/${first.token}`).send(choice).expect(404);
+    const second = await linkMailedTo(body.email);
+    expect(second.kind).toBe('invitation');
+    expect(second.token).not.toBe(first.token);
+    await supertest(app).post(`/api/password-resets/${second.token}`).send(choice).expect(204);
+    await signIn(app, body.email, choice.password);
+    const late = await invite(safety, body.id).expect(409);
+    expect(late.body.type).toBe('/problems/conflict');
+    const events = await Event.findAll({ where: { subjectId: body.id }, order: ['seq'] });
+    expect(events.map(({ type }) => type)).toContain('invited-again');
+  });
+
+  it('that was still on its way when the next one was sent works no longer', async () => {
+    const { body } = await safety.post('/api/users').send(newUser()).expect(201);
+    await invite(safety, body.id).expect(200);
+    await deliverMails();
+    const mails = receivedMails().filter(({ to }) => to.includes(body.email));
+    const tokens = mails.map(({ text }) => /\/invitation\/([\w-]+)/.exec(text)?.[1] ?? '');
+    expect(tokens).toHaveLength(2);
+    const use = (token: string) =>
+      supertest(app).post(`/api/password-resets/${token}`).send(choice);
+    expect((await use(tokens[0] ?? '')).status).toBe(404);
+    expect((await use(tokens[1] ?? '')).status).toBe(204);
+  });
+
+  it('is for safety to send, to somebody who may still join', async () => {
+    const waiting = await buildUser({ sites: [site], password: null, pin: null });
+    const far = await buildUser({ sites: [elsewhere], password: null, pin: null });
+    const gone = await buildUser({ password: null, pin: null, retiredAt: new Date() });
+    const agent = await signIn(app, lead);
+    expect((await supertest(app).post(`/api/users/${waiting.id}/invitation`)).status).toBe(401);
+    expect((await invite(agent, waiting.id)).status).toBe(403);
+    expect((await invite(agent, far.id)).status).toBe(404);
+    expect((await invite(safety, v4())).status).toBe(404);
+    expect((await invite(safety, gone.id)).status).toBe(409);
+    expect((await invite(safety, lead.id)).status).toBe(409);
+    expect((await invite(safety, waiting.id).send({ email: 'x@y.example' })).status).toBe(422);
+    const before = receivedMails().length;
+    expect((await deliverMails()).length).toBe(before);
   });
 });

@@ -1,3 +1,4 @@
+import { readdirSync } from 'node:fs';
 import supertest from 'supertest';
 import { v7 } from 'uuid';
 import type { Express } from 'express';
@@ -15,6 +16,16 @@ export const PIN = '246810';
 /** What the fake mail server got in this test file. */
 export function receivedMails(): ReceivedMail[] {
   return (globalThis as { receivedMails?: ReceivedMail[] }).receivedMails ?? [];
+}
+
+/** Every file that the fake storage keeps in this test file, half-written ones too. */
+export function storedFiles(): string[] {
+  const { storageFolder = '' } = globalThis as { storageFolder?: string };
+  const entries = readdirSync(storageFolder, { recursive: true, withFileTypes: true });
+  return entries
+    .filter((entry) => entry.isFile())
+    .map(({ name }) => name)
+    .sort();
 }
 
 let count = 0;

@@ -32,6 +32,7 @@ Object.assign(process.env, { SMTP_URL: smtp.url, S3_ENDPOINT: s3.url });
 /** What the fake mail server got in this file. */
 export const mails = smtp.mails;
 (globalThis as { receivedMails?: typeof mails }).receivedMails = mails;
+(globalThis as { storageFolder?: string }).storageFolder = files;
 
 afterAll(async () => {
   const { closeDatabase } = await import('@/server/db');

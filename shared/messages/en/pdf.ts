@@ -240,6 +240,7 @@ export const pdf = {
       closed: 'Closed',
       'register-applied': 'Gloves taken from the register',
       'photo-added': 'Photo added',
+      'photo-captioned': 'Photo caption changed',
       'photo-removed': 'Photo removed',
       'pdf-made': 'Printed',
     },

@@ -32,6 +32,7 @@ export const trail = {
     'proof-recorded': (who: string) => `${who} recorded readings. Not proved dead.`,
     closed: (who: string) => `${who} closed it.`,
     'photo-added': (who: string) => `${who} added a photo.`,
+    'photo-captioned': (who: string) => `${who} changed the caption of a photo.`,
     'photo-removed': (who: string) => `${who} took out a photo.`,
     other: (who: string, type: string) => `${who}: ${type}.`,
   },

@@ -242,6 +242,7 @@ export const pdf: Words<typeof english> = {
       closed: 'Cerrada',
       'register-applied': 'Guantes tomados del registro',
       'photo-added': 'Foto agregada',
+      'photo-captioned': 'Pie de foto cambiado',
       'photo-removed': 'Foto quitada',
       'pdf-made': 'Impresa',
     },

@@ -32,6 +32,7 @@ export const trail: Words<typeof en> = {
     'proof-recorded': (who) => `${who} anotó lecturas. Sin comprobar.`,
     closed: (who) => `${who} la cerró.`,
     'photo-added': (who) => `${who} agregó una foto.`,
+    'photo-captioned': (who) => `${who} cambió el pie de una foto.`,
     'photo-removed': (who) => `${who} quitó una foto.`,
     other: (who, type) => `${who}: ${type}.`,
   },
