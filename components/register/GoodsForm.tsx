@@ -23,6 +23,8 @@ const formSchema = z.object({
 });
 type Form = z.infer<typeof formSchema>;
 
+const changeSchema = rubberGoodsInputSchema.omit({ tests: true });
+
 const startOf = (item: RubberGoods | undefined): Form => ({
   siteId: item?.siteId,
   kind: item?.kind,
@@ -41,7 +43,8 @@ function bodyOf({ testedOn, laboratory, ...form }: Form, item: RubberGoods | und
     serial: form.serial.trim(),
     size: form.size.trim(),
     issuedOn: form.issuedOn ?? null,
-    tests: item?.tests ?? [test],
+    // Tests are recorded one by one, never with what is printed on the item.
+    ...(item === undefined && { tests: [test] }),
   };
 }
 
@@ -74,13 +77,18 @@ export function GoodsForm({ item, sites, todayAt, onDone, onCancel }: Props) {
     formSchema,
     initial: () => startOf(item),
     toBody: (value) => bodyOf(value, item),
-    bodySchema: rubberGoodsInputSchema,
+    bodySchema: item === undefined ? rubberGoodsInputSchema : changeSchema,
     moreFaults: ({ testedOn, siteId }) =>
       testedOn !== undefined && testedOn > todayAt(siteId)
         ? [{ name: 'tests.0.testedOn', code: 'after-today' }]
         : [],
     labelOf: (name) => labels[name] ?? name,
-    wordFor: ({ code }) => (code === 'after-today' ? words.afterToday : undefined),
+    wordFor: ({ name, code }) =>
+      code === 'after-today'
+        ? words.afterToday
+        : name === 'serial' && code === 'taken'
+          ? words.serialTaken
+          : undefined,
   });
   if (form === undefined) return null;
   const { value, set, idOf, errorOf } = form;

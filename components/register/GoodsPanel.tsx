@@ -10,6 +10,7 @@ import { Button, Citation, describeFault, Facts, Notice, Section, StopPanel, Tex
 import { useSaveRecord } from './registerMutations';
 import { RetireForm } from './RetireForm';
 import { TestForm } from './TestForm';
+import { UsedOn } from './UsedOn';
 import type { RegisterViewControl } from './useRegisterView';
 
 /** Why it may not be used now, before anything else. */
@@ -40,7 +41,7 @@ function Buttons({ item, view }: { item: RubberGoods; view: RegisterViewControl 
   const messages = useMessages();
   const { register } = messages;
   const { id } = item;
-  const save = useSaveRecord('goods', id);
+  const save = useSaveRecord('goods', { id: id });
   if (item.retired) {
     // What failed a test never comes back; what was lost may be found.
     if (item.retiredBecause === 'failed test') return null;
@@ -178,6 +179,7 @@ export function GoodsPanel({ item, today, view }: Props) {
       <View>
         <Dates item={item} />
         <Tests item={item} />
+        {item.kind === 'gloves' && <UsedOn by="rubberGoods" id={item.id} />}
       </View>
     </>
   );

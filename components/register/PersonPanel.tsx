@@ -7,9 +7,11 @@ import { useUser } from '../api/session';
 import { deviceZone } from '../home/clock';
 import { useLocale } from '../i18n/preferences';
 import { useMessages } from '../i18n/useMessages';
+import { space } from '../theme/tokens';
 import { Button, describeFault, Facts, Notice, Text, type Fact } from '../ui';
 import { useSaveRecord } from './registerMutations';
 import { RetireForm } from './RetireForm';
+import { UsedOn } from './UsedOn';
 import type { RegisterViewControl } from './useRegisterView';
 
 function usePersonFacts(person: Person, sites: readonly Site[]): Fact[] {
@@ -46,7 +48,7 @@ function Buttons({ person, view }: { person: Person; view: RegisterViewControl }
   const messages = useMessages();
   const { register } = messages;
   const me = useUser();
-  const save = useSaveRecord('people', person.id);
+  const save = useSaveRecord('people', { id: person.id });
   if (person.retired === true) {
     return (
       <>
@@ -74,6 +76,27 @@ function Buttons({ person, view }: { person: Person; view: RegisterViewControl }
         reason={person.id === me.id ? register.people.notSelf : undefined}
         onPress={() => view.open({ id: person.id, act: 'retire' })}
       />
+    </View>
+  );
+}
+
+/** For whoever has not joined yet: the link of an invitation is short-lived. */
+function InviteAgain({ person }: { person: Person }) {
+  const messages = useMessages();
+  const words = messages.register.people;
+  const send = useSaveRecord('people', { id: person.id, part: 'invitation' });
+  return (
+    <View style={styles.invite}>
+      {send.isSuccess && (
+        <Notice live icon="sent">
+          {words.invitedAgain(person.name)}
+        </Notice>
+      )}
+      {send.isError && <Text variant="strong">{describeFault(send.error, messages)}</Text>}
+      <Button label={words.inviteAgain} busy={send.isPending} onPress={() => send.mutate({})} />
+      <Text variant="label" weight="400" color="ink2">
+        {words.inviteNote}
+      </Text>
     </View>
   );
 }
@@ -117,12 +140,17 @@ export function PersonPanel({ person, sites, today, view }: Props) {
         </Notice>
       )}
       <Buttons person={person} view={view} />
+      {person.retired !== true && accountState(person) !== 'signedIn' && (
+        <InviteAgain person={person} />
+      )}
       <Facts facts={facts} />
+      <UsedOn by="person" id={person.id} />
     </>
   );
 }
 
 const styles = StyleSheet.create({
   buttons: { flexDirection: 'row', flexWrap: 'wrap', gap: 10 },
+  invite: { gap: space.xs },
   grow: { flexGrow: 1, flexBasis: 150 },
 });

@@ -19,7 +19,7 @@ interface Props {
 export function RetireForm({ subject, recordId, title, body, onDone, onCancel }: Props) {
   const messages = useMessages();
   const { register, enumerations } = messages;
-  const save = useSaveRecord(subject, recordId);
+  const save = useSaveRecord(subject, { id: recordId });
   const [because, setBecause] = useState<(typeof RETIRED_BECAUSE)[number]>();
   const [tried, setTried] = useState(false);
   const asksWhy = subject === 'goods';

@@ -21,7 +21,7 @@ import type { RegisterViewControl } from './useRegisterView';
 function Buttons({ site, view }: { site: Site; view: RegisterViewControl }) {
   const messages = useMessages();
   const { register } = messages;
-  const save = useSaveRecord('sites', site.id);
+  const save = useSaveRecord('sites', { id: site.id });
   if (site.retired) {
     return (
       <>

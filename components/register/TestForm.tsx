@@ -1,37 +1,24 @@
+import { v7 as newId } from 'uuid';
 import { z } from 'zod';
-import type { RubberGoods } from '@/shared/register';
-import { date, text } from '@/shared/text';
+import { rubberGoodsTestInputSchema, type RubberGoods } from '@/shared/register';
 import { useMessages } from '../i18n/useMessages';
 import { Choice, DateField, Notice, TextField } from '../ui';
 import { RegisterFormFrame } from './RegisterFormFrame';
 import { useRegisterForm } from './useRegisterForm';
 
 const formSchema = z.object({
+  /** Names the test, so that sending it again after a lost answer adds no second one. */
+  id: z.string(),
   testedOn: z.string().optional(),
   passed: z.boolean().optional(),
   laboratory: z.string(),
 });
 type Form = z.infer<typeof formSchema>;
 
-const testSchema = z.object({
-  testedOn: date,
-  passed: z.boolean(),
-  laboratory: text().optional(),
-});
-
-const testOf = ({ testedOn, passed, laboratory }: Form) => ({
-  testedOn,
-  passed,
+const testOf = ({ laboratory, ...test }: Form) => ({
+  ...test,
   ...(laboratory.trim() !== '' && { laboratory: laboratory.trim() }),
 });
-
-/** A failed test and the retirement are one change: there is no moment in which the item could still be chosen. */
-function bodyOf(item: RubberGoods, form: Form) {
-  return {
-    tests: [...item.tests, testOf(form)],
-    ...(form.passed === false && { retired: true, retiredBecause: 'failed test' }),
-  };
-}
 
 interface Props {
   item: RubberGoods;
@@ -45,7 +32,6 @@ interface Props {
 export function TestForm({ item, today, onDone, onCancel }: Props) {
   const { register } = useMessages();
   const words = register.goods;
-  const last = `tests.${item.tests.length}`;
   const labels: Readonly<Record<string, string>> = {
     testedOn: words.testedOn,
     passed: words.result,
@@ -54,16 +40,14 @@ export function TestForm({ item, today, onDone, onCancel }: Props) {
   const form = useRegisterForm({
     subject: 'goods',
     recordId: item.id,
-    form: `test-${item.tests.length}`,
+    part: 'tests',
     formSchema,
-    initial: (): Form => ({ testedOn: undefined, passed: undefined, laboratory: '' }),
-    toBody: (value) => bodyOf(item, value),
-    bodySchema: z.looseObject({ tests: z.array(testSchema) }),
+    initial: (): Form => ({ id: newId(), testedOn: undefined, passed: undefined, laboratory: '' }),
+    toBody: testOf,
+    bodySchema: rubberGoodsTestInputSchema,
     moreFaults: ({ testedOn }) =>
-      testedOn !== undefined && testedOn > today
-        ? [{ name: `${last}.testedOn`, code: 'after-today' }]
-        : [],
-    labelOf: (name) => labels[name.split('.').at(-1) ?? ''] ?? name,
+      testedOn !== undefined && testedOn > today ? [{ name: 'testedOn', code: 'after-today' }] : [],
+    labelOf: (name) => labels[name] ?? name,
     wordFor: ({ code }) => (code === 'after-today' ? words.afterToday : undefined),
   });
   if (form === undefined) return null;
@@ -76,15 +60,15 @@ export function TestForm({ item, today, onDone, onCancel }: Props) {
       onCancel={onCancel}
     >
       <DateField
-        id={idOf(`${last}.testedOn`)}
+        id={idOf('testedOn')}
         label={words.testedOn}
         value={value.testedOn}
         max={today}
         onChange={(day) => set('testedOn', day)}
-        error={errorOf(`${last}.testedOn`)}
+        error={errorOf('testedOn')}
       />
       <Choice<boolean>
-        id={idOf(`${last}.passed`)}
+        id={idOf('passed')}
         label={words.result}
         layout="row"
         options={[
@@ -93,7 +77,7 @@ export function TestForm({ item, today, onDone, onCancel }: Props) {
         ]}
         value={value.passed}
         onChange={(passed) => set('passed', passed)}
-        error={errorOf(`${last}.passed`)}
+        error={errorOf('passed')}
       />
       {value.passed === false && (
         <Notice live icon="refuse">
@@ -101,11 +85,11 @@ export function TestForm({ item, today, onDone, onCancel }: Props) {
         </Notice>
       )}
       <TextField
-        id={idOf(`${last}.laboratory`)}
+        id={idOf('laboratory')}
         label={words.laboratory}
         value={value.laboratory}
         onChangeText={(laboratory) => set('laboratory', laboratory)}
-        error={errorOf(`${last}.laboratory`)}
+        error={errorOf('laboratory')}
         maxLength={200}
       />
     </RegisterFormFrame>

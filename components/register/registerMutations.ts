@@ -25,15 +25,25 @@ function useReadAgain() {
     );
 }
 
-/** Adds a record, or changes the one with that id. */
-export function useSaveRecord<S extends Subject>(subject: S, id: string | undefined) {
+interface Target {
+  /** Undefined where a record is added. */
+  id: string | undefined;
+  /** What is added to the record, where it is not the record itself that changes. */
+  part?: 'tests' | 'invitation';
+}
+
+/** Adds a record, changes the one with that id, or adds a part to it. */
+export function useSaveRecord<S extends Subject>(subject: S, { id, part }: Target) {
   const readAgain = useReadAgain();
   const { path, schema } = SUBJECTS[subject];
   return useMutation({
     mutationFn: async (body: unknown) => {
-      const saved = await (id === undefined
-        ? request(schema, path, json('POST', body))
-        : request(schema, `${path}/${id}`, json('PATCH', body)));
+      const saved =
+        id === undefined
+          ? await request(schema, path, json('POST', body))
+          : part === undefined
+            ? await request(schema, `${path}/${id}`, json('PATCH', body))
+            : await request(schema, `${path}/${id}/${part}`, json('POST', body));
       return saved as RecordOf<S>;
     },
     onSuccess: () => readAgain(),

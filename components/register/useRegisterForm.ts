@@ -18,8 +18,8 @@ interface Options<F extends object, S extends Subject> {
   subject: S;
   /** Undefined where a record is added. */
   recordId: string | undefined;
-  /** Beside the record's id, where it has several forms. */
-  form?: string;
+  /** Adds this part to the record, in a form of its own. */
+  part?: 'tests';
   formSchema: z.ZodType<F>;
   initial: () => F;
   /** What is sent; its schema is the contract with the server. */
@@ -88,12 +88,12 @@ function changed(body: Record<string, unknown>, before: Record<string, unknown>)
 export function useRegisterForm<F extends object, S extends Subject>(
   options: Options<F, S>,
 ): RegisterForm<F, RecordOf<S>> | undefined {
-  const { subject, recordId, form = 'edit', formSchema, initial, toBody, bodySchema } = options;
+  const { subject, recordId, part, formSchema, initial, toBody, bodySchema } = options;
   const user = useUser();
   const messages = useMessages();
-  const key = `register/${subject}/${recordId ?? 'new'}/${form}`;
+  const key = `register/${subject}/${recordId ?? 'new'}/${part ?? 'edit'}`;
   const kept = useKeptForm({ userId: user.id, key, schema: formSchema, initial });
-  const save = useSaveRecord(subject, recordId);
+  const save = useSaveRecord(subject, { id: recordId, part });
   const [sent, setSent] = useState<F>();
   const [wasKept, setWasKept] = useState<boolean>();
   const [before] = useState(() => toBody(initial()));
@@ -132,7 +132,8 @@ export function useRegisterForm<F extends object, S extends Subject>(
       setSent(value);
       if (own.length > 0) return;
       const body = toBody(value);
-      save.mutate(recordId === undefined ? body : changed(body, before), {
+      const isChange = recordId !== undefined && part === undefined;
+      save.mutate(isChange ? changed(body, before) : body, {
         onSuccess: (record) => {
           void kept.clear();
           onDone(record);

@@ -11,15 +11,16 @@ import {
   photosOf,
   type AskedSection,
 } from '../photos/photoSections';
-import { PhotoTiles, WaitingTile } from '../photos/PhotoTiles';
+import { PhotoTiles } from '../photos/PhotoTiles';
 import { usePhotos } from '../photos/usePhotos';
+import { WaitingTile } from '../photos/WaitingTile';
 
 const MOST = 20;
 
 /** The photos of a section that may still change: what the server has, what waits here, and how to add one. */
 function OpenPhotos({ record, section }: { record: WorksheetRecord; section: AskedSection }) {
   const { photos: words } = useMessages();
-  const { waiting, choose, caption, drop, send, remove } = usePhotos(record, section);
+  const { waiting, choose, caption, drop, send, recaption, remove } = usePhotos(record, section);
   const full = record.attachments.length + waiting.length >= MOST;
   return (
     <View role="group" aria-label={words.purpose[section]} style={styles.box}>
@@ -29,7 +30,10 @@ function OpenPhotos({ record, section }: { record: WorksheetRecord; section: Ask
           {photoFiles.canPick ? words.hint : words.notHere}
         </Text>
       </View>
-      <PhotoTiles photos={photosOf(record, section)} onRemove={remove} />
+      <PhotoTiles
+        photos={photosOf(record, section)}
+        changes={{ onCaption: recaption, onRemove: remove }}
+      />
       {waiting.map((photo) => (
         <WaitingTile
           key={photo.id}

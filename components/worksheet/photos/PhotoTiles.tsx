@@ -7,26 +7,105 @@ import { useMessages } from '../../i18n/useMessages';
 import { space } from '../../theme/tokens';
 import { useTheme } from '../../theme/useTheme';
 import { Button, Text, TextField } from '../../ui';
-import type { ShownPhoto } from './usePhotos';
 
-/** One photo of the record: its picture opens it in full. */
-function PhotoTile({
-  photo,
-  onRemove,
-}: {
+/** Answers with what went wrong, in words. */
+type Act<Rest extends unknown[]> = (id: string, ...rest: Rest) => Promise<string | undefined>;
+
+interface Changes {
+  onCaption: Act<[caption: string]>;
+  onRemove: Act<[]>;
+}
+
+interface FormProps {
   photo: Attachment;
-  onRemove?: (id: string) => Promise<string | undefined>;
-}) {
+  onSave: (caption: string) => Promise<void>;
+  onCancel: () => void;
+}
+
+function CaptionForm({ photo, onSave, onCancel }: FormProps) {
   const { photos: words } = useMessages();
-  const { colors } = useTheme();
-  const [asks, setAsks] = useState(false);
+  const [caption, setCaption] = useState(photo.caption);
+  const [busy, setBusy] = useState(false);
+  const handleSave = () => {
+    setBusy(true);
+    void onSave(caption.trim()).finally(() => setBusy(false));
+  };
+  return (
+    <>
+      <TextField
+        id={`caption-${photo.id}`}
+        label={words.caption}
+        hint={words.captionHint}
+        value={caption}
+        onChangeText={setCaption}
+        onSubmitEditing={handleSave}
+        maxLength={200}
+        autoFocus
+      />
+      <Button label={words.saveCaption} busy={busy} onPress={handleSave} />
+      <Button kind="quiet" label={words.cancel} onPress={onCancel} />
+    </>
+  );
+}
+
+/** What can be done with a photo while nobody has signed it. */
+function Acts({ photo, onCaption, onRemove }: Changes & { photo: Attachment }) {
+  const { photos: words } = useMessages();
+  const [act, setAct] = useState<'caption' | 'remove'>();
   const [fault, setFault] = useState<string>();
   const caption = photo.caption === '' ? words.noCaption : photo.caption;
-  const handleRemove = async () => {
-    const said = await onRemove?.(photo.id);
-    setAsks(false);
-    setFault(said);
+  const end = async (done: Promise<string | undefined>) => {
+    setFault(await done);
+    setAct(undefined);
   };
+  return (
+    <>
+      {fault !== undefined && (
+        <Text variant="label" weight="600" aria-live="polite">
+          {fault}
+        </Text>
+      )}
+      {act === 'caption' && (
+        <CaptionForm
+          photo={photo}
+          onSave={(text) => end(onCaption(photo.id, text))}
+          onCancel={() => setAct(undefined)}
+        />
+      )}
+      {act === 'remove' && (
+        <>
+          <Text variant="label">{words.removeSure}</Text>
+          <Button label={words.remove} onPress={() => void end(onRemove(photo.id))} />
+          <Button kind="quiet" label={words.keep} onPress={() => setAct(undefined)} />
+        </>
+      )}
+      {act === undefined && (
+        <>
+          <Button
+            kind="quiet"
+            icon="pen"
+            label={words.editCaption}
+            aria-label={words.editCaptionOf(caption)}
+            onPress={() => setAct('caption')}
+          />
+          <Button
+            kind="quiet"
+            icon="close"
+            label={words.remove}
+            aria-label={words.removeOf(caption)}
+            onPress={() => setAct('remove')}
+          />
+        </>
+      )}
+    </>
+  );
+}
+
+/** One photo of the record: its picture opens it in full. */
+function PhotoTile({ photo, changes }: { photo: Attachment; changes?: Changes }) {
+  const { photos: words } = useMessages();
+  const { colors } = useTheme();
+  const caption = photo.caption === '' ? words.noCaption : photo.caption;
   return (
     <View role="listitem" style={styles.tile}>
       <Pressable
@@ -45,27 +124,7 @@ function PhotoTile({
       <Text variant="label" weight="400">
         {caption}
       </Text>
-      {fault !== undefined && (
-        <Text variant="label" weight="600" aria-live="polite">
-          {fault}
-        </Text>
-      )}
-      {onRemove !== undefined &&
-        (asks ? (
-          <>
-            <Text variant="label">{words.removeSure}</Text>
-            <Button label={words.remove} onPress={() => void handleRemove()} />
-            <Button kind="quiet" label={words.keep} onPress={() => setAsks(false)} />
-          </>
-        ) : (
-          <Button
-            kind="quiet"
-            icon="close"
-            label={words.remove}
-            aria-label={words.removeOf(caption)}
-            onPress={() => setAsks(true)}
-          />
-        ))}
+      {changes !== undefined && <Acts photo={photo} {...changes} />}
     </View>
   );
 }
@@ -73,85 +132,17 @@ function PhotoTile({
 interface TilesProps {
   photos: readonly Attachment[];
   /** Left out where the photos are frozen. */
-  onRemove?: (id: string) => Promise<string | undefined>;
+  changes?: Changes;
 }
 
 /** The photos that the server has. */
-export function PhotoTiles({ photos, onRemove }: TilesProps) {
+export function PhotoTiles({ photos, changes }: TilesProps) {
   if (photos.length === 0) return null;
   return (
     <View role="list" style={styles.tiles}>
       {photos.map((photo) => (
-        <PhotoTile key={photo.id} photo={photo} onRemove={onRemove} />
+        <PhotoTile key={photo.id} photo={photo} changes={changes} />
       ))}
-    </View>
-  );
-}
-
-interface WaitingProps {
-  photo: ShownPhoto;
-  onCaption: (caption: string) => void;
-  onSend: () => void;
-  onDrop: () => void;
-}
-
-/** A photo on this device: its caption is written before it goes. */
-export function WaitingTile({ photo, onCaption, onSend, onDrop }: WaitingProps) {
-  const { photos: words } = useMessages();
-  const { colors } = useTheme();
-  const { sending, fault, hopeless, caption, name } = photo;
-  return (
-    <View style={[styles.waiting, { borderColor: colors.ink }]}>
-      {hopeless !== true && (
-        <Image
-          source={{ uri: photo.url }}
-          alt={caption === '' ? words.noCaption : caption}
-          resizeMode="cover"
-          style={styles.preview}
-        />
-      )}
-      <View style={styles.fields}>
-        {fault !== undefined && (
-          <Text variant="strong" aria-live="polite">
-            {name === undefined ? fault : `${name}: ${fault}`}
-          </Text>
-        )}
-        {hopeless !== true && (
-          <TextField
-            id={`photo-${photo.id}`}
-            label={words.caption}
-            hint={words.captionHint}
-            value={caption}
-            onChangeText={onCaption}
-            maxLength={200}
-          />
-        )}
-        {sending !== undefined ? (
-          <View role="status" style={styles.progress}>
-            <Text variant="answer">{words.sending(sending)}</Text>
-            <View style={[styles.track, { borderColor: colors.ink }]}>
-              <View style={[styles.gone, { width: `${sending}%`, backgroundColor: colors.ink }]} />
-            </View>
-          </View>
-        ) : (
-          <>
-            {hopeless !== true && (
-              <Button
-                kind="primary"
-                icon="arrow-up"
-                label={fault === undefined ? words.send : words.again}
-                onPress={onSend}
-              />
-            )}
-            {hopeless !== true && (
-              <Text variant="label" weight="400" color="ink2">
-                {words.keptHere}
-              </Text>
-            )}
-            <Button kind="quiet" icon="close" label={words.drop} onPress={onDrop} />
-          </>
-        )}
-      </View>
     </View>
   );
 }
@@ -161,17 +152,4 @@ const styles = StyleSheet.create({
   tile: { width: 164, gap: space.xxs },
   frame: { borderWidth: 1.5 },
   image: { width: '100%', aspectRatio: 4 / 3 },
-  waiting: {
-    borderWidth: 2,
-    padding: 14,
-    gap: space.md,
-    flexDirection: 'row',
-    flexWrap: 'wrap',
-    alignItems: 'flex-start',
-  },
-  preview: { width: 164, aspectRatio: 4 / 3 },
-  fields: { flexGrow: 1, flexShrink: 1, flexBasis: 220, gap: space.sm },
-  progress: { gap: space.xs },
-  track: { borderWidth: 2, height: 14 },
-  gone: { height: 10 },
 });

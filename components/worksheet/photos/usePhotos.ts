@@ -2,9 +2,9 @@ import { useQueryClient } from '@tanstack/react-query';
 import { useCallback, useEffect, useRef, useState } from 'react';
 import { v7 as newId } from 'uuid';
 import { z } from 'zod';
-import type { WorksheetRecord } from '@/shared/record';
+import { attachmentSchema, type WorksheetRecord } from '@/shared/record';
 import { ApiProblem } from '../../api/ApiProblem';
-import { request } from '../../api/request';
+import { json, request } from '../../api/request';
 import { useUser } from '../../api/session';
 import { keptForms } from '../../drafts/keptForms';
 import { useMessages } from '../../i18n/useMessages';
@@ -149,6 +149,16 @@ export function usePhotos({ id: worksheetId }: WorksheetRecord, section: AskedSe
       } catch (error) {
         const hopeless = ['large', 'pixels', 'damaged'].includes(faultOfAnswer(error) ?? '');
         edit(id, { sending: undefined, fault: words.ofAnswer(error), hopeless });
+      }
+    },
+    /** Changes the words under one that the server has; answers with the fault in words, if there is one. */
+    async recaption(id: string, caption: string): Promise<string | undefined> {
+      try {
+        await request(attachmentSchema, `/attachments/${id}`, json('PATCH', { caption }));
+        await readAgain();
+        return undefined;
+      } catch (error) {
+        return words.ofAnswer(error);
       }
     },
     /** Takes one off the server; answers with the fault in words, if there is one. */

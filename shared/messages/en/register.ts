@@ -29,6 +29,13 @@ export const register = {
   lineIsToday: 'Line: today.',
   fieldFault: (label: string, fault: string) => `${label}: ${fault}`,
   days: (count: number) => (count === 1 ? '1 day' : `${count} days`),
+  usedOn: {
+    title: 'Worksheets',
+    noGoods: 'No worksheet names it.',
+    noPerson: 'No worksheet names this person.',
+    loading: 'Loading worksheets',
+    older: 'Show older ones',
+  },
   and: (first: string, rest: number) => `${first} and ${rest} more`,
 
   people: {
@@ -56,6 +63,9 @@ export const register = {
     account: 'Account',
     invite: 'Send the invitation',
     invited: (name: string) => `${name} is in the register. The invitation is on its way.`,
+    inviteAgain: 'Send the invitation again',
+    inviteNote: 'The link in it works for one hour. Earlier links stop working.',
+    invitedAgain: (name: string) => `A new invitation to ${name} is on its way.`,
     notQualified: 'Not qualified',
     ranOut: 'Ran out',
     ranOutAgo: (days: string) => `${days} ago`,
@@ -198,6 +208,7 @@ export const register = {
     saved: (serial: string) => `${serial} is in the register.`,
     testSaved: (serial: string) => `The test of ${serial} is recorded.`,
     siteHint: 'Where it is kept and who may choose it.',
+    serialTaken: 'Another item of this site has this serial.',
     afterToday: 'This day is still to come.',
     noReason: 'Not chosen.',
   },

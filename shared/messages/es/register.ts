@@ -39,6 +39,13 @@ export const register: Words<typeof en> = {
   lineIsToday: 'Línea: hoy.',
   fieldFault: (label, fault) => `${label}: ${fault}`,
   days: (count) => (count === 1 ? '1 día' : `${count} días`),
+  usedOn: {
+    title: 'Hojas',
+    noGoods: 'Ninguna hoja lo nombra.',
+    noPerson: 'Ninguna hoja nombra a esta persona.',
+    loading: 'Cargando hojas',
+    older: 'Mostrar más antiguas',
+  },
   and: (first, rest) => `${first} y ${rest} más`,
 
   people: {
@@ -66,6 +73,9 @@ export const register: Words<typeof en> = {
     account: 'Cuenta',
     invite: 'Enviar la invitación',
     invited: (name) => `${name} ya está en el registro. La invitación va en camino.`,
+    inviteAgain: 'Enviar otra vez la invitación',
+    inviteNote: 'Su enlace sirve una hora. Los enlaces anteriores dejan de servir.',
+    invitedAgain: (name) => `Va en camino una nueva invitación para ${name}.`,
     notQualified: 'No calificado',
     ranOut: 'Vencida',
     ranOutAgo: (days) => `hace ${days}`,
@@ -210,6 +220,7 @@ export const register: Words<typeof en> = {
     saved: (serial) => `${serial} ya está en el registro.`,
     testSaved: (serial) => `La prueba de ${serial} quedó anotada.`,
     siteHint: 'Dónde se guarda y quién lo puede elegir.',
+    serialTaken: 'Otra pieza de este sitio tiene esta serie.',
     afterToday: 'Ese día aún no llega.',
     noReason: 'Falta elegir.',
   },

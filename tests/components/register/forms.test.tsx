@@ -53,7 +53,7 @@ afterEach(() => {
 });
 
 describe('a test that failed', () => {
-  it('retires the item in the same request', async () => {
+  it('is sent as one test, which retires the item at the server', async () => {
     const onDone = vi.fn();
     server.mockImplementation(() => Promise.resolve(answer(200, { ...item, retired: true })));
     renderScreen(
@@ -68,11 +68,12 @@ describe('a test that failed', () => {
     await waitFor(() => expect(onDone).toHaveBeenCalled());
     expect(sent()).toEqual([
       {
-        tests: [...item.tests, { testedOn: '2026-09-18', passed: false }],
-        retired: true,
-        retiredBecause: 'failed test',
+        id: expect.stringMatching(/^[0-9a-f-]{36}$/) as unknown,
+        testedOn: '2026-09-18',
+        passed: false,
       },
     ]);
+    expect(server.mock.calls.at(-1)?.[0]).toBe(`/api/rubber-goods/${item.id}/tests`);
   });
 
   it('is not guessed, and lies not in time to come', async () => {
