@@ -1,15 +1,15 @@
 import { Link } from 'expo-router';
-import type { ReactNode } from 'react';
-import { Pressable, StyleSheet, View } from 'react-native';
+import { useState, type ReactNode } from 'react';
+import { Pressable, StyleSheet, View, type LayoutChangeEvent } from 'react-native';
 import { rule, space, touch } from '../theme/tokens';
 import { useBreakpoint } from '../theme/useBreakpoint';
 import { useTheme } from '../theme/useTheme';
 import { useMessages } from '../i18n/useMessages';
 import { Button, type ButtonProps } from './Button';
+import { HeaderPlaces } from './HeaderPlaces';
 import { Icon, Mark } from './Icon';
 import { useShell } from './shell';
 import { Text } from './Text';
-import { webProps } from './webProps';
 
 export interface BackLink {
   label: string;
@@ -64,41 +64,60 @@ function Person() {
   );
 }
 
-/** The places of the header; the open one is ink with a heavy bar under it. */
-function Places({ current }: { current?: string }) {
-  const { places } = useShell();
+/** How wide each part of the bar is by itself, as measured. */
+function useWidths<Part extends string>() {
+  const [widths, setWidths] = useState<Partial<Record<Part, number>>>({});
+  const keep = (part: Part, width: number) =>
+    setWidths((before) => (before[part] === width ? before : { ...before, [part]: width }));
+  const measure =
+    (part: Part) =>
+    ({ nativeEvent: { layout } }: LayoutChangeEvent) =>
+      keep(part, Math.ceil(layout.width));
+  return { widths, keep, measure };
+}
+
+/**
+ * From a tablet on. Mark, places and person stand in one line; where they do
+ * not fit beside each other the places have a line of their own.
+ */
+function Bar({ back, saved, end, place }: Omit<Props, 'back'> & { back: ReactNode }) {
+  const { isWide, margin } = useBreakpoint();
   const { colors } = useTheme();
-  const { ui } = useMessages();
-  if (places.length === 0) return null;
+  const { places } = useShell();
+  const { widths, keep, measure } = useWidths<'bar' | 'start' | 'end' | 'places'>();
+  const shown = places.length > 0 && (isWide || !back);
+  const { bar = Infinity, start = 0, end: endWidth = 0, places: needed = 0 } = widths;
+  const below = shown && needed > bar - 2 * margin - start - endWidth - 2 * space.xl;
+  const line = shown && (
+    <HeaderPlaces current={place} onWidth={(width) => keep('places', Math.ceil(width))} />
+  );
   return (
-    <View role="navigation" aria-label={ui.menu} style={styles.places}>
-      {places.map((place) => {
-        const here = place.key === current;
-        return (
-          <Link key={place.key} href={place.href} asChild>
-            <Pressable
-              role="link"
-              {...webProps({ 'aria-current': here ? 'page' : undefined })}
-              style={StyleSheet.flatten([
-                styles.place,
-                { borderBottomColor: here ? colors.ink : 'transparent' },
-              ])}
-            >
-              <Text variant="strong" weight="500" color={here ? 'ink' : 'blue'}>
-                {place.label}
-              </Text>
-            </Pressable>
-          </Link>
-        );
-      })}
+    <View
+      role="banner"
+      onLayout={measure('bar')}
+      style={[styles.banner, { borderBottomColor: colors.ink }]}
+    >
+      <View style={[styles.bar, below && styles.low, { paddingHorizontal: margin }]}>
+        <View style={styles.part} onLayout={measure('start')}>
+          <Brand />
+          {back}
+        </View>
+        <View style={styles.grow}>{!below && line}</View>
+        <View style={styles.part} onLayout={measure('end')}>
+          {saved}
+          {end ?? <Person />}
+        </View>
+      </View>
+      {below && (
+        <View style={[styles.below, { paddingHorizontal: margin - space.sm }]}>{line}</View>
+      )}
     </View>
   );
 }
 
 /** The head of every screen: mark and name, where it came from, how it is kept, who is signed in. */
 export function Header({ back, saved, end, place }: Props) {
-  const { isPhone, isWide, margin } = useBreakpoint();
-  const { colors } = useTheme();
+  const { isPhone, margin } = useBreakpoint();
   const backButton = back !== undefined && (
     <Button
       kind="quiet"
@@ -109,24 +128,11 @@ export function Header({ back, saved, end, place }: Props) {
       style={styles.back}
     />
   );
-  if (isPhone) {
-    return (
-      <View role="banner" style={[styles.phone, { paddingHorizontal: margin }]}>
-        {back !== undefined ? backButton : <Brand />}
-        {end ?? saved ?? <Person />}
-      </View>
-    );
-  }
+  if (!isPhone) return <Bar back={backButton} saved={saved} end={end} place={place} />;
   return (
-    <View
-      role="banner"
-      style={[styles.bar, { paddingHorizontal: margin, borderBottomColor: colors.ink }]}
-    >
-      <Brand />
-      {backButton}
-      {isWide || back === undefined ? <Places current={place} /> : <View style={styles.grow} />}
-      {saved}
-      {end ?? <Person />}
+    <View role="banner" style={[styles.phone, { paddingHorizontal: margin }]}>
+      {back !== undefined ? backButton : <Brand />}
+      {end ?? saved ?? <Person />}
     </View>
   );
 }
@@ -140,13 +146,12 @@ const styles = StyleSheet.create({
     paddingTop: 6,
     minHeight: 54,
   },
-  bar: {
-    flexDirection: 'row',
-    alignItems: 'center',
-    columnGap: space.xl,
-    minHeight: 78,
-    borderBottomWidth: rule.strong,
-  },
+  banner: { borderBottomWidth: rule.strong },
+  bar: { flexDirection: 'row', alignItems: 'center', columnGap: space.xl, minHeight: 78 },
+  low: { minHeight: 60 },
+  part: { flexDirection: 'row', alignItems: 'center', columnGap: space.xl, flexShrink: 1 },
+  below: { minHeight: 52 },
+  grow: { flex: 1, minWidth: 0, alignSelf: 'stretch' },
   brand: { flexDirection: 'row', alignItems: 'center', gap: 10, minHeight: touch.least },
   name: { fontSize: 22, lineHeight: 28, letterSpacing: -0.11 },
   person: {
@@ -158,22 +163,4 @@ const styles = StyleSheet.create({
   },
   shrink: { flexShrink: 1 },
   back: { alignSelf: 'center', marginLeft: -6 },
-  places: {
-    flex: 1,
-    flexDirection: 'row',
-    flexWrap: 'wrap',
-    alignSelf: 'stretch',
-    alignContent: 'stretch',
-    columnGap: space.xs,
-  },
-  place: {
-    minHeight: touch.least,
-    justifyContent: 'center',
-    paddingHorizontal: space.sm,
-    borderBottomWidth: 5,
-    borderTopWidth: 5,
-    borderTopColor: 'transparent',
-    alignSelf: 'stretch',
-  },
-  grow: { flex: 1 },
 });
