@@ -1,135 +1,160 @@
-/* Pictures as a phone takes them on a job: flat, a little askew, lit from one side. */
+import { ofWords, picture, screw, text } from './photoFrame';
 
-const WIDTH = 1120;
-const HEIGHT = 840;
-
-function escaped(text: string): string {
-  return text.replaceAll('&', '&amp;').replaceAll('<', '&lt;').replaceAll('"', '&quot;');
-}
-
-function picture(background: string, body: string, turn = 0): string {
-  return `<svg xmlns="http://www.w3.org/2000/svg" width="${WIDTH}" height="${HEIGHT}" font-family="Barlow">
-  <defs>
-    <linearGradient id="wall" x1="0" y1="0" x2="1" y2="1">
-      <stop offset="0" stop-color="${background}"/><stop offset="1" stop-color="#6d7378"/>
-    </linearGradient>
-    <radialGradient id="lamp" cx="0.3" cy="0.2" r="0.9">
-      <stop offset="0" stop-color="#fff" stop-opacity="0.35"/><stop offset="1" stop-color="#000" stop-opacity="0.28"/>
-    </radialGradient>
-  </defs>
-  <rect width="${WIDTH}" height="${HEIGHT}" fill="url(#wall)"/>
-  <g transform="rotate(${turn} ${WIDTH / 2} ${HEIGHT / 2})">${body}</g>
-  <rect width="${WIDTH}" height="${HEIGHT}" fill="url(#lamp)"/>
-</svg>`;
-}
-
-interface Lettering {
-  x: number;
-  y: number;
-  size: number;
-  fill?: string;
-  bold?: boolean;
-  middle?: boolean;
-}
-
-function text(words: string, { x, y, size, fill = '#1d2326', bold, middle }: Lettering): string {
-  const weight = bold === true ? 700 : 400;
-  const anchor = middle === true ? ' text-anchor="middle"' : '';
-  return `<text x="${x}" y="${y}" font-size="${size}" font-weight="${weight}" fill="${fill}"${anchor}>${escaped(words)}</text>`;
-}
-
-function screw(x: number, y: number, turn: number): string {
-  return `<g transform="translate(${x} ${y}) rotate(${turn})"><circle r="17" fill="#9aa1a6" stroke="#5d6468" stroke-width="3"/><rect x="-13" y="-2.5" width="26" height="5" fill="#4a5054"/></g>`;
-}
-
-/** A number that is always the same for the same words. */
-function ofWords(words: string, below: number): number {
-  return [...words].reduce((sum, letter) => (sum * 31 + letter.charCodeAt(0)) % 9973, 7) % below;
-}
+/* Pictures as a phone takes them on a job: a little askew, lit from one side, never quite clean. */
 
 const PHASES: Record<string, string> = {
-  '480Y/277': '480Y/277 V   3 PH 4 W',
-  '208Y/120': '208Y/120 V   3 PH 4 W',
-  '120/240': '120/240 V   1 PH 3 W',
+  '480Y/277': '480Y/277 V  3 PH  4 W',
+  '208Y/120': '208Y/120 V  3 PH  4 W',
+  '240/120 high-leg': '240/120 V  3 PH  4 W  HIGH LEG B',
+  '120/240': '120/240 V  1 PH  3 W',
 };
+const MAKER = 'PELL HOLLOW SWITCHBOARD CO.';
+
+/** A field of the plate: what it is in small letters, and what is stamped there. */
+function plateField(label: string, value: string, x: number, y: number, width: number): string {
+  return `<rect x="${x}" y="${y}" width="${width}" height="92" fill="#c9cdca" stroke="#585f62" stroke-width="2.5"/>
+    ${text(label, { x: x + 14, y: y + 28, size: 21, fill: '#4a5154' })}
+    ${text(value, { x: x + 14, y: y + 74, size: 40, bold: true, fill: '#23282a' })}`;
+}
+
+/** Slots that let the heat out, along the top of the door. */
+function louvers(): string {
+  return Array.from(
+    { length: 9 },
+    (_, slot) =>
+      `<rect x="${236 + slot * 74}" y="34" width="52" height="13" rx="6" fill="#5f676b"/><rect x="${236 + slot * 74}" y="46" width="52" height="3" rx="1" fill="#d9dedf" opacity="0.7"/>`,
+  ).join('');
+}
 
 /** The maker's plate on a panel's door. */
 export function equipmentLabel(panel: string, system: string, siteName: string): string {
-  const lines = [
-    PHASES[system] ?? system,
-    'MAINS 225 A   60 HZ',
-    'SHORT CIRCUIT 18 kA SYM',
-    `SERIAL ${panel}-${String(4000 + ofWords(panel + siteName, 5000))}`,
-  ];
-  const body = `<rect x="150" y="130" width="820" height="580" rx="10" fill="#e4e4de" stroke="#3c4347" stroke-width="4"/>
-    <rect x="150" y="130" width="820" height="150" rx="10" fill="#22303a"/>
-    ${text(`PANEL ${panel}`, { x: 190, y: 232, size: 84, fill: '#fff', bold: true })}
-    ${lines.map((line, index) => text(line, { x: 190, y: 366 + index * 78, size: 52, bold: index === 0 })).join('')}
-    ${text(siteName, { x: 190, y: 676, size: 34, fill: '#555c60' })}
-    ${[
-      [120, 100],
-      [1000, 100],
-      [120, 740],
-      [1000, 740],
-    ]
-      .map(([x = 0, y = 0], index) => screw(x, y, index * 37))
-      .join('')}`;
-  return picture('#b9bfc2', body, ofWords(panel, 5) - 2);
+  const serial = `${panel}-${String(4000 + ofWords(panel + siteName, 5000))}`;
+  const hinge = (y: number) =>
+    `<rect x="40" y="${y}" width="30" height="120" rx="8" fill="#8d959a" stroke="#555d61" stroke-width="3"/><line x1="40" y1="${y + 40}" x2="70" y2="${y + 40}" stroke="#555d61" stroke-width="3"/><line x1="40" y1="${y + 80}" x2="70" y2="${y + 80}" stroke="#555d61" stroke-width="3"/>`;
+  const corners = [
+    [206, 148],
+    [914, 148],
+    [206, 688],
+    [914, 688],
+  ] as const;
+  const body = `<rect x="55" y="-80" width="5" height="1010" fill="#565e62"/><rect x="60" y="-80" width="4" height="1010" fill="#e4e8e9" opacity="0.8"/>
+    ${hinge(120)}${hinge(600)}${louvers()}
+    <g transform="translate(1035 420)"><circle r="50" fill="#757d81"/><circle r="42" fill="#a3abaf" stroke="#596165" stroke-width="3"/><rect x="-9" y="-34" width="18" height="68" rx="8" fill="#5b6367" transform="rotate(12)"/></g>
+    <path d="M880 735l60 22M905 728l70 30M130 640l24 60" stroke="#dfe4e5" stroke-width="2" opacity="0.55"/>
+    <g filter="url(#shadow)"><rect x="180" y="122" width="760" height="592" rx="12" fill="#d6d9d5"/></g>
+    <rect x="190" y="132" width="740" height="572" rx="8" fill="none" stroke="#6a7174" stroke-width="3"/>
+    <rect x="240" y="160" width="640" height="54" fill="#23303a"/>
+    ${text(MAKER, { x: 560, y: 198, size: 33, fill: '#e9edea', bold: true, middle: true })}
+    ${text(`PANEL ${panel}`, { x: 240, y: 298, size: 76, bold: true })}
+    ${plateField('SYSTEM', PHASES[system] ?? system, 240, 328, 640)}
+    ${plateField('MAINS', '225 A', 240, 428, 208)}${plateField('FREQUENCY', '60 Hz', 456, 428, 208)}${plateField('ENCLOSURE', 'TYPE 1', 672, 428, 208)}
+    ${plateField('SHORT CIRCUIT RATING', '18 kA SYM', 240, 528, 316)}${plateField('SERIAL', serial, 564, 528, 316)}
+    ${text(`INSTALLED FOR ${siteName.toUpperCase()}`, { x: 240, y: 668, size: 26, fill: '#4a5154' })}
+    ${corners.map(([x, y]) => `<circle cx="${x}" cy="${y}" r="11" fill="#8b9296" stroke="#4f565a" stroke-width="2.5"/><circle cx="${x - 3}" cy="${y - 3}" r="4" fill="#dfe3e4"/>`).join('')}`;
+  return picture({ wall: '#b4bbbf', dark: '#7b848a', turn: ofWords(panel, 5) - 2 }, body);
 }
 
 const LOADS = [
-  'Lighting N',
-  'Lighting S',
-  'Corridor',
-  'Stair',
-  'Rest rooms',
+  'Ltg north',
+  'Ltg south',
+  'Corridor ltg',
+  'Stair ltg',
+  'Rest rms ltg',
   'Spare',
-  'Exit lights',
+  'Exit signs',
+  'Ext. wall ltg',
+  'Storage ltg',
 ];
+const ROWS = 11;
+const lineAt = (row: number) => 260 + row * 45;
 
-/** The card inside a panel's door, with the circuit in question marked by hand. */
-export function panelSchedule(panel: string, circuit: string, circuits: string[]): string {
-  const listed = [...new Set([...circuits, circuit])].slice(0, 9);
-  const rows = listed.map((number, index) => {
-    const y = 300 + index * 52;
+/** Words as a hand writes them in a narrow column: never on the line twice the same way. */
+function handwritten(words: string, x: number, y: number, key: string): string {
+  const turn = (ofWords(key, 30) - 15) / 10;
+  const rise = ofWords(`${key} rise`, 7) - 3;
+  return `<g transform="translate(${x} ${y + rise}) rotate(${turn}) skewX(-9)" filter="url(#ink)">${text(words, { x: 0, y: 0, size: 29, fill: '#2c4a78' })}</g>`;
+}
+
+/** One line of the card: an odd circuit at the left, an even one at the right. */
+function scheduleRow(panel: string, row: number, first: number): string {
+  const y = lineAt(row);
+  const half = (number: number, x: number, at: number) => {
     const load = LOADS[ofWords(`${panel}${number}`, LOADS.length)] ?? '';
-    const ring =
-      number === circuit
-        ? `<ellipse cx="560" cy="${y - 14}" rx="378" ry="32" fill="none" stroke="#c2312b" stroke-width="5" transform="rotate(-1 560 ${y})"/>`
-        : '';
-    return `<line x1="180" y1="${y + 14}" x2="940" y2="${y + 14}" stroke="#b4ae9c" stroke-width="2"/>
-      ${text(number, { x: 210, y, size: 36, bold: true })}${text(load, { x: 330, y, size: 36, fill: '#27415f' })}
-      ${text('20 A', { x: 830, y, size: 32, fill: '#555c60' })}${ring}`;
-  });
-  const body = `<rect x="140" y="80" width="840" height="690" fill="#f3eedd" stroke="#8b8675" stroke-width="3"/>
-    ${text(`PANEL ${panel}   DIRECTORY`, { x: 180, y: 165, size: 54, bold: true })}
-    ${text('CKT', { x: 205, y: 232, size: 28, fill: '#7a7565' })}${text('LOAD', { x: 330, y: 232, size: 28, fill: '#7a7565' })}
-    ${rows.join('')}`;
-  return picture('#8f979c', body, 1 - ofWords(panel, 4));
+    const amperes = load === 'Spare' ? '' : '20';
+    return `${text(String(number), { x, y, size: 27, bold: true, middle: true })}
+      ${handwritten(load, at, y, `${panel}${number}`)}
+      ${text(amperes, { x: at + 226, y, size: 25, fill: '#4b4a44', middle: true })}`;
+  };
+  const odd = first + row * 2;
+  return `<line x1="150" y1="${y + 12}" x2="970" y2="${y + 12}" stroke="#b9b29d" stroke-width="2"/>
+    ${half(odd, 186, 226)}${half(odd + 1, 592, 632)}`;
+}
+
+/** Where the ring is drawn; undefined where the circuit is not on the card. */
+function ringAt(circuit: string, first: number): string {
+  const number = Number(circuit);
+  const row = Math.floor((number - first) / 2);
+  if (!Number.isInteger(number) || row < 0 || row >= ROWS) return '';
+  const x = (number - first) % 2 === 0 ? 338 : 746;
+  const y = lineAt(row) - 10;
+  return `<g filter="url(#ink)" fill="none" stroke="#b92a25" stroke-width="5" stroke-linecap="round">
+    <path d="M${x - 186} ${y + 4}C${x - 188} ${y - 34} ${x + 180} ${y - 40} ${x + 186} ${y}C${x + 188} ${y + 34} ${x - 190} ${y + 36} ${x - 192} ${y - 8}"/></g>`;
+}
+
+/** The card in the pocket of a panel's door, with the circuit in question ringed by hand. */
+export function panelSchedule(panel: string, circuit: string): string {
+  const number = Number(circuit);
+  const first = Number.isInteger(number) && number > 2 * ROWS ? 21 : 1;
+  const rows = Array.from({ length: ROWS }, (_, row) => scheduleRow(panel, row, first));
+  const rule = (x: number, width: number) =>
+    `<line x1="${x}" y1="214" x2="${x}" y2="738" stroke="#a29b86" stroke-width="${width}"/>`;
+  const body = `<rect x="-40" y="-60" width="1200" height="960" fill="#9aa2a7"/>
+    <path d="M40 40h1040v760H40z" fill="#868f95"/><path d="M40 40h1040v8H48v752h-8z" fill="#d5dadc" opacity="0.6"/>
+    <g filter="url(#shadow)"><path d="M118 64L1000 58L1004 782L122 790z" fill="#f1ebd7"/></g>
+    <path d="M118 64L1000 58L1001 100L119 108z" fill="#fff" opacity="0.35"/>
+    ${text('CIRCUIT DIRECTORY', { x: 150, y: 138, size: 34, fill: '#4b4a44', bold: true })}
+    ${text('PANEL', { x: 690, y: 136, size: 24, fill: '#6b695f' })}
+    <g transform="translate(778 138) rotate(-2) skewX(-9)" filter="url(#ink)">${text(panel, { x: 0, y: 0, size: 52, fill: '#2c4a78', bold: true })}</g>
+    <rect x="150" y="172" width="820" height="44" fill="#ddd5bd"/>
+    ${['CKT', 'LOAD', 'A'].map((word, at) => text(word, { x: [186, 300, 452][at] ?? 0, y: 203, size: 22, fill: '#5a584f', bold: true, middle: true })).join('')}
+    ${['CKT', 'LOAD', 'A'].map((word, at) => text(word, { x: [592, 706, 858][at] ?? 0, y: 203, size: 22, fill: '#5a584f', bold: true, middle: true })).join('')}
+    ${rows.join('')}${rule(212, 2)}${rule(560, 4)}${rule(618, 2)}
+    ${ringAt(circuit, first)}
+    <path d="M118 600L520 60L700 59L200 789L122 790z" fill="#fff" opacity="0.13"/>
+    <path d="M90 640L1030 634L1034 816L94 824z" fill="#dfe9ee" opacity="0.2"/><path d="M90 640L1030 634" stroke="#fff" stroke-width="4" opacity="0.55"/>`;
+  return picture({ wall: '#9aa2a7', dark: '#5d666b', turn: 1 - ofWords(panel, 4) }, body);
+}
+
+/** Painted blocks behind the box. */
+function blocks(): string {
+  const rows = [-60, 150, 360, 570, 780];
+  return rows
+    .map(
+      (y, row) =>
+        `<line x1="-60" y1="${y}" x2="1180" y2="${y}" stroke="#a9a497" stroke-width="7"/><line x1="-60" y1="${y + 6}" x2="1180" y2="${y + 6}" stroke="#f3f0e6" stroke-width="3"/>
+         ${[0, 1, 2, 3].map((column) => `<line x1="${(row % 2 === 0 ? 40 : 240) + column * 410}" y1="${y}" x2="${(row % 2 === 0 ? 40 : 240) + column * 410}" y2="${y + 210}" stroke="#b1ac9f" stroke-width="6"/>`).join('')}`,
+    )
+    .join('');
+}
+
+/** A conduit that comes from above, with its connector in the box. */
+function conduit(x: number): string {
+  return `<g filter="url(#shadow)"><rect x="${x}" y="-60" width="84" height="196" fill="url(#pipe)"/></g>
+    <rect x="${x - 16}" y="96" width="116" height="62" rx="8" fill="url(#pipe)" stroke="#666e73" stroke-width="3"/>
+    ${screw(x + 42, 126, 30, 12)}`;
 }
 
 /** A steel box cover with the circuit written on it by marker. */
 export function boxCover(circuit: string): string {
-  const body = `<rect x="60" y="-40" width="90" height="920" fill="#c7ccd0" stroke="#70777b" stroke-width="4"/>
-    <rect x="290" y="150" width="560" height="540" rx="46" fill="#b7bec3" stroke="#6b7276" stroke-width="5"/>
-    <rect x="312" y="172" width="516" height="496" rx="34" fill="none" stroke="#d5dadd" stroke-width="3"/>
-    ${screw(370, 230, 20)}${screw(770, 610, 65)}
-    <g transform="rotate(-4 570 430)">${text(circuit, { x: 570, y: 450, size: 118, fill: '#14181a', bold: true, middle: true })}</g>`;
-  return picture('#d9d5cb', body, ofWords(circuit, 7) - 3);
-}
-
-/** The luminaire back in its place, lit. */
-export function finishedWork(equipment: string): string {
-  const tiles = Array.from({ length: 12 }, (_, index) => {
-    const [column, row] = [index % 4, Math.floor(index / 4)];
-    return `<rect x="${column * 280}" y="${row * 280}" width="276" height="276" fill="#e8e6e0" stroke="#c4c1b8" stroke-width="4"/>`;
-  });
-  const left = 280 * (1 + ofWords(equipment, 2));
-  const body = `${tiles.join('')}
-    <rect x="${left}" y="280" width="276" height="276" fill="#9fa5a8"/>
-    <rect x="${left + 14}" y="294" width="248" height="248" rx="6" fill="#fffdf2"/>
-    <circle cx="${left + 138}" cy="418" r="330" fill="#fff8d6" opacity="0.35"/>
-    <rect x="${left + 170}" y="508" width="84" height="26" fill="#fff" stroke="#888" stroke-width="2"/>
-    ${text(equipment.split(' ').at(-1) ?? '', { x: left + 212, y: 528, size: 20, middle: true })}`;
-  return picture('#d8d6cf', body, 0);
+  const size = Math.min(128, 860 / circuit.length);
+  const body = `${blocks()}${conduit(360)}${conduit(690)}
+    <g filter="url(#shadow)"><rect x="262" y="146" width="600" height="586" rx="40" fill="#a7afb4"/></g>
+    <rect x="272" y="156" width="580" height="566" rx="34" fill="url(#steel)" stroke="#6d757a" stroke-width="4"/>
+    <rect x="322" y="206" width="480" height="466" rx="26" fill="none" stroke="#8b9398" stroke-width="4"/><rect x="327" y="211" width="470" height="456" rx="23" fill="none" stroke="#e6eaec" stroke-width="3" opacity="0.8"/>
+    ${screw(300, 186, 20, 19)}${screw(824, 690, 65, 19)}
+    <circle cx="824" cy="186" r="15" fill="#596165"/><circle cx="300" cy="690" r="15" fill="#596165"/>
+    <path d="M330 640c60-18 90 8 150-6M700 240c30 14 50 8 78 16" stroke="#e8ecee" stroke-width="3" fill="none" opacity="0.6"/>
+    <g transform="rotate(-5 562 440) skewX(-6)" filter="url(#marker)">${text(circuit, { x: 610, y: 474, size, fill: '#101415', bold: true, middle: true })}</g>
+    <g filter="url(#marker)"><path d="M400 540c90-14 220-22 330-20" stroke="#101415" stroke-width="9" fill="none" stroke-linecap="round"/></g>`;
+  return picture({ wall: '#dcd8cc', dark: '#9c978a', turn: ofWords(circuit, 5) - 2 }, body);
 }

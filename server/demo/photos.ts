@@ -6,7 +6,8 @@ import path from 'node:path';
 import { json } from 'node:stream/consumers';
 import type { Attachment } from '@/shared/record';
 import type { WorksheetContent } from '@/shared/worksheet';
-import { boxCover, equipmentLabel, finishedWork, panelSchedule } from './drawings';
+import { finishedWork } from './drawFinishedWork';
+import { boxCover, equipmentLabel, panelSchedule } from './drawings';
 import type { DemoPhoto } from './scenarios';
 
 const SCRIPT = path.join(import.meta.dirname, 'drawPhotos.mjs');
@@ -14,7 +15,6 @@ const SCRIPT = path.join(import.meta.dirname, 'drawPhotos.mjs');
 interface Subject {
   content: WorksheetContent;
   siteName: string;
-  circuits: string[];
 }
 
 type Section = Attachment['section'];
@@ -33,8 +33,8 @@ const PHOTOS: Record<
   schedule: {
     section: 'supply',
     caption: ({ content }) => `Schedule inside the door of ${content.supply?.panel ?? 'the panel'}`,
-    draw: ({ content, circuits }) =>
-      panelSchedule(content.supply?.panel ?? '', content.supply?.circuit ?? '', circuits),
+    draw: ({ content }) =>
+      panelSchedule(content.supply?.panel ?? '', content.supply?.circuit ?? ''),
   },
   cover: {
     section: 'supply',

@@ -188,14 +188,12 @@ export interface Photography {
 }
 
 /** The photos that a scenario asks for, still to be drawn. */
-export function drawingsOf({ photos, demo, site }: DemoScenario, sites: Cast['site'][]) {
+export function drawingsOf({ photos, demo, site }: DemoScenario) {
   const content: WorksheetContent = {
     job: demo.job,
     supply: { system: '480Y/277', panel: 'LP-2', circuit: '14', ...demo.supply },
   };
-  const panels = sites.find(({ name }) => name === site)?.panels ?? [];
-  const circuits = panels.find(({ name }) => name === content.supply?.panel)?.circuits ?? [];
-  return (photos ?? []).map((kind) => demoPhoto(kind, { content, siteName: site, circuits }));
+  return (photos ?? []).map((kind) => demoPhoto(kind, { content, siteName: site }));
 }
 
 async function attach(step: Step, photography: Photography, ofCloseOut: boolean): Promise<void> {

@@ -98,14 +98,12 @@ async function forgetMails(): Promise<void> {
 }
 
 /** Draws every photo of the scenarios while the first worksheets are made. */
-async function photographyOf(scenarios: readonly DemoScenario[]): Promise<Photography> {
-  const sites = await Site.findAll();
-  const of = (scenario: DemoScenario) => drawingsOf(scenario, sites);
-  const drawn = drawPhotos(scenarios.flatMap(of).map(({ svg }) => svg));
+function photographyOf(scenarios: readonly DemoScenario[]): Photography {
+  const drawn = drawPhotos(scenarios.flatMap(drawingsOf).map(({ svg }) => svg));
   // Awaited where the first photo is needed; until then a fault has nobody to hear it.
   drawn.catch(() => undefined);
   return {
-    of,
+    of: drawingsOf,
     async jpeg({ svg }: DrawnPhoto) {
       const photo = (await drawn).get(svg);
       if (photo === undefined) throw new Error('A photo of the demo was not drawn.');
@@ -125,7 +123,7 @@ export function growDemo(extent: DemoExtent): Promise<void> {
   return withClock((now) =>
     withQuickPins(async () => {
       const timeline = await demoTimeline(await actor('safety'), now);
-      const photography = await photographyOf(scenarios);
+      const photography = photographyOf(scenarios);
       let isPast = true;
       for (const scenario of scenarios) {
         const { site, daysAgo } = scenario;

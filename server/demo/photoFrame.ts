@@ -1,0 +1,85 @@
+/* What every picture of the demo shares: its size, its light, its lettering. */
+
+const WIDTH = 1120;
+const HEIGHT = 840;
+
+function escaped(words: string): string {
+  return words.replaceAll('&', '&amp;').replaceAll('<', '&lt;').replaceAll('"', '&quot;');
+}
+
+const FILTERS = `
+  <filter id="shadow" x="-20%" y="-20%" width="150%" height="150%">
+    <feGaussianBlur in="SourceAlpha" stdDeviation="9"/><feOffset dx="10" dy="14" result="cast"/>
+    <feComponentTransfer in="cast" result="soft"><feFuncA type="linear" slope="0.42"/></feComponentTransfer>
+    <feMerge><feMergeNode in="soft"/><feMergeNode in="SourceGraphic"/></feMerge>
+  </filter>
+  <filter id="ink" x="-10%" y="-30%" width="120%" height="160%">
+    <feTurbulence type="fractalNoise" baseFrequency="0.06" numOctaves="2" seed="4" result="noise"/>
+    <feDisplacementMap in="SourceGraphic" in2="noise" scale="4"/>
+  </filter>
+  <filter id="marker" x="-10%" y="-30%" width="120%" height="160%">
+    <feTurbulence type="fractalNoise" baseFrequency="0.03" numOctaves="3" seed="9" result="noise"/>
+    <feDisplacementMap in="SourceGraphic" in2="noise" scale="11"/><feGaussianBlur stdDeviation="0.8"/>
+  </filter>
+  <filter id="glow" x="-80%" y="-80%" width="260%" height="260%"><feGaussianBlur stdDeviation="46"/></filter>
+  <filter id="soft" x="-20%" y="-20%" width="140%" height="140%"><feGaussianBlur stdDeviation="5"/></filter>
+  <filter id="grain" x="0" y="0" width="100%" height="100%">
+    <feTurbulence type="fractalNoise" baseFrequency="0.8" numOctaves="2" seed="2"/>
+    <feColorMatrix values="0 0 0 0 0.5  0 0 0 0 0.5  0 0 0 0 0.5  0.9 0 0 0 -0.34"/>
+  </filter>`;
+
+const PAINTS = `
+  <linearGradient id="pipe"><stop offset="0" stop-color="#7d858a"/><stop offset="0.3" stop-color="#e6eaec"/><stop offset="1" stop-color="#8a9297"/></linearGradient>
+  <linearGradient id="steel" x1="0" y1="0" x2="1" y2="1"><stop offset="0" stop-color="#d3d9dc"/><stop offset="0.55" stop-color="#b4bcc1"/><stop offset="1" stop-color="#98a1a6"/></linearGradient>
+  <radialGradient id="vignette" cx="0.42" cy="0.34" r="0.85">
+    <stop offset="0" stop-color="#fff" stop-opacity="0.22"/><stop offset="0.45" stop-color="#fff" stop-opacity="0"/>
+    <stop offset="1" stop-color="#000" stop-opacity="0.42"/>
+  </radialGradient>`;
+
+interface Light {
+  /** What lies behind, and how dark it grows away from the light. */
+  wall: string;
+  dark: string;
+  /** Degrees that the phone was held askew. */
+  turn: number;
+}
+
+/** Puts a drawing in front of a wall, turns it, and lays light and grain over it. */
+export function picture({ wall, dark, turn }: Light, body: string): string {
+  return `<svg xmlns="http://www.w3.org/2000/svg" width="${WIDTH}" height="${HEIGHT}" font-family="Barlow">
+  <defs>${FILTERS}${PAINTS}
+    <linearGradient id="wall" x1="0" y1="0" x2="1" y2="1"><stop offset="0" stop-color="${wall}"/><stop offset="1" stop-color="${dark}"/></linearGradient>
+  </defs>
+  <rect width="${WIDTH}" height="${HEIGHT}" fill="url(#wall)"/>
+  <g transform="rotate(${turn} ${WIDTH / 2} ${HEIGHT / 2})">${body}</g>
+  <rect width="${WIDTH}" height="${HEIGHT}" fill="url(#vignette)"/>
+  <rect width="${WIDTH}" height="${HEIGHT}" filter="url(#grain)" opacity="0.22"/>
+</svg>`;
+}
+
+interface Lettering {
+  x: number;
+  y: number;
+  size: number;
+  fill?: string;
+  bold?: boolean;
+  middle?: boolean;
+}
+
+export function text(
+  words: string,
+  { x, y, size, fill = '#1d2326', bold, middle }: Lettering,
+): string {
+  const weight = bold === true ? 700 : 400;
+  const anchor = middle === true ? ' text-anchor="middle"' : '';
+  return `<text x="${x}" y="${y}" font-size="${size}" font-weight="${weight}" fill="${fill}"${anchor}>${escaped(words)}</text>`;
+}
+
+export function screw(x: number, y: number, turn: number, radius: number): string {
+  return `<g transform="translate(${x} ${y}) rotate(${turn})"><circle cx="2" cy="3" r="${radius}" fill="#4a5155" opacity="0.5"/><circle r="${radius}" fill="#aab1b5" stroke="#5d6468" stroke-width="2.5"/><circle cx="${-radius / 4}" cy="${-radius / 4}" r="${radius / 2}" fill="#d8dddf" opacity="0.7"/><rect x="${-radius * 0.75}" y="-2.5" width="${radius * 1.5}" height="5" fill="#434a4e"/></g>`;
+}
+
+/** A number that is always the same for the same words. */
+export function ofWords(words: string, below: number): number {
+  return [...words].reduce((sum, letter) => (sum * 31 + letter.charCodeAt(0)) % 9973, 7) % below;
+}
