@@ -20,6 +20,8 @@ export type GoodsState = (typeof GOODS_STATES)[number];
  */
 export function goodsState(item: RubberGoods, today: string): GoodsState {
   if (item.retired) return 'retired';
+  // A failed test weighs more than a date: no new interval brings the item back.
+  if (latestTest(item)?.passed === false) return 'out';
   if (item.dueOn !== '' && item.dueOn < today) return 'overdue';
   if (!item.inTest) return 'out';
   if (daysBetween(today, item.dueOn) <= DUE_SOON_DAYS) return 'dueSoon';

@@ -141,6 +141,7 @@ function useGoodsColumns({
       head: <TimeRuler line={line} />,
       width: line.width,
       from: 700,
+      fill: true,
       cell: (item) => <TimeBar line={line} parts={goodsBar(line, item, today)} />,
     },
   ];

@@ -144,14 +144,16 @@ function useRecord({ goods, sites, todayAt, today, view, mayWrite }: RecordProps
   if (view.act === 'edit' && mayWrite) {
     return { head: { title: words.editTitle(item.serial) }, body: form(item, 'saved') };
   }
+  const isTest = view.act === 'test' && mayWrite;
+  const gloveClass = enumerations.gloveClass[item.gloveClass];
   const kind = enumerations.rubberGoodsKind[item.kind];
   const place = words.kindAndPlace(kind, siteOf(sites, item)?.name ?? '');
   const because = item.retiredBecause && enumerations.retiredBecause[item.retiredBecause];
   const under = item.size === '' ? place : words.sized(place, item.size);
   return {
     head: {
-      over: enumerations.gloveClass[item.gloveClass],
-      title: view.act === 'test' && mayWrite ? words.recordTestOf(item.serial) : item.serial,
+      over: isTest ? `${item.serial}. ${gloveClass}` : gloveClass,
+      title: isTest ? words.recordTest : item.serial,
       under: item.retired ? `${under}. ${words.retiredAs(because ?? '')}` : under,
     },
     body: <GoodsPanel key={item.id} item={item} today={todayAt(item)} view={view} />,

@@ -1,10 +1,11 @@
+import { useEffect } from 'react';
 import { StyleSheet, View } from 'react-native';
 import type { ImportAnswer } from '@/shared/registerCsv';
 import { useMessages } from '../i18n/useMessages';
 import { rule, space } from '../theme/tokens';
 import { useBreakpoint } from '../theme/useBreakpoint';
 import { useTheme } from '../theme/useTheme';
-import { Table, Text } from '../ui';
+import { focusField, Table, Text, webProps } from '../ui';
 
 type Fault = ImportAnswer['errors'][number];
 type Row = ImportAnswer['rows'][number];
@@ -12,6 +13,8 @@ type Row = ImportAnswer['rows'][number];
 /** `qualifiedThrough` as it may be written too, and as it can break: `qualified through`. */
 export const columnName = (column: string) =>
   column.replace(/[A-Z]/g, (letter) => ` ${letter.toLowerCase()}`);
+
+const ID = 'csv-answer';
 
 /** Lines shown before the rest is only counted. */
 const MOST_SHOWN = 100;
@@ -148,8 +151,12 @@ export function ImportAnswerView({
   const { colors } = useTheme();
   const words = register.csv;
   const { errors, rows } = answer;
+  // It stands below the lines, often out of view: whoever pressed the button is led to it.
+  useEffect(() => {
+    focusField(ID);
+  }, [answer]);
   return (
-    <View aria-live="polite" style={styles.all}>
+    <View id={ID} {...webProps({ tabIndex: -1 })} aria-live="polite" style={styles.all}>
       {errors.length > 0 && (
         <View style={[styles.part, { borderTopColor: colors.ink }]}>
           <Text variant="section" level={2}>

@@ -177,9 +177,11 @@ export function ImportScreen({ subject, view }: Props) {
               checking={check.isPending}
             />
           </View>
-          <View style={isWide && styles.half}>
-            <Columns subject={subject} />
-          </View>
+          {isWide && (
+            <View style={styles.half}>
+              <Columns subject={subject} />
+            </View>
+          )}
         </View>
         {checked !== undefined && <ImportAnswerView answer={checked} columns={COLUMNS[subject]} />}
         {ready && (
@@ -196,6 +198,7 @@ export function ImportScreen({ subject, view }: Props) {
             onPress={handleImport}
           />
         )}
+        {!isWide && <Columns subject={subject} />}
       </View>
     </Screen>
   );

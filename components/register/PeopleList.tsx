@@ -114,6 +114,7 @@ function usePeopleColumns({ sites, today, view, sort }: Omit<Props, 'people'> & 
       head: <TimeRuler line={line} />,
       width: line.width,
       from: 760,
+      fill: true,
       cell: (person) => <TimeBar line={line} parts={barOf(line, person, today)} />,
     },
   ];

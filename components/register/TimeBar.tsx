@@ -6,7 +6,7 @@ import type { BarParts, Timeline } from './timeline';
 const BAR = 22;
 const ROW = 44;
 /** The lines of the ruler run on through the padding of a row to the next one. */
-const OVER = 12;
+const OVER = 9;
 
 const box = ([left, width]: [number, number]) => ({ left, width });
 
@@ -50,7 +50,7 @@ export function TimeBar({ line, parts, alone }: Props) {
   const reach = alone === true ? styles.within : styles.through;
   const { elapsed, rest, overdue, waiting, runsOn } = parts ?? {};
   return (
-    <View aria-hidden style={[styles.row, { width: line.width }]}>
+    <View aria-hidden style={[styles.row, alone !== true && styles.fill, { width: line.width }]}>
       {line.ticks.map(({ at }) => (
         <View key={at} style={[styles.line, reach, { left: at, backgroundColor: colors.hair }]} />
       ))}
@@ -99,11 +99,12 @@ const styles = StyleSheet.create({
   tick: { position: 'absolute', bottom: -6, width: 1 },
   month: { position: 'absolute', top: 0 },
   row: { height: ROW },
+  fill: { height: undefined, minHeight: ROW, flexGrow: 1 },
   line: { position: 'absolute', width: 1 },
   through: { top: -OVER, bottom: -OVER },
   within: { top: 4, bottom: 4 },
   today: { width: 2, marginLeft: -1 },
-  bar: { position: 'absolute', top: (ROW - BAR) / 2, height: BAR },
+  bar: { position: 'absolute', top: '50%', marginTop: -BAR / 2, height: BAR },
   hollow: { borderWidth: 2 },
   openEnd: { borderRightWidth: 0 },
   dashed: { borderWidth: 2, borderStyle: 'dashed' },

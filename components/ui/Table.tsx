@@ -14,6 +14,8 @@ export interface Column<Row> {
   /** px; without it the column takes its share of what is left. */
   width?: number;
   share?: number;
+  /** As high as the row, so that its lines meet those of the next. */
+  fill?: true;
   /** Text, or anything drawn. */
   cell: (row: Row) => ReactNode;
   /** Pressing the head sorts by it. */
@@ -81,7 +83,11 @@ function BodyRow<Row>({
     const inside = column.cell(row);
     const shown = typeof inside === 'string' ? <Text variant="note">{inside}</Text> : inside;
     return (
-      <View key={column.key} role="cell" style={[styles.cell, sized(column)]}>
+      <View
+        key={column.key}
+        role="cell"
+        style={[styles.cell, sized(column), column.fill && styles.fill]}
+      >
         {index === 0 && onOpen !== undefined ? (
           <Pressable
             role="button"
@@ -169,6 +175,7 @@ const styles = StyleSheet.create({
     paddingVertical: 6,
   },
   cell: { justifyContent: 'center' },
+  fill: { alignSelf: 'stretch' },
   sort: { flexDirection: 'row', alignItems: 'flex-end', gap: 4, minHeight: touch.least },
   opener: { minHeight: touch.least, justifyContent: 'center' },
 });

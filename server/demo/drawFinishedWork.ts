@@ -104,7 +104,7 @@ function grid(): string {
 function luminaire(near: number): string {
   const far = near + 4;
   const [x, y] = at(0, CEILING_FEET, near + 2);
-  const glow = `<ellipse cx="${x}" cy="${y}" rx="${900 / near}" ry="${420 / near}" fill="#fffbe6" opacity="0.85" filter="url(#glow)"/>`;
+  const glow = `<ellipse cx="${x}" cy="${y}" rx="${1900 / near}" ry="${900 / near}" fill="url(#glow)"/>`;
   const ribs = Array.from({ length: 9 }, (_, index) => near + 0.45 + index * 0.4)
     .map((ahead) => {
       const [left, right] = [at(-0.85, CEILING_FEET, ahead), at(0.85, CEILING_FEET, ahead)];
@@ -118,7 +118,7 @@ function luminaire(near: number): string {
 /** What the floor gives back of each luminaire. */
 function reflection(near: number): string {
   const [x, y] = at(0, 0, near + 2);
-  return `<ellipse cx="${x}" cy="${y}" rx="${900 / near}" ry="${170 / near}" fill="#fffbe6" opacity="0.3" filter="url(#glow)"/>`;
+  return `<ellipse cx="${x}" cy="${y}" rx="${1700 / near}" ry="${420 / near}" fill="url(#glow)" opacity="0.35"/>`;
 }
 
 /** The sticker with its name on the frame of the nearest one. */

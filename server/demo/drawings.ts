@@ -1,4 +1,4 @@
-import { ofWords, picture, screw, text } from './photoFrame';
+import { ofWords, picture, screw, shadow, text } from './photoFrame';
 
 /* Pictures as a phone takes them on a job: a little askew, lit from one side, never quite clean. */
 
@@ -41,7 +41,7 @@ export function equipmentLabel(panel: string, system: string, siteName: string):
     ${hinge(120)}${hinge(600)}${louvers()}
     <g transform="translate(1035 420)"><circle r="50" fill="#757d81"/><circle r="42" fill="#a3abaf" stroke="#596165" stroke-width="3"/><rect x="-9" y="-34" width="18" height="68" rx="8" fill="#5b6367" transform="rotate(12)"/></g>
     <path d="M880 735l60 22M905 728l70 30M130 640l24 60" stroke="#dfe4e5" stroke-width="2" opacity="0.55"/>
-    <g filter="url(#shadow)"><rect x="180" y="122" width="760" height="592" rx="12" fill="#d6d9d5"/></g>
+    ${shadow([180, 122, 760, 592], 12)}<rect x="180" y="122" width="760" height="592" rx="12" fill="#d6d9d5"/>
     <rect x="190" y="132" width="740" height="572" rx="8" fill="none" stroke="#6a7174" stroke-width="3"/>
     <rect x="240" y="160" width="640" height="54" fill="#23303a"/>
     ${text(MAKER, { x: 560, y: 198, size: 33, fill: '#e9edea', bold: true, middle: true })}
@@ -72,17 +72,29 @@ const lineAt = (row: number) => 260 + row * 45;
 function handwritten(words: string, x: number, y: number, key: string): string {
   const turn = (ofWords(key, 30) - 15) / 10;
   const rise = ofWords(`${key} rise`, 7) - 3;
-  return `<g transform="translate(${x} ${y + rise}) rotate(${turn}) skewX(-9)" filter="url(#ink)">${text(words, { x: 0, y: 0, size: 29, fill: '#2c4a78' })}</g>`;
+  return `<g transform="translate(${x} ${y + rise}) rotate(${turn}) skewX(-9)">${text(words, { x: 0, y: 0, size: 29, fill: '#2c4a78' })}</g>`;
 }
 
-/** One line of the card: an odd circuit at the left, an even one at the right. */
-function scheduleRow(panel: string, row: number, first: number): string {
+const loadOf = (panel: string, number: number) =>
+  LOADS[ofWords(`${panel}${number}`, LOADS.length)] ?? '';
+
+/** What a hand wrote on one line of the card: an odd circuit at the left, an even one at the right. */
+function writtenRow(panel: string, row: number, first: number): string {
+  const odd = first + row * 2;
+  return [odd, odd + 1]
+    .map((number, half) => {
+      const x = half === 0 ? 226 : 632;
+      return handwritten(loadOf(panel, number), x, lineAt(row), `${panel}${number}`);
+    })
+    .join('');
+}
+
+/** What is printed on it. */
+function printedRow(panel: string, row: number, first: number): string {
   const y = lineAt(row);
   const half = (number: number, x: number, at: number) => {
-    const load = LOADS[ofWords(`${panel}${number}`, LOADS.length)] ?? '';
-    const amperes = load === 'Spare' ? '' : '20';
+    const amperes = loadOf(panel, number) === 'Spare' ? '' : '20';
     return `${text(String(number), { x, y, size: 27, bold: true, middle: true })}
-      ${handwritten(load, at, y, `${panel}${number}`)}
       ${text(amperes, { x: at + 226, y, size: 25, fill: '#4b4a44', middle: true })}`;
   };
   const odd = first + row * 2;
@@ -97,7 +109,7 @@ function ringAt(circuit: string, first: number): string {
   if (!Number.isInteger(number) || row < 0 || row >= ROWS) return '';
   const x = (number - first) % 2 === 0 ? 338 : 746;
   const y = lineAt(row) - 10;
-  return `<g filter="url(#ink)" fill="none" stroke="#b92a25" stroke-width="5" stroke-linecap="round">
+  return `<g fill="none" stroke="#b92a25" stroke-width="5" stroke-linecap="round">
     <path d="M${x - 186} ${y + 4}C${x - 188} ${y - 34} ${x + 180} ${y - 40} ${x + 186} ${y}C${x + 188} ${y + 34} ${x - 190} ${y + 36} ${x - 192} ${y - 8}"/></g>`;
 }
 
@@ -105,21 +117,23 @@ function ringAt(circuit: string, first: number): string {
 export function panelSchedule(panel: string, circuit: string): string {
   const number = Number(circuit);
   const first = Number.isInteger(number) && number > 2 * ROWS ? 21 : 1;
-  const rows = Array.from({ length: ROWS }, (_, row) => scheduleRow(panel, row, first));
+  const rows = Array.from({ length: ROWS }, (_, row) => row);
+  const printed = rows.map((row) => printedRow(panel, row, first));
+  const written = rows.map((row) => writtenRow(panel, row, first));
   const rule = (x: number, width: number) =>
     `<line x1="${x}" y1="214" x2="${x}" y2="738" stroke="#a29b86" stroke-width="${width}"/>`;
   const body = `<rect x="-40" y="-60" width="1200" height="960" fill="#9aa2a7"/>
     <path d="M40 40h1040v760H40z" fill="#868f95"/><path d="M40 40h1040v8H48v752h-8z" fill="#d5dadc" opacity="0.6"/>
-    <g filter="url(#shadow)"><path d="M118 64L1000 58L1004 782L122 790z" fill="#f1ebd7"/></g>
+    ${shadow([118, 62, 884, 724], 2)}<path d="M118 64L1000 58L1004 782L122 790z" fill="#f1ebd7"/>
     <path d="M118 64L1000 58L1001 100L119 108z" fill="#fff" opacity="0.35"/>
     ${text('CIRCUIT DIRECTORY', { x: 150, y: 138, size: 34, fill: '#4b4a44', bold: true })}
     ${text('PANEL', { x: 690, y: 136, size: 24, fill: '#6b695f' })}
-    <g transform="translate(778 138) rotate(-2) skewX(-9)" filter="url(#ink)">${text(panel, { x: 0, y: 0, size: 52, fill: '#2c4a78', bold: true })}</g>
     <rect x="150" y="172" width="820" height="44" fill="#ddd5bd"/>
     ${['CKT', 'LOAD', 'A'].map((word, at) => text(word, { x: [186, 300, 452][at] ?? 0, y: 203, size: 22, fill: '#5a584f', bold: true, middle: true })).join('')}
     ${['CKT', 'LOAD', 'A'].map((word, at) => text(word, { x: [592, 706, 858][at] ?? 0, y: 203, size: 22, fill: '#5a584f', bold: true, middle: true })).join('')}
-    ${rows.join('')}${rule(212, 2)}${rule(560, 4)}${rule(618, 2)}
-    ${ringAt(circuit, first)}
+    ${printed.join('')}${rule(212, 2)}${rule(560, 4)}${rule(618, 2)}
+    <g>${written.join('')}${ringAt(circuit, first)}
+      <g transform="translate(778 138) rotate(-2) skewX(-9)">${text(panel, { x: 0, y: 0, size: 52, fill: '#2c4a78', bold: true })}</g></g>
     <path d="M118 600L520 60L700 59L200 789L122 790z" fill="#fff" opacity="0.13"/>
     <path d="M90 640L1030 634L1034 816L94 824z" fill="#dfe9ee" opacity="0.2"/><path d="M90 640L1030 634" stroke="#fff" stroke-width="4" opacity="0.55"/>`;
   return picture({ wall: '#9aa2a7', dark: '#5d666b', turn: 1 - ofWords(panel, 4) }, body);
@@ -139,7 +153,7 @@ function blocks(): string {
 
 /** A conduit that comes from above, with its connector in the box. */
 function conduit(x: number): string {
-  return `<g filter="url(#shadow)"><rect x="${x}" y="-60" width="84" height="196" fill="url(#pipe)"/></g>
+  return `${shadow([x, -60, 84, 196], 4)}<rect x="${x}" y="-60" width="84" height="196" fill="url(#pipe)"/>
     <rect x="${x - 16}" y="96" width="116" height="62" rx="8" fill="url(#pipe)" stroke="#666e73" stroke-width="3"/>
     ${screw(x + 42, 126, 30, 12)}`;
 }
@@ -148,13 +162,13 @@ function conduit(x: number): string {
 export function boxCover(circuit: string): string {
   const size = Math.min(128, 860 / circuit.length);
   const body = `${blocks()}${conduit(360)}${conduit(690)}
-    <g filter="url(#shadow)"><rect x="262" y="146" width="600" height="586" rx="40" fill="#a7afb4"/></g>
+    ${shadow([262, 146, 600, 586], 40)}<rect x="262" y="146" width="600" height="586" rx="40" fill="#a7afb4"/>
     <rect x="272" y="156" width="580" height="566" rx="34" fill="url(#steel)" stroke="#6d757a" stroke-width="4"/>
     <rect x="322" y="206" width="480" height="466" rx="26" fill="none" stroke="#8b9398" stroke-width="4"/><rect x="327" y="211" width="470" height="456" rx="23" fill="none" stroke="#e6eaec" stroke-width="3" opacity="0.8"/>
     ${screw(300, 186, 20, 19)}${screw(824, 690, 65, 19)}
     <circle cx="824" cy="186" r="15" fill="#596165"/><circle cx="300" cy="690" r="15" fill="#596165"/>
     <path d="M330 640c60-18 90 8 150-6M700 240c30 14 50 8 78 16" stroke="#e8ecee" stroke-width="3" fill="none" opacity="0.6"/>
-    <g transform="rotate(-5 562 440) skewX(-6)" filter="url(#marker)">${text(circuit, { x: 610, y: 474, size, fill: '#101415', bold: true, middle: true })}</g>
-    <g filter="url(#marker)"><path d="M400 540c90-14 220-22 330-20" stroke="#101415" stroke-width="9" fill="none" stroke-linecap="round"/></g>`;
+    <g filter="url(#marker)"><g transform="rotate(-5 562 440) skewX(-6)">${text(circuit, { x: 610, y: 474, size, fill: '#101415', bold: true, middle: true })}</g>
+      <path d="M400 540c90-14 220-22 330-20" stroke="#101415" stroke-width="9" fill="none" stroke-linecap="round"/></g>`;
   return picture({ wall: '#dcd8cc', dark: '#9c978a', turn: ofWords(circuit, 5) - 2 }, body);
 }

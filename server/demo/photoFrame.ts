@@ -7,30 +7,18 @@ function escaped(words: string): string {
   return words.replaceAll('&', '&amp;').replaceAll('<', '&lt;').replaceAll('"', '&quot;');
 }
 
+/** A filter costs ten times what the drawing does: only the marker has one. */
 const FILTERS = `
-  <filter id="shadow" x="-20%" y="-20%" width="150%" height="150%">
-    <feGaussianBlur in="SourceAlpha" stdDeviation="9"/><feOffset dx="10" dy="14" result="cast"/>
-    <feComponentTransfer in="cast" result="soft"><feFuncA type="linear" slope="0.42"/></feComponentTransfer>
-    <feMerge><feMergeNode in="soft"/><feMergeNode in="SourceGraphic"/></feMerge>
+  <filter id="marker" x="-4%" y="-8%" width="108%" height="116%">
+    <feTurbulence type="fractalNoise" baseFrequency="0.04" numOctaves="1" seed="9" result="noise"/>
+    <feDisplacementMap in="SourceGraphic" in2="noise" scale="11"/>
   </filter>
-  <filter id="ink" x="-10%" y="-30%" width="120%" height="160%">
-    <feTurbulence type="fractalNoise" baseFrequency="0.06" numOctaves="2" seed="4" result="noise"/>
-    <feDisplacementMap in="SourceGraphic" in2="noise" scale="4"/>
-  </filter>
-  <filter id="marker" x="-10%" y="-30%" width="120%" height="160%">
-    <feTurbulence type="fractalNoise" baseFrequency="0.03" numOctaves="3" seed="9" result="noise"/>
-    <feDisplacementMap in="SourceGraphic" in2="noise" scale="11"/><feGaussianBlur stdDeviation="0.8"/>
-  </filter>
-  <filter id="glow" x="-80%" y="-80%" width="260%" height="260%"><feGaussianBlur stdDeviation="46"/></filter>
-  <filter id="soft" x="-20%" y="-20%" width="140%" height="140%"><feGaussianBlur stdDeviation="5"/></filter>
-  <filter id="grain" x="0" y="0" width="100%" height="100%">
-    <feTurbulence type="fractalNoise" baseFrequency="0.8" numOctaves="2" seed="2"/>
-    <feColorMatrix values="0 0 0 0 0.5  0 0 0 0 0.5  0 0 0 0 0.5  0.9 0 0 0 -0.34"/>
-  </filter>`;
+`;
 
 const PAINTS = `
   <linearGradient id="pipe"><stop offset="0" stop-color="#7d858a"/><stop offset="0.3" stop-color="#e6eaec"/><stop offset="1" stop-color="#8a9297"/></linearGradient>
   <linearGradient id="steel" x1="0" y1="0" x2="1" y2="1"><stop offset="0" stop-color="#d3d9dc"/><stop offset="0.55" stop-color="#b4bcc1"/><stop offset="1" stop-color="#98a1a6"/></linearGradient>
+  <radialGradient id="glow"><stop offset="0" stop-color="#fffbe6" stop-opacity="0.9"/><stop offset="0.45" stop-color="#fffbe6" stop-opacity="0.45"/><stop offset="1" stop-color="#fffbe6" stop-opacity="0"/></radialGradient>
   <radialGradient id="vignette" cx="0.42" cy="0.34" r="0.85">
     <stop offset="0" stop-color="#fff" stop-opacity="0.22"/><stop offset="0.45" stop-color="#fff" stop-opacity="0"/>
     <stop offset="1" stop-color="#000" stop-opacity="0.42"/>
@@ -44,7 +32,7 @@ interface Light {
   turn: number;
 }
 
-/** Puts a drawing in front of a wall, turns it, and lays light and grain over it. */
+/** Puts a drawing in front of a wall, turns it, and lays light over it. */
 export function picture({ wall, dark, turn }: Light, body: string): string {
   return `<svg xmlns="http://www.w3.org/2000/svg" width="${WIDTH}" height="${HEIGHT}" font-family="Barlow">
   <defs>${FILTERS}${PAINTS}
@@ -53,7 +41,6 @@ export function picture({ wall, dark, turn }: Light, body: string): string {
   <rect width="${WIDTH}" height="${HEIGHT}" fill="url(#wall)"/>
   <g transform="rotate(${turn} ${WIDTH / 2} ${HEIGHT / 2})">${body}</g>
   <rect width="${WIDTH}" height="${HEIGHT}" fill="url(#vignette)"/>
-  <rect width="${WIDTH}" height="${HEIGHT}" filter="url(#grain)" opacity="0.22"/>
 </svg>`;
 }
 
@@ -82,4 +69,16 @@ export function screw(x: number, y: number, turn: number, radius: number): strin
 /** A number that is always the same for the same words. */
 export function ofWords(words: string, below: number): number {
   return [...words].reduce((sum, letter) => (sum * 31 + letter.charCodeAt(0)) % 9973, 7) % below;
+}
+
+type Box = readonly [x: number, y: number, width: number, height: number];
+
+/** What a rectangle throws on the wall behind it, softer outward. */
+export function shadow([x, y, width, height]: Box, round: number): string {
+  return [18, 14, 10, 6, 2]
+    .map(
+      (out) =>
+        `<rect x="${x + 10 - out / 2}" y="${y + 14 - out / 2}" width="${width + out}" height="${height + out}" rx="${round + out / 2}" opacity="0.09"/>`,
+    )
+    .join('');
 }

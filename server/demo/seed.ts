@@ -152,6 +152,15 @@ const OTHERS: DemoPerson[] = [
 /** Everyone of the invented company. */
 export const DEMO_PEOPLE: readonly DemoPerson[] = [...DEMO_ACCOUNTS, ...OTHERS];
 
+/** Somebody new, whose invitation is out: no password, so no published one either. */
+export const DEMO_INVITED = {
+  name: 'Delphine Arrowsmith',
+  email: 'delphine@wideberth.example',
+  role: 'helper',
+  sites: [0, 3],
+  invitedDaysAgo: 1,
+} as const;
+
 /** True where the database holds accounts whose passwords everybody knows. */
 export async function hasDemo(): Promise<boolean> {
   return (await User.count({ where: { demo: true } })) > 0;

@@ -3,12 +3,12 @@ import type { CurrentUser } from '../currentUser';
 import { RubberGoods } from '../models/RubberGoods';
 import { Site } from '../models/Site';
 import { createRubberGoods, updateRubberGoods } from '../services/saveRubberGoods';
-import { updateUser } from '../services/saveUser';
+import { createUser, updateUser } from '../services/saveUser';
 import { dateOf, dayFrom } from './days';
 import { DEMO_SITES } from './register';
 import { DEMO_LABORATORY, DEMO_RUBBER_GOODS } from './rubberGoods';
 import type { DemoRubberGoods } from './rubberGoods';
-import { DEMO_PEOPLE, demoUser } from './seed';
+import { DEMO_INVITED, DEMO_PEOPLE, demoUser } from './seed';
 
 interface Act {
   at: Date;
@@ -54,6 +54,16 @@ function actsOf(item: DemoRubberGoods, siteId: string, safety: CurrentUser, now:
   ];
 }
 
+async function invitation(safety: CurrentUser, now: Date): Promise<Act> {
+  const { name, email, role, sites, invitedDaysAgo } = DEMO_INVITED;
+  const names = sites.map((place) => DEMO_SITES[place]?.name ?? '');
+  const siteIds = (await Site.findAll({ where: { name: names } })).map(({ id }) => id);
+  return {
+    at: dayFrom(now, { months: 0, days: -invitedDaysAgo }),
+    run: () => createUser(safety, { name, email, role, siteIds }),
+  };
+}
+
 function retirements(safety: CurrentUser, now: Date): Act[] {
   return DEMO_PEOPLE.flatMap(({ email, retiredMonths }) =>
     retiredMonths === undefined
@@ -77,6 +87,7 @@ export async function demoTimeline(safety: CurrentUser, now: Date) {
   const acts = [
     ...DEMO_RUBBER_GOODS.flatMap((item) => actsOf(item, idOf(item.site) ?? '', safety, now)),
     ...retirements(safety, now),
+    await invitation(safety, now),
   ].sort((one, other) => one.at.getTime() - other.at.getTime());
   return {
     async advance(until: Date): Promise<void> {

@@ -36,11 +36,15 @@ describe('how an item stands', () => {
     ['2026-10-02', { inTest: true }, 'overdue'],
     ['2026-05-01', { inTest: false }, 'out'],
     ['2026-05-01', { inTest: false, dueOn: '', lastTestedOn: '' }, 'out'],
+    ['2026-10-02', { inTest: false, tests: [{ testedOn: '2026-09-01', passed: false }] }, 'out'],
     ['2026-05-01', { issuedOn: null }, 'inStore'],
     ['2026-10-02', { retired: true, inTest: false }, 'retired'],
-  ] as const)('on %s with %j: %s', (today, fields, state) => {
-    expect(goodsState(item(fields), today)).toBe(state);
-  });
+  ] satisfies [string, Partial<RubberGoods>, string][])(
+    'on %s with %j: %s',
+    (today, fields, state) => {
+      expect(goodsState(item(fields), today)).toBe(state);
+    },
+  );
 
   it('counts from the issue where it came after the test', () => {
     expect(intervalStart(item())).toBe('2026-04-01');

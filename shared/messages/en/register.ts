@@ -187,7 +187,6 @@ export const register = {
     outBecause: 'Last test failed',
     notIssuedYet: 'Not in test today',
     recordTest: 'Record a test',
-    recordTestOf: (serial: string) => `Record a test of ${serial}`,
     saveTest: 'Save the test',
     failedRetires: 'A failed test takes it out of use: it is retired with this reason, for good.',
     saveFailed: 'Save and retire it',

@@ -198,7 +198,6 @@ export const register: Words<typeof en> = {
     outBecause: 'No pasó la última prueba',
     notIssuedYet: 'Sin prueba vigente hoy',
     recordTest: 'Anotar una prueba',
-    recordTestOf: (serial) => `Anotar una prueba de ${serial}`,
     saveTest: 'Guardar la prueba',
     failedRetires: 'Si no pasó, sale de uso: se da de baja con este motivo, de forma definitiva.',
     saveFailed: 'Guardar y dar de baja',
