@@ -10,7 +10,7 @@ import { useUser } from '../api/session';
 import { useLocale } from '../i18n/preferences';
 import { useMessages } from '../i18n/useMessages';
 import { Button, LoadingScreen, OfflineScreen, ProblemScreen, Text } from '../ui';
-import { rubberGoodsQuery } from '../worksheet/registerQueries';
+import { FRESH, rubberGoodsQuery } from '../worksheet/registerQueries';
 import { useSitesByName } from './useSitesByName';
 import { FilterChips } from './FilterChips';
 import { GoodsForm } from './GoodsForm';
@@ -168,7 +168,7 @@ export function GoodsScreen() {
   const locale = useLocale();
   const view = useRegisterView('/rubber-goods');
   const today = useToday();
-  const list = useQuery(rubberGoodsQuery);
+  const list = useQuery({ ...rubberGoodsQuery, ...FRESH });
   const sites = useSitesByName();
   const mayWrite = useUser().role === 'safety';
   const words = register.goods;

@@ -15,6 +15,8 @@ export const columnName = (column: string) =>
   column.replace(/[A-Z]/g, (letter) => ` ${letter.toLowerCase()}`);
 
 const ID = 'csv-answer';
+/** What is brought into view of it: the first heading. */
+const LABEL = `${ID}-label`;
 
 /** Lines shown before the rest is only counted. */
 const MOST_SHOWN = 100;
@@ -159,7 +161,7 @@ export function ImportAnswerView({
     <View id={ID} {...webProps({ tabIndex: -1 })} aria-live="polite" style={styles.all}>
       {errors.length > 0 && (
         <View style={[styles.part, { borderTopColor: colors.ink }]}>
-          <Text variant="section" level={2}>
+          <Text variant="section" level={2} id={LABEL}>
             {words.badLines(errors.length)}
           </Text>
           <Text>{words.mend}</Text>
@@ -168,7 +170,7 @@ export function ImportAnswerView({
       )}
       {rows.length > 0 && (
         <View style={[styles.part, { borderTopColor: colors.ink }]}>
-          <Text variant="section" level={2}>
+          <Text variant="section" level={2} id={errors.length > 0 ? undefined : LABEL}>
             {words.rightLines(rows.length)}
           </Text>
           {errors.length === 0 && <Text>{words.allRight}</Text>}

@@ -9,7 +9,7 @@ import { apiUrl } from '../api/request';
 import { useLocale } from '../i18n/preferences';
 import { useMessages } from '../i18n/useMessages';
 import { Button, LoadingScreen, OfflineScreen, ProblemScreen, Text } from '../ui';
-import { peopleQuery } from '../worksheet/registerQueries';
+import { FRESH, peopleQuery } from '../worksheet/registerQueries';
 import { useSitesByName } from './useSitesByName';
 import { FilterChips } from './FilterChips';
 import { ImportScreen } from './ImportScreen';
@@ -165,7 +165,7 @@ export function PeopleScreen() {
   const locale = useLocale();
   const view = useRegisterView('/people');
   const today = useToday()();
-  const people = useQuery(peopleQuery);
+  const people = useQuery({ ...peopleQuery, ...FRESH });
   const sites = useSitesByName();
   const words = register.people;
   const everybody = people.data?.items ?? NOBODY;

@@ -13,7 +13,7 @@ import {
   Text,
   type Column,
 } from '../ui';
-import { sitesQuery, usePeople } from '../worksheet/registerQueries';
+import { FRESH, sitesQuery, usePeople } from '../worksheet/registerQueries';
 import { FilterChips } from './FilterChips';
 import { inOrder, sortable } from './order';
 import { PhoneRow } from './PhoneRow';
@@ -188,7 +188,7 @@ const NO_SITES: Site[] = [];
 export function SitesScreen() {
   const { register } = useMessages();
   const view = useRegisterView('/sites');
-  const list = useQuery(sitesQuery);
+  const list = useQuery({ ...sitesQuery, ...FRESH });
   const people = usePeople();
   const words = register.sites;
   const all = list.data?.items ?? NO_SITES;

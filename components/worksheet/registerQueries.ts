@@ -43,6 +43,9 @@ export const rubberGoodsQuery = queryOptions({
   staleTime: STALE_MS,
 });
 
+/** For the lists themselves: who opens one sees it as it stands now. */
+export const FRESH = { refetchOnMount: 'always' } as const;
+
 const NO_SITES: Site[] = [];
 const NO_PEOPLE: Person[] = [];
 const NO_GOODS: RubberGoods[] = [];

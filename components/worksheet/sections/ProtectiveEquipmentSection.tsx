@@ -3,8 +3,11 @@ import { StyleSheet, View } from 'react-native';
 import { GLOVE_CLASSES, type RequiredItem } from '@/hazard';
 import { itemWords } from '@/shared/messages';
 import { dateText } from '@/shared/format';
+import type { RubberGoods } from '@/shared/register';
+import { daysBetween, latestTest } from '@/shared/registerState';
 import { useLocale } from '../../i18n/preferences';
 import { useMessages } from '../../i18n/useMessages';
+import { useToday } from '../../register/useToday';
 import { space } from '../../theme/tokens';
 import { CheckRow, Citation, Select, StateMark, Text } from '../../ui';
 import { FieldCheck } from '../form/FieldCheck';
@@ -19,11 +22,27 @@ import { useRubberGoods } from '../registerQueries';
 
 const BY_HAND = 'by hand';
 
+/** Until when a pair may be worn and how long that is, or why it may not. */
+function useGloveNote() {
+  const { worksheet: words, register } = useMessages();
+  const locale = useLocale();
+  const { site } = useWorksheetForm();
+  const today = useToday()(site?.timeZone);
+  return (item: RubberGoods) => {
+    const due = dateText(locale, item.dueOn);
+    const left = daysBetween(today, item.dueOn);
+    if (item.inTest) return words.gloveDates(dateText(locale, item.lastTestedOn), due, left);
+    const failed = latestTest(item)?.passed === false;
+    if (!failed && left < 0) return words.gloveRanOut(due);
+    return failed ? register.goods.outBecause : register.goods.notIssuedYet;
+  };
+}
+
 /** The glove set from the register: class and dates come with it, and the server puts them in again. */
 function GloveChoice() {
   const words = useMessages();
-  const locale = useLocale();
   const goods = useRubberGoods();
+  const noteOf = useGloveNote();
   const { content, site } = useWorksheetForm();
   const { setValue } = useFormContext();
   const chosen = content.protectiveEquipment?.rubberGoodsId;
@@ -56,10 +75,7 @@ function GloveChoice() {
               item.serial,
               words.enumerations.gloveClass[item.gloveClass],
             ),
-            note: words.worksheet.gloveDates(
-              dateText(locale, item.lastTestedOn),
-              dateText(locale, item.dueOn),
-            ),
+            note: noteOf(item),
             icon: 'glove' as const,
             refused: !item.inTest,
           })),

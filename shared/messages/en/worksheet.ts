@@ -116,7 +116,9 @@ export const worksheet = {
   cyclesUnit: 'cycles',
 
   gloveName: (serial: string, gloveClass: string) => `${serial}, ${gloveClass}`,
-  gloveDates: (tested: string, due: string) => `Tested ${tested}, due ${due}`,
+  gloveDates: (tested: string, due: string, left: number) =>
+    `Tested ${tested}, due ${due}, ${left === 1 ? '1 day' : `${left} days`} left`,
+  gloveRanOut: (due: string) => `Ran out on ${due}`,
   glovesByHand: 'Not in the register: enter class and dates',
   requiredItems: 'Worn or at hand',
   atHand: (ready: number, all: number) => `${ready} of ${all} at hand`,

@@ -118,7 +118,9 @@ export const worksheet = {
   cyclesUnit: 'ciclos',
 
   gloveName: (serial: string, gloveClass: string) => `${serial}, ${gloveClass}`,
-  gloveDates: (tested: string, due: string) => `Probados ${tested}, vencen ${due}`,
+  gloveDates: (tested: string, due: string, left: number) =>
+    `Probados ${tested}, vencen ${due}, ${left === 1 ? 'queda 1 día' : `quedan ${left} días`}`,
+  gloveRanOut: (due: string) => `Vencieron ${due}`,
   glovesByHand: 'Fuera del registro: anotar clase y fechas',
   requiredItems: 'Puesto o a la mano',
   atHand: (ready: number, all: number) => `${ready} de ${all} a la mano`,
