@@ -101,7 +101,7 @@ const BOXES = new Set(['equipment.not-at-hand', 'crew.briefing-open']);
 function wordsOf(locale: Locale, finding: Finding): string[] {
   const { title, text } = findingWords(locale, finding, 'feet');
   const isSaid = !isUnanswered(finding) && !BOXES.has(finding.code);
-  const source = citationWords(locale, finding.citation as Citation);
+  const source = citationWords(locale, finding.citation);
   return [title, isSaid ? text : '', source].map(single).filter(Boolean);
 }
 
@@ -131,7 +131,7 @@ describe('every rule of the plan, provoked on the worksheet', () => {
       const record = await answered<WorksheetRecord>(page, '/api/worksheets', {
         content: await placed(page, content),
       });
-      const findings = record.assessment.findings as Finding[];
+      const findings = record.assessment.findings;
       findings.forEach(({ code }) => provoked.add(code));
       await page.goto(`/worksheets/${record.id}`);
       await page.getByRole('heading', { level: 2 }).first().waitFor();
