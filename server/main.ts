@@ -5,6 +5,7 @@ import { closeDatabase } from './db';
 import { env } from './env';
 import { stopBoss } from './jobs';
 import { logger } from './log';
+import { toProblem } from './problem';
 import { startWorker } from './worker';
 
 /** A client that never finishes its request does not hold up the end for longer than this. */
@@ -16,8 +17,24 @@ export interface RunningServer {
   stop(): Promise<void>;
 }
 
+/**
+ * The job queue writes some answers without waiting for them: when the database
+ * is away at that moment, the promise of one fails with nobody to hear it, and
+ * would end the process. The queue gives the job out again. Anything else ends it.
+ */
+function outliveLostConnections(): void {
+  if (process.listenerCount('unhandledRejection', onUnheard) > 0) return;
+  process.on('unhandledRejection', onUnheard);
+}
+
+function onUnheard(reason: unknown): void {
+  if (toProblem(reason)?.problem !== 'unavailable') throw reason;
+  logger.warn({ reason: String(reason) }, 'the database was away');
+}
+
 /** Listens on HOST and PORT; with PORT 0 on a free one. */
 export async function startServer(): Promise<RunningServer> {
+  outliveLostConnections();
   const server = createServer(buildApp());
   await new Promise<void>((resolve, reject) => {
     server.once('error', reject);

@@ -116,12 +116,16 @@ function databaseProblem(error: object): Problem | null {
   return stateProblem(cause);
 }
 
+/** What `pg` says, without a code, of a connection that ended or never came to be. */
+const LOST_CONNECTION =
+  /^(timeout exceeded|Connection terminated|Client has encountered a connection error|Client was closed)/;
+
 function stateProblem(cause: object): Problem | null {
   const code = 'code' in cause && typeof cause.code === 'string' ? cause.code : '';
   if (/^(ECONNREFUSED|ECONNRESET|ENOENT|ETIMEDOUT|EPIPE)$/.test(code) && 'syscall' in cause) {
     return code === 'ENOENT' ? null : unavailable();
   }
-  if (cause instanceof Error && /^(timeout exceeded|Connection terminated)/.test(cause.message)) {
+  if (cause instanceof Error && LOST_CONNECTION.test(cause.message)) {
     return unavailable();
   }
   if (!/^[0-9A-Z]{5}$/.test(code)) return null;

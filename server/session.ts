@@ -31,19 +31,32 @@ const onLoopback = isLoopback(new URL(publicUrl()).hostname);
 const mark = createHash('sha256').update(env.SESSION_SECRET).digest('hex').slice(0, 8);
 export const COOKIE_NAME = onLoopback ? `wideberth-${mark}` : '__Host-wideberth';
 
+function sessionStore(): session.Store {
+  const PgStore = connectPgSimple(session);
+  const store = new PgStore({
+    pool,
+    tableName: 'session',
+    ttl: IDLE_MILLISECONDS / 1000,
+    pruneSessionInterval: env.NODE_ENV === 'test' ? false : 15 * 60,
+    errorLog: (message: unknown) => logger.warn({ message: String(message) }, 'session store'),
+  });
+  const touch = store.touch.bind(store);
+  // The visit is noted while the answer goes out. When that fails the answer is still right, and must not be cut off.
+  store.touch = (sessionId, visited, done) => {
+    touch(sessionId, visited, (error?: unknown) => {
+      if (error instanceof Error) logger.warn({ message: error.message }, 'a visit was not noted');
+      done?.();
+    });
+  };
+  return store;
+}
+
 /** Sessions in PostgreSQL: any process answers for any of them. */
 export function sessionMiddleware(): RequestHandler {
-  const PgStore = connectPgSimple(session);
   return session({
     name: COOKIE_NAME,
     secret: env.SESSION_SECRET,
-    store: new PgStore({
-      pool,
-      tableName: 'session',
-      ttl: IDLE_MILLISECONDS / 1000,
-      pruneSessionInterval: env.NODE_ENV === 'test' ? false : 15 * 60,
-      errorLog: (message: unknown) => logger.warn({ message: String(message) }, 'session store'),
-    }),
+    store: sessionStore(),
     resave: false,
     saveUninitialized: false,
     rolling: true,

@@ -13,12 +13,16 @@ export const handlers: Record<Queue, (data: object) => Promise<unknown>> = {
   nightly: () => runNightly(),
 };
 
+/** Jobs in hand at once. Many mails wait after the mail server was away; it sees this many connections. */
+const BATCH: Record<Queue, number> = { mail: 5, 'expire-worksheets': 1, nightly: 1 };
+
 /** Takes jobs until the process ends. */
 export async function startWorker(): Promise<void> {
   await startBoss();
   for (const queue of Object.keys(handlers) as Queue[]) {
-    await boss.work<object>(queue, { pollingIntervalSeconds: 1 }, async (jobs) => {
-      for (const { id, data } of jobs) await run(queue, id, data);
+    const options = { pollingIntervalSeconds: 0.5, batchSize: BATCH[queue] };
+    await boss.work<object>(queue, options, async (jobs) => {
+      await Promise.all(jobs.map(({ id, data }) => run(queue, id, data)));
     });
   }
   await boss.schedule('expire-worksheets', '* * * * *');
@@ -29,9 +33,9 @@ async function run(queue: Queue, id: string, data: object): Promise<void> {
   try {
     await handlers[queue](data);
   } catch (error) {
-    // The queue keeps the job and tries again; the log says that it had to.
+    // The queue keeps the job and tries again; the log says that it had to. The others of its batch are done.
     const { name, message } = error instanceof Error ? error : new Error(String(error));
     logger.warn({ queue, job: id, name, message }, 'a job failed');
-    throw error;
+    await boss.fail(queue, id, { name, message });
   }
 }

@@ -158,13 +158,11 @@ function parts(locale: Locale, at: Date, options: Intl.DateTimeFormatOptions): P
 
 /** A calendar date, `YYYY-MM-DD`: `2 Jul 2026`. */
 export function dateText(locale: Locale, date: string): string {
-  const at = new Date(`${date}T12:00:00Z`);
-  const p = parts(locale, at, {
-    timeZone: 'UTC',
-    day: 'numeric',
-    month: 'short',
-    year: 'numeric',
-  });
+  return dateIn(locale, new Date(`${date}T12:00:00Z`), 'UTC');
+}
+
+function dateIn(locale: Locale, at: Date, timeZone: string): string {
+  const p = parts(locale, at, { timeZone, day: 'numeric', month: 'short', year: 'numeric' });
   return `${p.day}${NBSP}${p.month}${NBSP}${p.year}`;
 }
 
@@ -204,12 +202,13 @@ export function calendarDate(at: string, timeZone: string): string {
     month: '2-digit',
     year: 'numeric',
   });
-  return `${p.year}-${p.month}-${p.day}`;
+  return `${String(p.year).padStart(4, '0')}-${p.month}-${p.day}`;
 }
 
 /** Date, clock and zone of an instant: `14 Oct 2026, 13:30 CDT`. */
 export function dateTimeText(locale: Locale, at: string, timeZone: string): string {
-  const day = dateText(locale, calendarDate(at, timeZone));
+  // Not by way of `YYYY-MM-DD`: a mistyped year 2 or 10000 has no such form, and is shown as it is.
+  const day = dateIn(locale, new Date(at), timeZone);
   return `${day}, ${timeText(at, timeZone)}${NBSP}${zoneText(at, timeZone)}`;
 }
 

@@ -119,6 +119,17 @@ export function serverOptions(port: number): string[] {
   return ['-p', String(port), '-c', 'listen_addresses=127.0.0.1', '-c', 'unix_socket_directories='];
 }
 
+/** Starts PostgreSQL on a folder and waits until it answers. */
+export async function startPostgres(folder: string, port: number): Promise<void> {
+  const options = serverOptions(port).map((option) =>
+    option.endsWith('=') ? `${option}''` : option,
+  );
+  await runTool('pg_ctl', [
+    ...['start', '-w', '-s', '-t', '60', '-D', folder, '-l', path.join(folder, 'server.log')],
+    ...['-o', options.join(' ')],
+  ]);
+}
+
 /** Starts this checkout's cluster, making it at the first time. `started` is false where it ran already. */
 export async function ensureCluster(): Promise<{ cluster: Cluster; started: boolean }> {
   const folder = await clusterFolder();
@@ -131,15 +142,7 @@ export async function ensureCluster(): Promise<{ cluster: Cluster; started: bool
     await createCluster(folder, secrets);
   }
   const port = await freePort();
-  await runTool('pg_ctl', [
-    ...['start', '-w', '-s', '-t', '60', '-D', folder, '-l', path.join(folder, 'server.log')],
-    ...[
-      '-o',
-      serverOptions(port)
-        .map((option) => (option.endsWith('=') ? `${option}''` : option))
-        .join(' '),
-    ],
-  ]);
+  await startPostgres(folder, port);
   const cluster = { folder, port, secrets };
   await prepareDatabase(cluster);
   return { cluster, started: true };
@@ -166,8 +169,11 @@ export async function runningCluster(): Promise<Cluster | null> {
 }
 
 /** Ends the cluster; transactions in flight are rolled back, nothing that was committed is lost. */
-export async function stopCluster(folder: string): Promise<void> {
-  await runTool('pg_ctl', ['stop', '-w', '-s', '-m', 'fast', '-D', folder]);
+export async function stopCluster(
+  folder: string,
+  mode: 'fast' | 'immediate' = 'fast',
+): Promise<void> {
+  await runTool('pg_ctl', ['stop', '-w', '-s', '-m', mode, '-D', folder]);
 }
 
 /** How many other programs of ours still use the cluster. */

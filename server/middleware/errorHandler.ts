@@ -10,6 +10,7 @@ export function errorHandler(
   res: Response,
   next: NextFunction,
 ): void {
+  if (res.writableEnded) return afterTheAnswer(error, res);
   if (res.headersSent) return next(error);
   const problem = toProblem(error) ?? unexpected(error, res);
   // Nothing of the answer that was being prepared goes out with the problem.
@@ -21,6 +22,12 @@ export function errorHandler(
     .status(problem.status)
     .type('application/problem+json')
     .send(JSON.stringify(toProblemDocument(problem, requestIdOf(res))));
+}
+
+/** The session store may fail to note the visit once the answer is out: nobody is left to tell. */
+function afterTheAnswer(error: unknown, res: Response): void {
+  const { name, message } = error instanceof Error ? error : new Error(String(error));
+  logger.warn({ requestId: requestIdOf(res), name, message }, 'a fault after the answer');
 }
 
 function unexpected(error: unknown, res: Response): Problem {

@@ -12,13 +12,16 @@ import type { MailJob } from './queueMail';
 
 export const LINK_MILLISECONDS = 3_600_000;
 
+/** A mail server that does not speak: the job ends before the queue takes it for lost, and is tried again. */
+const PATIENCE = { connectionTimeout: 15_000, greetingTimeout: 15_000, socketTimeout: 30_000 };
+
 let transport: Transporter | undefined;
 
 /** Sends one mail of the queue. It throws where the mail server does not take it, and the queue tries again. */
 export async function sendMail(job: MailJob): Promise<void> {
   const mail = job.kind === 'text' ? job : await linkMail(job);
   if (mail === null) return;
-  transport ??= createTransport(env.SMTP_URL, { from: env.MAIL_FROM });
+  transport ??= createTransport({ url: env.SMTP_URL, ...PATIENCE }, { from: env.MAIL_FROM });
   await transport.sendMail({
     messageId: mail.messageId,
     to: mail.to,

@@ -20,8 +20,12 @@ import { asDatabaseUser, freePort } from '@/server/commands/postgresTools';
  * A PostgreSQL of the tests' own, thrown away with its data. It runs under a
  * shell that waits on a pipe from this process: when this process ends, however
  * it ends, the pipe closes and the shell takes the server and its folder away.
+ * A test may stop and start PostgreSQL on a `durable` one: what was committed stays.
  */
-export async function startTestCluster(): Promise<{ cluster: Cluster; stop: () => Promise<void> }> {
+export async function startTestCluster({ durable = false } = {}): Promise<{
+  cluster: Cluster;
+  stop: () => Promise<void>;
+}> {
   // /tmp, not $TMPDIR: the database's user must be able to enter it.
   const parent = mkdtempSync('/tmp/wideberth-test-');
   await chmod(parent, 0o755);
@@ -29,7 +33,9 @@ export async function startTestCluster(): Promise<{ cluster: Cluster; stop: () =
   const secrets = newSecrets();
   await createCluster(folder, secrets);
   const port = await freePort();
-  const unsafe = ['fsync=off', 'synchronous_commit=off', 'full_page_writes=off'];
+  // The machine itself never fails in a test; a durable cluster outlives its own processes only.
+  const unsafe = ['fsync=off', 'full_page_writes=off'];
+  if (!durable) unsafe.push('synchronous_commit=off');
   const [file, args] = asDatabaseUser('postgres', [
     ...['-D', folder, ...serverOptions(port)],
     ...unsafe.flatMap((setting) => ['-c', setting]),
@@ -37,8 +43,9 @@ export async function startTestCluster(): Promise<{ cluster: Cluster; stop: () =
   ]);
   // SIGQUIT ends PostgreSQL at once: nothing of this data is kept.
   const script = `"$@" >"${parent}/server.log" 2>&1 & server=$!
-    cat >/dev/null; kill -QUIT "$(head -n 1 "${folder}/postmaster.pid")"
-    wait $server; rm -rf "${parent}"`;
+    cat >/dev/null; running="$(head -n 1 "${folder}/postmaster.pid")"
+    kill -QUIT "$running"; wait $server
+    while kill -0 "$running" 2>/dev/null; do sleep 0.1; done; rm -rf "${parent}"`;
   const keeper = spawn('sh', ['-c', script, 'sh', file, ...args], {
     stdio: ['pipe', 'ignore', 'inherit'],
     cwd: '/',
