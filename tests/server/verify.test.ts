@@ -4,6 +4,7 @@ import supertest from 'supertest';
 import { clock } from '@/server/clock';
 import { Event } from '@/server/models/Event';
 import { Seal } from '@/server/models/Seal';
+import { eventHash } from '@/server/services/recordEvent';
 import { sealEvents } from '@/server/services/sealEvents';
 import { verifyRecord } from '@/server/services/verifyRecord';
 import type { Fault } from '@/server/services/verifyRecord';
@@ -181,6 +182,36 @@ describe('verify', () => {
       expect(what).not.toBe('');
     }
     expect((await verifyRecord()).faults).toEqual([]);
+  });
+
+  it('sees that a worksheet was taken out with everything of it, events included', async () => {
+    const closed = `(SELECT id FROM worksheets WHERE state = 'closed' LIMIT 1)`;
+    const owned = ['signatures', 'proofs', 'close_outs', 'questions', 'worksheet_revisions'];
+    const taken = [
+      ...owned.map((table) => `DELETE FROM ${table} WHERE worksheet_id = ${closed}`),
+      `DELETE FROM events WHERE subject_id = ${closed}`,
+      `DELETE FROM worksheets WHERE id = ${closed}`,
+    ];
+    const faults = await tampered(taken.join('; '));
+    expect(faults.map(({ table }) => table)).toContain('seals');
+    expect(faults.map(({ what }) => what).join()).toMatch(/covers \d+ events, \d+ are there/);
+  });
+
+  it('sees a chain that was written anew from its middle, with hashes that fit each other', async () => {
+    // As one would who knows how the hashes are made: the last event of a subject, changed and hashed again.
+    const last = await Event.findOne({
+      where: { subjectType: 'worksheet', type: 'closed' },
+      rejectOnEmpty: true,
+    });
+    const { subjectType, subjectId, revision, type, enteredById, at, previousHash } = last;
+    const actorId = company.helper.user.id;
+    const hash = eventHash({
+      ...{ seq: Number(last.seq), subjectType, subjectId, revision, type },
+      ...{ actorId, enteredById, at, payload: last.payload, previousHash },
+    });
+    const forged = `UPDATE events SET actor_id = '${actorId}', hash = '${hash}' WHERE seq = ${last.seq}`;
+    const faults = await tampered(forged);
+    expect(faults.map(({ table }) => table)).toEqual(['seals']);
   });
 
   it('sees the end of the trail cut off, also together with its seal', async () => {

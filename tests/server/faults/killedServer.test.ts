@@ -108,7 +108,8 @@ afterAll(() => server.stop());
 async function post(request: Request): Promise<void> {
   const { path, method, who, body, headers = {} } = request;
   const cookie = cookies.get(who) ?? '';
-  answers.set(request, await send(`${server.base}${path}`, { method, cookie, body, headers }));
+  const options = { method, cookie, body, headers, milliseconds: 200_000 };
+  answers.set(request, await send(`${server.base}${path}`, options));
 }
 
 /** Mixed as they would come, the same way in every run. */
@@ -166,7 +167,7 @@ async function owedMails(): Promise<string[]> {
 }
 
 // On a loaded machine the process takes its time to start and to answer.
-const PATIENT = { timeout: 240_000 };
+const PATIENT = { timeout: 300_000 };
 
 describe('a server killed in the middle of 200 saves and signatures', PATIENT, () => {
   it('has answered some of them, and is gone', async () => {

@@ -282,9 +282,9 @@ function anyRoute() {
 
 const anyRequest = () =>
   fc.oneof(
-    { weight: 50, arbitrary: assessment() },
-    { weight: 10, arbitrary: creation() },
-    { weight: 15, arbitrary: save() },
+    { weight: 60, arbitrary: assessment() },
+    { weight: 6, arbitrary: creation() },
+    { weight: 9, arbitrary: save() },
     { weight: 25, arbitrary: anyRoute() },
   );
 
