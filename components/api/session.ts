@@ -1,7 +1,7 @@
 import { queryOptions, useMutation, useQuery } from '@tanstack/react-query';
 import { createContext, useContext } from 'react';
 import { z } from 'zod';
-import { sessionSchema, type SessionUser } from '@/shared/user';
+import { sessionSchema, sessionUserSchema, type SessionUser } from '@/shared/user';
 import { isProblem } from './ApiProblem';
 import { deviceStorage } from './deviceStorage';
 import { keptCache } from './keptCache';
@@ -17,11 +17,21 @@ export interface Session {
   fromDevice?: boolean;
 }
 
+/** What the browser kept may be cut off or of an older release: then nobody is known. */
+const keptUserSchema = z
+  .string()
+  .transform((kept, context) => {
+    try {
+      return JSON.parse(kept) as unknown;
+    } catch {
+      context.addIssue({ code: 'custom', message: 'no JSON' });
+      return z.NEVER;
+    }
+  })
+  .pipe(sessionUserSchema);
+
 function keptUser(): SessionUser | undefined {
-  const kept = deviceStorage.get(KEPT_USER);
-  if (kept === null) return undefined;
-  const parsed = sessionSchema.safeParse({ user: JSON.parse(kept) as unknown });
-  return parsed.success ? parsed.data.user : undefined;
+  return keptUserSchema.safeParse(deviceStorage.get(KEPT_USER)).data;
 }
 
 function remember(user: SessionUser | null) {

@@ -131,7 +131,7 @@ function apply(root: unknown, edit: Edit, texts: string[]): unknown {
   const places = placesOf(root);
   const path = places[edit.at % places.length] ?? [];
   const last = path.at(-1);
-  if (last === undefined) return edited(root, edit, texts);
+  if (last === undefined) return structuredClone(edited(root, edit, texts));
   let parent = root as Record<Step, unknown>;
   for (const step of path.slice(0, -1)) parent = parent[step] as Record<Step, unknown>;
   if (edit.kind === 'remove') {
@@ -139,7 +139,8 @@ function apply(root: unknown, edit: Edit, texts: string[]): unknown {
     else delete parent[last];
     return root;
   }
-  const value = edited(parent[last], edit, texts);
+  // A copy: the same value may be put in twice, and must not come to hold itself.
+  const value = structuredClone(edited(parent[last], edit, texts));
   Object.defineProperty(parent, last, {
     value,
     writable: true,
