@@ -94,8 +94,10 @@ export const signSchema = z.union([
 export const proveSchema = z.strictObject({ id: id.optional(), proof: proofSchema, pin });
 export const askSchema = z.strictObject({ id: id.optional(), text: requiredText(2000) });
 export const answerSchema = z.strictObject({ id: id.optional(), text: requiredText(2000) });
-export const reasonSchema = z.strictObject({ reason: requiredText(2000) });
-export const closeSchema = z.strictObject({ closeOut: closeOutSchema, pin });
+/* The id of an act makes its repeat after a lost answer the same act. */
+export const reasonSchema = z.strictObject({ id: id.optional(), reason: requiredText(2000) });
+export const reviseSchema = z.strictObject({ id: id.optional() });
+export const closeSchema = z.strictObject({ id: id.optional(), closeOut: closeOutSchema, pin });
 export const copySchema = z.strictObject({ id: id.optional() });
 /** The fields beside the file of an upload. */
 export const attachmentInputSchema = z.strictObject({

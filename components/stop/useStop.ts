@@ -1,4 +1,5 @@
 import { useCallback, useEffect, useState } from 'react';
+import { v7 as newId } from 'uuid';
 import { z } from 'zod';
 import type { WorksheetRecord } from '@/shared/record';
 import { ApiProblem } from '../api/ApiProblem';
@@ -6,7 +7,8 @@ import { useUser } from '../api/session';
 import { keptForms } from '../drafts/keptForms';
 import { useWorksheetAct } from '../worksheet/worksheetQueries';
 
-const keptSchema = z.object({ reason: z.string() });
+const keptSchema = z.object({ id: z.uuid().default(() => newId()), reason: z.string() });
+type Kept = z.infer<typeof keptSchema>;
 
 /** Whether the server has said no; no answer, or a fault of its own, is none. */
 const isRefused = (error: unknown) => error instanceof ApiProblem && error.status < 500;
@@ -19,15 +21,15 @@ const isRefused = (error: unknown) => error instanceof ApiProblem && error.statu
 export function useStop({ id, revision }: Pick<WorksheetRecord, 'id' | 'revision'>) {
   const user = useUser();
   const { mutateAsync, isPending, error } = useWorksheetAct(id, 'stop');
-  const [waiting, setWaiting] = useState<string>();
+  const [waiting, setWaiting] = useState<Kept>();
   const key = `stop/${id}/${revision}`;
 
   const send = useCallback(
-    async (reason: string) => {
-      setWaiting(reason);
-      await keptForms.keep(user.id, key, { reason }).catch(() => undefined);
+    async (stop: Kept) => {
+      setWaiting(stop);
+      await keptForms.keep(user.id, key, stop).catch(() => undefined);
       try {
-        await mutateAsync({ reason });
+        await mutateAsync(stop);
       } catch (fault) {
         if (!isRefused(fault)) return;
       }
@@ -43,7 +45,7 @@ export function useStop({ id, revision }: Pick<WorksheetRecord, 'id' | 'revision
       .read(user.id, key)
       .then((stored) => {
         const kept = keptSchema.safeParse(stored);
-        if (current && kept.success) return send(kept.data.reason);
+        if (current && kept.success) return send(kept.data);
         return undefined;
       })
       .catch(() => undefined);
@@ -59,5 +61,10 @@ export function useStop({ id, revision }: Pick<WorksheetRecord, 'id' | 'revision
     return () => globalThis.removeEventListener?.('online', again);
   }, [waiting, send]);
 
-  return { send: (reason: string) => void send(reason), waiting, isPending, error };
+  return {
+    send: (reason: string) => void send({ id: waiting?.id ?? newId(), reason }),
+    waiting: waiting?.reason,
+    isPending,
+    error,
+  };
 }

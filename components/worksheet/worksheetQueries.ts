@@ -1,4 +1,6 @@
 import { queryOptions, useMutation, useQueryClient, type QueryClient } from '@tanstack/react-query';
+import { useState } from 'react';
+import { v7 as newId } from 'uuid';
 import { worksheetSchema, type WorksheetRecord } from '@/shared/record';
 import type { WorksheetContent } from '@/shared/worksheet';
 import { ApiProblem, isProblem } from '../api/ApiProblem';
@@ -43,13 +45,24 @@ export function useCreateWorksheet() {
   });
 }
 
-/** A POST that answers with the worksheet itself: return, stop, void, revise, close. */
+/**
+ * A POST that answers with a worksheet: return, stop, void, revise, close, copy.
+ * It keeps its id until it is answered, so that a second press after a lost
+ * answer is the same act.
+ */
 export function useWorksheetAct(worksheetId: string, act: string) {
   const client = useQueryClient();
+  const [id, setId] = useState(() => newId());
   return useMutation({
-    mutationFn: (body: unknown) =>
-      request(worksheetSchema, `/worksheets/${worksheetId}/${act}`, json('POST', body)),
-    onSuccess: (record) => storeWorksheet(client, record),
+    mutationFn: (body: object) =>
+      request(worksheetSchema, `/worksheets/${worksheetId}/${act}`, json('POST', { id, ...body })),
+    onSuccess: (record) => {
+      setId(newId());
+      return storeWorksheet(client, record);
+    },
+    onError: (error) => {
+      if (isProblem(error, 'id-taken')) setId(newId());
+    },
   });
 }
 

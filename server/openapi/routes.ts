@@ -18,6 +18,7 @@ import {
   reasonSchema,
   revisionDetailSchema,
   revisionSchema,
+  reviseSchema,
   saveWorksheetSchema,
   signatureSchema,
   signSchema,
@@ -252,7 +253,7 @@ const worksheets: ApiRoute[] = [
   act('return', 'Send back with a reason', reasonSchema),
   act('stop', 'Stop the work', reasonSchema),
   act('void', 'Withdraw', reasonSchema),
-  act('revise', 'Begin the next revision', z.strictObject({})),
+  act('revise', 'Begin the next revision', reviseSchema),
   act('close', 'Close out', closeSchema),
   act('copy', 'Copy into a new draft', copySchema, 201),
   {

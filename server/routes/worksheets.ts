@@ -10,6 +10,7 @@ import {
   createWorksheetSchema,
   proveSchema,
   reasonSchema,
+  reviseSchema,
   saveWorksheetSchema,
   signSchema,
 } from '@/shared/record';
@@ -166,14 +167,15 @@ const reasonedActs: [string, Policy, ReasonedService][] = [
 for (const [act, may, service] of reasonedActs) {
   worksheetsRouter.post(`/:worksheetId/${act}`, async (req, res) => {
     const { actor, worksheet } = await worksheetFor(req, may);
-    const { reason } = parse(reasonSchema, req.body);
-    await sendWorksheet(res, actor, await service(actor, { worksheetId: worksheet.id, reason }));
+    const body = parse(reasonSchema, req.body);
+    await sendWorksheet(res, actor, await service(actor, { worksheetId: worksheet.id, ...body }));
   });
 }
 
 worksheetsRouter.post('/:worksheetId/revise', async (req, res) => {
   const { actor, worksheet } = await worksheetFor(req, isLead);
-  await sendWorksheet(res, actor, await reviseWorksheet(actor, worksheet.id));
+  const { id } = parse(reviseSchema, req.body);
+  await sendWorksheet(res, actor, await reviseWorksheet(actor, worksheet.id, id));
 });
 
 worksheetsRouter.post('/:worksheetId/close', async (req, res) => {

@@ -1,5 +1,6 @@
 import { v7 } from 'uuid';
-import type { CloseOut } from '@/shared/worksheet';
+import type { z } from 'zod';
+import type { closeSchema } from '@/shared/record';
 import { clock } from '../clock';
 import type { CurrentUser } from '../currentUser';
 import { AttachmentRow } from '../models/AttachmentRow';
@@ -8,7 +9,7 @@ import { ProofRow } from '../models/ProofRow';
 import type { Worksheet } from '../models/Worksheet';
 import { notReady } from '../problem';
 import { assessAt } from './assessAt';
-import { actOn, changeState } from './changeState';
+import { actOnce, changeState } from './changeState';
 import { checkPin } from './checkPin';
 import { hashOf, hashOfRow } from './contentHash';
 import { currentRevision } from './readRecord';
@@ -30,10 +31,10 @@ export function closeOutHash(row: CloseOutRow, photos: readonly Photo[]): string
 export async function closeWorksheet(
   actor: CurrentUser,
   { id: worksheetId }: Worksheet,
-  { closeOut, pin }: { closeOut: CloseOut; pin: string },
+  { id, closeOut, pin }: z.infer<typeof closeSchema>,
 ): Promise<Worksheet> {
   await checkPin(actor.id, pin);
-  return actOn(worksheetId, 'close', async (worksheet, transaction) => {
+  return actOnce(actor, { worksheetId, act: 'close', id }, async (worksheet, transaction) => {
     const { content } = await currentRevision(worksheet, transaction);
     const { timeZone } = await placeOf(worksheet, transaction);
     const proof = await ProofRow.findOne({
@@ -72,6 +73,5 @@ export async function closeWorksheet(
       actorId: actor.id,
       payload: { closeOutId: row.id, closeOutHash: closeOutHash(row, photos) },
     });
-    return worksheet;
   });
 }

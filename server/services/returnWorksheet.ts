@@ -1,10 +1,10 @@
-import { actOn, changeState } from './changeState';
+import { actOnce, changeState } from './changeState';
 import type { ReasonedService } from './changeState';
 import { notify } from './notify';
 
 /** A supervisor sends it back with a reason; the lead revises it. */
-export const returnWorksheet: ReasonedService = (actor, { worksheetId, reason }) =>
-  actOn(worksheetId, 'return', async (worksheet, transaction) => {
+export const returnWorksheet: ReasonedService = (actor, { worksheetId, id, reason }) =>
+  actOnce(actor, { worksheetId, act: 'return', id }, async (worksheet, transaction) => {
     const event = await changeState(transaction, {
       worksheet,
       to: 'returned',
@@ -14,5 +14,4 @@ export const returnWorksheet: ReasonedService = (actor, { worksheetId, reason })
     });
     const recipientIds = [worksheet.leadId];
     await notify(transaction, { event, news: 'returned', worksheet, recipientIds, reason });
-    return worksheet;
   });

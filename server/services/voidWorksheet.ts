@@ -1,9 +1,9 @@
-import { actOn, changeState } from './changeState';
+import { actOnce, changeState } from './changeState';
 import type { ReasonedService } from './changeState';
 
 /** Withdraws a worksheet that never came into force. Its record stays. */
-export const voidWorksheet: ReasonedService = (actor, { worksheetId, reason }) =>
-  actOn(worksheetId, 'void', async (worksheet, transaction) => {
+export const voidWorksheet: ReasonedService = (actor, { worksheetId, id, reason }) =>
+  actOnce(actor, { worksheetId, act: 'void', id }, async (worksheet, transaction) => {
     await changeState(transaction, {
       worksheet,
       to: 'void',
@@ -11,5 +11,4 @@ export const voidWorksheet: ReasonedService = (actor, { worksheetId, reason }) =
       actorId: actor.id,
       reason,
     });
-    return worksheet;
   });

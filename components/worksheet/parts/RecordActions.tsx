@@ -1,7 +1,6 @@
 import { router } from 'expo-router';
 import { useState } from 'react';
 import { StyleSheet, View } from 'react-native';
-import { v7 as newId } from 'uuid';
 import type { WorksheetRecord } from '@/shared/record';
 import { apiUrl } from '../../api/request';
 import { useLocale } from '../../i18n/preferences';
@@ -37,7 +36,7 @@ function Again({ record }: { record: WorksheetRecord }) {
           busy={copy.isPending}
           onPress={() =>
             copy.mutate(
-              { id: newId() },
+              {},
               {
                 onSuccess: (made) =>
                   router.push({

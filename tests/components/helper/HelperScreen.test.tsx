@@ -157,21 +157,35 @@ describe('the page that a helper reads', () => {
     expect(posted[0]?.body['text']).toBe('Helper: Which panel?');
   });
 
+  const stopped = () => {
+    record = buildRecord({
+      state: 'stopped',
+      reason: { text: 'I will not do this', byName: 'Helper', at: '2026-12-01T15:00:00.000Z' },
+    });
+    return answer(200, record);
+  };
+
   it('stops the work with one more press after "I will not do this"', async () => {
     await show();
-    onPost = () => {
-      record = buildRecord({
-        state: 'stopped',
-        reason: { text: 'I will not do this', byName: 'Helper', at: '2026-12-01T15:00:00.000Z' },
-      });
-      return answer(200, record);
-    };
+    onPost = stopped;
     await user.click(screen.getByRole('button', { name: 'I will not do this' }));
     await user.click(screen.getByRole('button', { name: 'I will not do this' }));
     await screen.findByRole('region', { name: /Stopped: hands off/ });
-    expect(posted).toEqual([
-      { path: `/worksheets/${record.id}/stop`, body: { reason: 'I will not do this' } },
-    ]);
+    const body = { id: expect.any(String) as string, reason: 'I will not do this' };
+    expect(posted).toEqual([{ path: `/worksheets/${record.id}/stop`, body }]);
+  });
+
+  it('sends the same stop again after a lost answer', async () => {
+    await show();
+    onPost = () => Promise.reject(new TypeError('Failed to fetch'));
+    await user.click(screen.getByRole('button', { name: 'I will not do this' }));
+    await user.click(screen.getByRole('button', { name: 'I will not do this' }));
+    const again = await screen.findByRole('button', { name: 'Send it again' });
+    onPost = stopped;
+    await user.click(again);
+    await screen.findByRole('region', { name: /Stopped: hands off/ });
+    expect(posted).toHaveLength(2);
+    expect(posted[1]?.body).toEqual(posted[0]?.body);
   });
 
   it('signs once, however often it is pressed after a lost answer', async () => {
