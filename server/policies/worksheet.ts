@@ -37,6 +37,11 @@ export function isLead(person: Pick<Person, 'id'>, { leadId }: Pick<Seen, 'leadI
   return leadId === person.id;
 }
 
+/** A copy begins a worksheet: its lead copies it, if they may still begin one. */
+export function mayCopy(person: Person, worksheet: Seen): boolean {
+  return isLead(person, worksheet) && mayCreate(person);
+}
+
 /** The lead counts as crew also while the content does not name them. */
 export function isCrew(
   person: Pick<Person, 'id'>,

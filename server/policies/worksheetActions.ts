@@ -5,6 +5,7 @@ import {
   allows,
   isCrew,
   isLead,
+  mayCopy,
   mayCountersign,
   mayReturn,
   maySign,
@@ -59,7 +60,7 @@ export function worksheetActions(
     ['void', mayVoid(person, worksheet) && allows(state, 'void')],
     ['revise', lead && allows(state, 'revise')],
     ['close', lead && allows(state, 'close')],
-    ['copy', lead],
+    ['copy', mayCopy(person, worksheet)],
   ];
   return all.filter(([, may]) => may).map(([act]) => act);
 }

@@ -24,6 +24,7 @@ import { renderWorksheetPdf } from '../pdf/renderWorksheetPdf';
 import {
   isCrew,
   isLead,
+  mayCopy,
   mayCreate,
   mayReturn,
   maySign,
@@ -185,7 +186,7 @@ worksheetsRouter.post('/:worksheetId/close', async (req, res) => {
 });
 
 worksheetsRouter.post('/:worksheetId/copy', async (req, res) => {
-  const { actor, worksheet } = await worksheetFor(req, isLead);
+  const { actor, worksheet } = await worksheetFor(req, mayCopy);
   const { id } = parse(copySchema, req.body ?? {});
   const { worksheet: copy, created } = await copyWorksheet(actor, { worksheet, id });
   await sendWorksheet(res, actor, copy, created ? 201 : 200);

@@ -1,4 +1,5 @@
 import supertest from 'supertest';
+import type { Router } from 'express';
 import { beforeAll, expect, it } from 'vitest';
 import { buildApp } from '@/server/app';
 import { API_ROUTES } from '@/server/openapi/routes';
@@ -27,3 +28,30 @@ it.each(API_ROUTES.filter(({ open }) => open === undefined))(
     expect([answer.status, answer.body.type]).toEqual([401, '/problems/not-signed-in']);
   },
 );
+
+/** What the routers of Express list of themselves. */
+interface Listed {
+  path: string;
+  methods?: string[];
+  router?: Listing;
+}
+interface Listing {
+  listRoutes(): Listed[];
+}
+
+function answered(router: Listing, mount = ''): string[] {
+  return router.listRoutes().flatMap(({ path, methods, router: inner }) => {
+    const full = `${mount}${path === '/' ? '' : path}`;
+    if (inner !== undefined) return answered(inner, full);
+    return (methods ?? []).map((method) => `${method.toLowerCase()} ${full}`);
+  });
+}
+
+it('names every route that Express answers under /api', () => {
+  const nameless = (route: string) => route.replaceAll(/\{\w+\}|:\w+/g, '{}');
+  const found = answered(app.router as unknown as Router & Listing)
+    .filter((route) => /^(?!head)\w+ \/api\//.test(route))
+    .map(nameless);
+  const named = API_ROUTES.map(({ method, path }) => nameless(`${method} /api${path}`));
+  expect(found.sort()).toEqual(named.sort());
+});
