@@ -12,7 +12,7 @@ import { Device } from '@/server/models/Device';
 import { RubberGoods } from '@/server/models/RubberGoods';
 import type { Site } from '@/server/models/Site';
 import { SiteMember } from '@/server/models/SiteMember';
-import { User } from '@/server/models/User';
+import type { User } from '@/server/models/User';
 import { act, signatureBody } from './record';
 import type { Person } from './record';
 import { buildSite, buildUser, signIn } from './server';
