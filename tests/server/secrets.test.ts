@@ -59,7 +59,7 @@ interface Member {
 }
 
 /** Uses the link that was mailed last to this address. */
-async function useLink(email: string, choice: object): Promise<void> {
+async function followLink(email: string, choice: object): Promise<void> {
   const { token } = await linkMailedTo(email);
   tokens.push(token);
   await supertest(app).post(`/api/password-resets/${token}`).send({ password: 'x' }).expect(422);
@@ -73,7 +73,7 @@ async function invite(safety: TestAgent, role: 'lead' | 'helper' | 'supervisor')
     .post('/api/users')
     .send({ name: `A ${role}`, email, role, siteIds: [site.id], qualifiedThrough: '2030-12-31' })
     .expect(201);
-  await useLink(email, { password: PASSWORDS[role], pin: PINS[role] });
+  await followLink(email, { password: PASSWORDS[role], pin: PINS[role] });
   return { id: body.id, email, agent: await signIn(app, email, PASSWORDS[role]) };
 }
 
@@ -82,7 +82,7 @@ async function changeSecrets(lead: Member): Promise<void> {
   const wrong = { email: lead.email, password: PASSWORDS.wrong };
   await supertest(app).post('/api/session').send(wrong).expect(401);
   await supertest(app).post('/api/password-resets').send({ email: lead.email }).expect(202);
-  await useLink(lead.email, { password: PASSWORDS.reset });
+  await followLink(lead.email, { password: PASSWORDS.reset });
   lead.agent = await signIn(app, lead.email, PASSWORDS.reset);
   await keepSessionIds();
   const password = (current: string, next: unknown) =>

@@ -1,3 +1,4 @@
+import type * as Argon from '@node-rs/argon2';
 import { QueryTypes } from 'sequelize';
 import supertest from 'supertest';
 import type { Response } from 'supertest';
@@ -10,7 +11,7 @@ import { buildUser, PASSWORD } from '../support/server';
 /* How often a secret was compared with a hash: the work that the time of an answer shows. */
 const counted = vi.hoisted(() => ({ comparisons: 0 }));
 vi.mock('@node-rs/argon2', async (original) => {
-  const argon = await original<typeof import('@node-rs/argon2')>();
+  const argon = await original<typeof Argon>();
   return {
     ...argon,
     verify: (...args: Parameters<typeof argon.verify>) => {
