@@ -241,7 +241,7 @@ describe('the register', () => {
       .expect(201);
     await agent
       .patch(`/api/rubber-goods/${goods.body.id}`)
-      .send({ retired: true, retiredBecause: 'Cut in the left cuff.' })
+      .send({ retired: true, retiredBecause: 'damaged' })
       .expect(200);
     for (const [subjectId, types] of [
       [site.body.id, ['created', 'changed', 'retired']],
