@@ -1,7 +1,7 @@
 import { Router } from 'express';
 import { requestResetSchema, useResetSchema } from '@/shared/user';
 import { parse } from '../parse';
-import { finishReset, requestReset } from '../services/passwordReset';
+import { findReset, finishReset, requestReset } from '../services/passwordReset';
 import { consume, resetLimiter } from '../throttle';
 
 export const passwordResetsRouter = Router();
@@ -19,6 +19,7 @@ passwordResetsRouter.post('/', async (req, res) => {
 });
 
 passwordResetsRouter.post('/:token', async (req, res) => {
-  await finishReset(req.params.token, parse(useResetSchema, req.body));
+  const reset = await findReset(req.params.token);
+  await finishReset(reset, parse(useResetSchema, req.body));
   res.status(204).end();
 });

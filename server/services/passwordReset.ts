@@ -25,12 +25,17 @@ interface Choice {
   pin?: string | undefined;
 }
 
-/** Uses a link, once and within its hour. The PIN comes only with an invitation: a mailbox alone never yields it. */
-export async function finishReset(token: string, { password, pin }: Choice): Promise<void> {
-  refuseCommon(password);
-  const tokenHash = hashToken(token);
-  const found = await PasswordReset.findByPk(tokenHash);
+/** The link of a token, while it may be used; 404 otherwise, whatever else the request says. */
+export async function findReset(token: string): Promise<PasswordReset> {
+  const found = await PasswordReset.findByPk(hashToken(token));
   if (found === null || !isOpen(found)) throw notFound();
+  return found;
+}
+
+/** Uses a link, once and within its hour. The PIN comes only with an invitation: a mailbox alone never yields it. */
+export async function finishReset(found: PasswordReset, { password, pin }: Choice): Promise<void> {
+  refuseCommon(password);
+  const { tokenHash } = found;
   if (found.kind === 'reset' && pin !== undefined) {
     throw invalidField('#/pin', 'not-with-reset', 'A reset does not change the signing PIN.');
   }

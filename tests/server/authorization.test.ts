@@ -28,7 +28,6 @@ function address(path: string, target: Target): string {
     ...target,
     id: ofRegister[path.split('/')[1] as keyof typeof ofRegister] ?? target.goodsId,
     revision: '1',
-    token: 'no-such-token',
     number: '2026-000001',
     hash: '0'.repeat(64),
   };

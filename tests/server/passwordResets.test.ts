@@ -48,6 +48,19 @@ describe('a reset', () => {
     await use(token, { password: NEW_PASSWORD }).expect(404);
   });
 
+  it('that is not there is not found, whatever the body says', async () => {
+    const person = await buildUser();
+    await ask(person.email).expect(202);
+    const { token } = await linkMailedTo(person.email);
+    await use(token, { password: NEW_PASSWORD }).expect(204);
+    for (const gone of [token, 'no-such-token']) {
+      for (const body of [{}, { password: 'password1234' }, { password: NEW_PASSWORD, pin: 7 }]) {
+        const answer = await use(gone, body);
+        expect([answer.status, answer.body.type]).toEqual([404, '/problems/not-found']);
+      }
+    }
+  });
+
   it('keeps only a hash of the token', async () => {
     const person = await buildUser();
     await ask(person.email).expect(202);

@@ -9,6 +9,7 @@ import { ROLES } from '@/shared/user';
 import type { Role } from '@/shared/user';
 import { clock } from '@/server/clock';
 import { Device } from '@/server/models/Device';
+import { PasswordReset } from '@/server/models/PasswordReset';
 import { RubberGoods } from '@/server/models/RubberGoods';
 import type { Site } from '@/server/models/Site';
 import { SiteMember } from '@/server/models/SiteMember';
@@ -45,6 +46,8 @@ export interface Target {
   personId: string;
   siteId: string;
   goodsId: string;
+  /** Of a link to choose a password, still open. */
+  token: string;
 }
 
 export interface Asker extends Person {
@@ -155,7 +158,21 @@ async function ownedBy({ app, site, goodsId }: Places, { user, agent }: Person) 
     personId: user.id,
     siteId: site.id,
     goodsId,
+    token: await openLink(user.id),
   };
+}
+
+async function openLink(userId: string): Promise<string> {
+  const token = `${v7()}-of-${userId}`;
+  const now = clock.now();
+  await PasswordReset.create({
+    tokenHash: hashToken(token),
+    userId,
+    kind: 'reset',
+    expiresAt: new Date(now.getTime() + LINK_MILLISECONDS),
+    createdAt: now,
+  });
+  return token;
 }
 
 async function placesFor(app: Express): Promise<Places> {
