@@ -1,7 +1,7 @@
 import type { Browser, Page } from 'playwright-core';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { v7 as newId } from 'uuid';
-import { assess, type Citation, type Finding, type WorksheetContent } from '@/hazard';
+import { assess, type Finding, type WorksheetContent } from '@/hazard';
 import { rules } from '@/hazard/rules';
 import { citationWords, fieldLabel, findingWords } from '@/shared/messages';
 import type { WorksheetRecord } from '@/shared/record';
