@@ -1,6 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import { ARC_FLASH_EQUIPMENT, ARC_FLASH_TASKS, assessArcFlash } from '@/hazard';
 import type { ArcFlashEquipment } from '@/hazard';
+import { nfpa70e2024 } from '@/hazard/editions';
 
 type Arguments = Parameters<typeof assessArcFlash>[0];
 
@@ -245,6 +246,19 @@ describe('likelihood comes first', () => {
         expect(['not likely', 'ppe category']).toContain(ask({ task, equipment }).method);
       }
     }
+  });
+});
+
+describe('the row of other 600 V class equipment, NFPA 70E-2024 Table 130.7(C)(15)(a)', () => {
+  // Beside the panelboard row, whose limits are narrower, its own limits show in no answer.
+  it('holds up to 65 kA and 0.03 s at 18 in: category 2, 60 in', () => {
+    expect(nfpa70e2024.ppeCategories.rows[6]).toMatchObject({
+      faultKiloamperes: 65,
+      clearingSeconds: 0.03,
+      workingDistanceInches: 18,
+      category: 2,
+      arcFlashBoundary: at(60, 1.5),
+    });
   });
 });
 
