@@ -14,6 +14,7 @@ import { RubberGoods } from '@/server/models/RubberGoods';
 import type { Site } from '@/server/models/Site';
 import { SiteMember } from '@/server/models/SiteMember';
 import type { User } from '@/server/models/User';
+import { hashToken, LINK_MILLISECONDS } from '@/server/services/sendMail';
 import { act, signatureBody } from './record';
 import type { Person } from './record';
 import { buildSite, buildUser, signIn } from './server';

@@ -184,6 +184,7 @@ export const AUTHORIZATION: Record<string, Row> = {
   [`post ${W}/attachments`]: row(itsLead),
   'get /attachments/{attachmentId}': row(reads),
   'get /attachments/{attachmentId}/thumbnail': row(reads),
+  'patch /attachments/{attachmentId}': row(itsLead, body({ caption: 'The door.' })),
   'delete /attachments/{attachmentId}': row(itsLead),
   'get /worksheets/export.csv': row(only('safety'), () => NOTHING),
   'get /worksheets/export.zip': row(only('safety'), () => NOTHING),
@@ -191,6 +192,8 @@ export const AUTHORIZATION: Record<string, Row> = {
   ...register('/users'),
   ...register('/sites'),
   ...register('/rubber-goods'),
+  'post /users/{id}/invitation': row(registerWrites),
+  'post /rubber-goods/{id}/tests': row(registerWrites),
   ...spreadsheet('/users'),
   ...spreadsheet('/rubber-goods'),
 
