@@ -5,6 +5,8 @@
  */
 export interface KeptForms {
   read(userId: string, key: string): Promise<unknown>;
+  /** The keys of one person's forms. */
+  list(userId: string): Promise<string[]>;
   keep(userId: string, key: string, form: unknown): Promise<void>;
   forget(userId: string, key: string): Promise<void>;
 }

@@ -27,6 +27,10 @@ export const keptForms: KeptForms = {
   async read(userId, key) {
     return (await database()).get('forms', [userId, key]);
   },
+  async list(userId) {
+    const range = IDBKeyRange.bound([userId], [userId, '\uffff']);
+    return (await (await database()).getAllKeys('forms', range)).map(([, key]) => key);
+  },
   async keep(userId, key, form) {
     await (await database()).put('forms', form, [userId, key]);
   },

@@ -4,11 +4,13 @@ import type { Role, SessionUser } from '@/shared/user';
 import { PersonQueryProvider } from '../api/PersonQueryProvider';
 import { UserContext, useSession } from '../api/session';
 import { useMessages } from '../i18n/useMessages';
+import { useSendKeptStops } from '../stop/useSendKeptStops';
 import { LoadingScreen, ProblemScreen, ShellContext, type Shell } from '../ui';
 import { placesOf } from './places';
 
 function SignedInAs({ user, children }: { user: SessionUser; children: ReactNode }) {
   const { home } = useMessages();
+  useSendKeptStops(user.id);
   const shell = useMemo<Shell>(
     () => ({
       person: { name: user.name, role: home.role[user.role], href: '/account' },

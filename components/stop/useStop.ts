@@ -1,17 +1,10 @@
 import { useCallback, useEffect, useState } from 'react';
 import { v7 as newId } from 'uuid';
-import { z } from 'zod';
 import type { WorksheetRecord } from '@/shared/record';
-import { ApiProblem } from '../api/ApiProblem';
 import { useUser } from '../api/session';
 import { keptForms } from '../drafts/keptForms';
 import { useWorksheetAct } from '../worksheet/worksheetQueries';
-
-const keptSchema = z.object({ id: z.uuid().default(() => newId()), reason: z.string() });
-type Kept = z.infer<typeof keptSchema>;
-
-/** Whether the server has said no; no answer, or a fault of its own, is none. */
-const isRefused = (error: unknown) => error instanceof ApiProblem && error.status < 500;
+import { isRefused, keptStopSchema, stopKey, type KeptStop } from './keptStops';
 
 /**
  * Stops the work. Without signal the stop is kept on the device and sent as
@@ -21,11 +14,11 @@ const isRefused = (error: unknown) => error instanceof ApiProblem && error.statu
 export function useStop({ id, revision }: Pick<WorksheetRecord, 'id' | 'revision'>) {
   const user = useUser();
   const { mutateAsync, isPending, error } = useWorksheetAct(id, 'stop');
-  const [waiting, setWaiting] = useState<Kept>();
-  const key = `stop/${id}/${revision}`;
+  const [waiting, setWaiting] = useState<KeptStop>();
+  const key = stopKey(id, revision);
 
   const send = useCallback(
-    async (stop: Kept) => {
+    async (stop: KeptStop) => {
       setWaiting(stop);
       await keptForms.keep(user.id, key, stop).catch(() => undefined);
       try {
@@ -44,7 +37,7 @@ export function useStop({ id, revision }: Pick<WorksheetRecord, 'id' | 'revision
     keptForms
       .read(user.id, key)
       .then((stored) => {
-        const kept = keptSchema.safeParse(stored);
+        const kept = keptStopSchema.safeParse(stored);
         if (current && kept.success) return send(kept.data);
         return undefined;
       })

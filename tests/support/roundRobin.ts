@@ -15,7 +15,7 @@ export async function startRoundRobin(servers: readonly { base: string }[]): Pro
   const proxy = http.createServer((req, res) => {
     const index = turn++ % servers.length;
     counts[index] = (counts[index] ?? 0) + 1;
-    const target = new URL(req.url ?? '/', servers[index]?.base);
+    const target = new URL(req.url ?? '/', servers[index]?.base).href;
     const forwarded = { ...req.headers, 'x-forwarded-for': req.socket.remoteAddress };
     const out = http.request(target, { method: req.method, headers: forwarded }, (answer) => {
       res.writeHead(answer.statusCode ?? 502, answer.headers);
