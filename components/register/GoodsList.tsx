@@ -81,7 +81,7 @@ function useGoodsColumns({
     {
       key: 'class',
       label: register.gloveClass,
-      width: 110,
+      width: 104,
       cell: ({ gloveClass }) => <TwoLines {...classLines(enumerations.gloveClass[gloveClass])} />,
       ...sortable('class', sort, view),
     },

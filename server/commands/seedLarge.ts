@@ -7,7 +7,7 @@ import { v7 } from 'uuid';
 import type { WorksheetContent } from '@/shared/worksheet';
 import { command, StartFault, withDatabase } from './environment';
 import { postgresFolder } from './postgresTools';
-import { PREPARE, TAKE } from './seedLargeSql';
+import { FINISH, PREPARE, TAKE } from './seedLargeSql';
 
 /*
  * Fills the archive for measurements: `npm run seed:large -- 1000000`. Each
@@ -154,13 +154,10 @@ async function fill(input: Writable, archive: Archive): Promise<void> {
   for (let from = 0; from < archive.count; from += BATCH) {
     const size = Math.min(BATCH, archive.count - from);
     const rows = Array.from({ length: size }, (_, index) => line(from + index, archive));
-    await write(
-      input,
-      `BEGIN;\nCOPY staged FROM STDIN;\n${rows.join('\n')}\n\\.\n${TAKE}\nCOMMIT;\n`,
-    );
+    await write(input, `COPY staged FROM STDIN;\n${rows.join('\n')}\n\\.\n${TAKE}\n`);
     console.log(`${from + size} of ${archive.count} sent`);
   }
-  input.end('ANALYZE worksheets; ANALYZE worksheet_revisions; ANALYZE events;\n');
+  input.end(FINISH);
 }
 
 async function seedLarge(): Promise<void> {

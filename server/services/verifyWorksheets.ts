@@ -1,4 +1,5 @@
-import { Op } from 'sequelize';
+import { Op, QueryTypes } from 'sequelize';
+import { sequelize } from '../db';
 import type { WorksheetContent } from '@/shared/worksheet';
 import { AttachmentRow } from '../models/AttachmentRow';
 import { CloseOutRow } from '../models/CloseOutRow';
@@ -254,14 +255,21 @@ function ofWorksheet(rows: Rows, worksheetId: string): Rows {
   };
 }
 
+/** Worksheets that the trail knows of and that are not there. */
+async function missingWorksheets(): Promise<string[]> {
+  const rows = await sequelize.query<{ id: string }>(
+    `SELECT DISTINCT e.subject_id AS id FROM events e
+      WHERE e.subject_type = 'worksheet'
+        AND NOT EXISTS (SELECT 1 FROM worksheets w WHERE w.id = e.subject_id)`,
+    { type: QueryTypes.SELECT },
+  );
+  return rows.map(({ id }) => id);
+}
+
 /** Holds every worksheet's rows against its trail; answers how many of each there are. */
-export async function verifyWorksheets(
-  known: ReadonlySet<string>,
-  faults: Fault[],
-): Promise<Record<string, number>> {
+export async function verifyWorksheets(faults: Fault[]): Promise<Record<string, number>> {
   const report: Report = (table, id, what) => faults.push({ table, id, what });
   const counts = { worksheets: 0, revisions: 0, signatures: 0, proofs: 0, closeOuts: 0, photos: 0 };
-  const missing = new Set(known);
   let after = '00000000-0000-0000-0000-000000000000';
   for (;;) {
     const worksheets = await Worksheet.findAll({
@@ -274,7 +282,6 @@ export async function verifyWorksheets(
     after = last.id;
     const rows = await loadRows(worksheets.map(({ id }) => id));
     for (const worksheet of worksheets) {
-      missing.delete(worksheet.id);
       await judge(worksheet, ofWorksheet(rows, worksheet.id), report);
     }
     counts.worksheets += worksheets.length;
@@ -284,6 +291,6 @@ export async function verifyWorksheets(
     counts.closeOuts += rows.closeOuts.length;
     counts.photos += rows.attachments.length;
   }
-  for (const id of missing) report('worksheets', id, 'the row is missing');
+  for (const id of await missingWorksheets()) report('worksheets', id, 'the row is missing');
   return counts;
 }

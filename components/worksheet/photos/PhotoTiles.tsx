@@ -9,11 +9,11 @@ import { useTheme } from '../../theme/useTheme';
 import { Button, Text, TextField } from '../../ui';
 
 /** Answers with what went wrong, in words. */
-type Act<Rest extends unknown[]> = (id: string, ...rest: Rest) => Promise<string | undefined>;
+type Change<Rest extends unknown[]> = (id: string, ...rest: Rest) => Promise<string | undefined>;
 
 interface Changes {
-  onCaption: Act<[caption: string]>;
-  onRemove: Act<[]>;
+  onCaption: Change<[caption: string]>;
+  onRemove: Change<[]>;
 }
 
 interface FormProps {
@@ -48,10 +48,17 @@ function CaptionForm({ photo, onSave, onCancel }: FormProps) {
   );
 }
 
+type Act = 'caption' | 'remove' | undefined;
+
+interface ActsProps extends Changes {
+  photo: Attachment;
+  act: Act;
+  setAct: (act: Act) => void;
+}
+
 /** What can be done with a photo while nobody has signed it. */
-function Acts({ photo, onCaption, onRemove }: Changes & { photo: Attachment }) {
+function Acts({ photo, act, setAct, onCaption, onRemove }: ActsProps) {
   const { photos: words } = useMessages();
-  const [act, setAct] = useState<'caption' | 'remove'>();
   const [fault, setFault] = useState<string>();
   const caption = photo.caption === '' ? words.noCaption : photo.caption;
   const end = async (done: Promise<string | undefined>) => {
@@ -105,14 +112,15 @@ function Acts({ photo, onCaption, onRemove }: Changes & { photo: Attachment }) {
 function PhotoTile({ photo, changes }: { photo: Attachment; changes?: Changes }) {
   const { photos: words } = useMessages();
   const { colors } = useTheme();
+  const [act, setAct] = useState<Act>();
   const caption = photo.caption === '' ? words.noCaption : photo.caption;
   return (
-    <View role="listitem" style={styles.tile}>
+    <View role="listitem" style={act === 'caption' ? styles.wide : styles.tile}>
       <Pressable
         role="link"
         aria-label={words.open(caption)}
         onPress={() => openUrl(apiUrl(`/attachments/${photo.id}`))}
-        style={[styles.frame, { borderColor: colors.blue }]}
+        style={[styles.tile, styles.frame, { borderColor: colors.blue }]}
       >
         <Image
           source={{ uri: apiUrl(`/attachments/${photo.id}/thumbnail`) }}
@@ -124,7 +132,7 @@ function PhotoTile({ photo, changes }: { photo: Attachment; changes?: Changes })
       <Text variant="label" weight="400">
         {caption}
       </Text>
-      {changes !== undefined && <Acts photo={photo} {...changes} />}
+      {changes !== undefined && <Acts photo={photo} act={act} setAct={setAct} {...changes} />}
     </View>
   );
 }
@@ -150,6 +158,8 @@ export function PhotoTiles({ photos, changes }: TilesProps) {
 const styles = StyleSheet.create({
   tiles: { flexDirection: 'row', flexWrap: 'wrap', gap: space.md },
   tile: { width: 164, gap: space.xxs },
+  // The words are written over the whole width: a caption is longer than its picture.
+  wide: { width: '100%', gap: space.xs },
   frame: { borderWidth: 1.5 },
   image: { width: '100%', aspectRatio: 4 / 3 },
 });
