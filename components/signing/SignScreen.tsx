@@ -56,7 +56,13 @@ function AfterIt({ record, meaning }: { record: WorksheetRecord; meaning: OwnMea
 }
 
 /** After signing: where it stands now and whose turn it is. */
-function Signed({ record, signedAt }: { record: WorksheetRecord; signedAt: string }) {
+interface SignedProps {
+  record: WorksheetRecord;
+  meaning: OwnMeaning;
+  signedAt: string;
+}
+
+function Signed({ record, meaning, signedAt }: SignedProps) {
   const words = useMessages();
   const locale = useLocale();
   const said = words.signing;
@@ -92,6 +98,9 @@ function Signed({ record, signedAt }: { record: WorksheetRecord; signedAt: strin
           }}
         />
       ))}
+      {meaning === 'countersigned' && (
+        <Button kind="primary" large label={said.backToBoard} href="/board" />
+      )}
       <Button
         label={said.backToWorksheet}
         href={{ pathname: '/worksheets/[worksheetId]', params: at }}
@@ -185,7 +194,7 @@ function Sign({ record, meaning }: { record: WorksheetRecord; meaning: OwnMeanin
       width="helper"
     >
       {signedAt !== undefined ? (
-        <Signed record={record} signedAt={signedAt} />
+        <Signed record={record} meaning={meaning} signedAt={signedAt} />
       ) : (
         <>
           {meaning === 'countersigned' && <Exceptions record={record} />}

@@ -89,6 +89,7 @@ export const signing = {
 
   unsentTitle: 'What you typed here has not reached the server.',
   unsentBody: 'A signature holds what the server has. Go back, wait until it says Sent, then sign.',
+  backToBoard: 'Back to what waits',
   backToWorksheet: 'Back to the worksheet',
   notReadyTitle: 'Not ready to sign.',
   notReadyBody: 'These points stand. Clear them in the worksheet, then sign.',

@@ -91,6 +91,7 @@ export const signing: Words<typeof en> = {
   unsentTitle: 'Lo que escribió aquí no ha llegado al servidor.',
   unsentBody:
     'La firma ampara lo que tiene el servidor. Regrese, espere a que diga Enviado y firme entonces.',
+  backToBoard: 'Volver a lo que espera',
   backToWorksheet: 'Volver a la hoja',
   notReadyTitle: 'No está lista para firmar.',
   notReadyBody: 'Siguen estos puntos. Resuélvalos en la hoja y firme después.',
