@@ -2,9 +2,11 @@ import { z } from 'zod';
 import * as E from '@/hazard/enumerations';
 import { date, dateTime, id, text } from './text';
 
-/** A count, distance or rating: finite and not negative. */
-const figure = z.number().nonnegative();
-const volts = z.number();
+/** Beyond anything on a worksheet in its unit. A drawing to scale of 1e300 feet would never end. */
+const MOST = 1_000_000;
+/** A count, distance or rating: not negative, and of this world. */
+const figure = z.number().nonnegative().max(MOST);
+const volts = z.number().min(-MOST).max(MOST);
 const flag = z.boolean();
 const longText = text(2000);
 /** An id inside one worksheet (a source, a crew member): chosen by the form. */
