@@ -10,32 +10,50 @@ const bin = (name: string) => path.join(ROOT, 'node_modules', '.bin', name);
 
 interface Check {
   name: string;
-  run: () => Promise<void>;
+  run: (output: Output) => Promise<void>;
 }
 
-/** Runs a program with its output to the terminal; what it says when it fails is the reason. */
-function program(name: string, args: string[]): Promise<void> {
+interface Output {
+  /** What it printed, while nobody watches; shown once it has ended. */
+  text: string;
+}
+
+/** Runs a program; what it says when it fails is the reason. */
+function program(name: string, args: string[], output?: Output): Promise<void> {
   return new Promise((resolve, reject) => {
-    const child = spawn(bin(name), args, { cwd: ROOT, stdio: ['ignore', 'inherit', 'inherit'] });
+    const stdio = output === undefined ? 'inherit' : 'pipe';
+    const child = spawn(bin(name), args, { cwd: ROOT, stdio: ['ignore', stdio, stdio] });
+    for (const stream of [child.stdout, child.stderr]) {
+      stream?.setEncoding('utf8').on('data', (chunk: string) => {
+        if (output !== undefined) output.text += chunk;
+      });
+    }
     child.once('error', reject);
-    child.once('exit', (code) =>
+    child.once('close', (code) =>
       code === 0 ? resolve() : reject(new Error(`${name} ended with ${code}`)),
     );
   });
 }
 
-const CHECKS: Check[] = [
-  { name: 'format', run: () => program('prettier', ['--check', '--log-level', 'warn', '.']) },
-  { name: 'types', run: () => program('tsc', ['--noEmit']) },
-  { name: 'lint', run: () => program('eslint', ['--max-warnings', '0', '.']) },
-  {
-    name: 'build',
-    // The browser tests run on the app as it is served, not on a development server.
-    run: async () => {
-      await buildWeb();
-    },
+const FORMAT: Check = {
+  name: 'format',
+  run: (output) => program('prettier', ['--check', '--log-level', 'warn', '.'], output),
+};
+const TYPES: Check = { name: 'types', run: (output) => program('tsc', ['--noEmit'], output) };
+const LINT: Check = {
+  name: 'lint',
+  run: (output) => program('eslint', ['--max-warnings', '0', '.'], output),
+};
+const BUILD: Check = {
+  name: 'build',
+  // The browser tests run on the app as it is served, not on a development server.
+  run: async () => {
+    await buildWeb();
   },
-];
+};
+
+/** Each lane keeps one core busy: linting takes about as long as all the others together. */
+const LANES: readonly (readonly Check[])[] = [[LINT], [BUILD, FORMAT, TYPES]];
 
 const reportSchema = z.object({
   numPassedTests: z.number(),
@@ -73,21 +91,34 @@ async function runTests(filters: string[]): Promise<Totals> {
   }
 }
 
+/** Runs one check; its outcome in a line, with what it printed above it. */
+async function runCheck({ name, run }: Check): Promise<{ isPassed: boolean; outcome: string }> {
+  const started = performance.now();
+  const output: Output = { text: '' };
+  const fault = await run(output).then(
+    () => null,
+    (error: unknown) => (error instanceof Error ? error : new Error(String(error))),
+  );
+  const seconds = ((performance.now() - started) / 1000).toFixed(0);
+  if (output.text !== '') console.log(output.text.trimEnd());
+  if (fault !== null) console.error(fault.message);
+  const outcome = `${name} ${fault === null ? 'passed' : 'failed'} (${seconds} s)`;
+  console.log(outcome);
+  return { isPassed: fault === null, outcome };
+}
+
 async function runAll(): Promise<void> {
   const totals: Totals = { passed: 0, failed: 0 };
   const outcomes: string[] = [];
-  for (const { name, run } of CHECKS) {
-    const started = performance.now();
-    const fault = await run().then(
-      () => null,
-      (error: unknown) => (error instanceof Error ? error : new Error(String(error))),
-    );
-    const seconds = ((performance.now() - started) / 1000).toFixed(0);
-    if (fault !== null) console.error(fault.message);
-    totals[fault === null ? 'passed' : 'failed'] += 1;
-    outcomes.push(`${name} ${fault === null ? 'passed' : 'failed'} (${seconds} s)`);
-    console.log(outcomes.at(-1));
-  }
+  await Promise.all(
+    LANES.map(async (lane) => {
+      for (const check of lane) {
+        const { isPassed, outcome } = await runCheck(check);
+        totals[isPassed ? 'passed' : 'failed'] += 1;
+        outcomes.push(outcome);
+      }
+    }),
+  );
   const tests = await runTests(process.argv.slice(2));
   outcomes.push(`tests: ${tests.passed} passed, ${tests.failed} failed`);
   console.log(`\n${outcomes.join('\n')}`);
