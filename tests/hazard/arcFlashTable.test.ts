@@ -251,7 +251,7 @@ describe('likelihood comes first', () => {
 
 describe('the row of other 600 V class equipment, NFPA 70E-2024 Table 130.7(C)(15)(a)', () => {
   // Beside the panelboard row, whose limits are narrower, its own limits show in no answer.
-  it('holds up to 65 kA and 0.03 s at 18 in: category 2, 60 in', () => {
+  it('holds up to 65 kA and 0.03 s at 18 in: category 2, 60 in (from memory)', () => {
     expect(nfpa70e2024.ppeCategories.rows[6]).toMatchObject({
       faultKiloamperes: 65,
       clearingSeconds: 0.03,

@@ -262,6 +262,26 @@ describe('arc.study-needed names both figures of a near transformer estimate', (
   });
 });
 
+describe('the estimate from a nameplate (I = S / (√3 V Z), an infinite bus)', () => {
+  it('is 30.0703 kA for 500 kVA, 480 V, 2 %, three phases', () => {
+    const nameplate = { kilovoltAmperes: 500, secondaryVolts: 480, impedancePercent: 2, phases: 3 };
+    const over = assessBase('O', { ...fed(10), 'arcFlash/transformer': nameplate });
+    const stop = over.findings.find(
+      ({ path, severity }) => path === '/arcFlash/transformer' && severity === 'stop',
+    );
+    expect(stop?.params['value']).toBeCloseTo(30.0703, 3);
+    expect(stop?.params['allowed']).toBe(25);
+  });
+});
+
+describe('the findings of the arc flash assessment', () => {
+  it('are those of the worksheet that begin with arc.', () => {
+    const { arcFlash, findings } = assessBase('O', fed(40));
+    expect(arcFlash.findings.length).toBeGreaterThan(0);
+    expect(arcFlash.findings).toEqual(findings.filter(({ code }) => /^arc\./.test(code)));
+  });
+});
+
 describeRule('arc.above-forty', 'own policy', [
   ...onEach(ALL, '40 cal/cm²', labelled({ ...LABEL, incidentEnergyCalPerCm2: 40 }), []),
   ...onEach(
@@ -365,6 +385,15 @@ const LIKELY = [
   'energized work',
   'temporary grounds',
 ];
+const EXPOSED = 'supply/higherVoltsExposed';
+/** Work on lighting control that is below 50 V, justified for another reason. */
+const CONTROL: Edits = {
+  'job/task': 'work on lighting control',
+  'supply/workVolts': 24,
+  [EXPOSED]: false,
+  [TASK]: 'operate device',
+};
+const OPEN = ['open /arcFlash/task'];
 describeRule('arc.task-does-not-fit', '70E Table 130.5(C)', [
   ...eachValue(ENERGIZED, TASK, LIKELY, []),
   ...eachValue(ENERGIZED, TASK, [...NORMALLY_NOT, ...NEVER_LIKELY], ['open /arcFlash/task']),
@@ -432,7 +461,22 @@ describeRule('arc.task-does-not-fit', '70E Table 130.5(C)', [
     { 'job/task': 'trace circuit', [TASK]: 'operate device' },
     ['open /arcFlash/task'],
   ],
+  [
+    'T',
+    'tracing with nobody restricted, a cover off',
+    {
+      ...FAR,
+      'job/task': 'trace circuit',
+      [TASK]: 'operate device',
+      'arcFlash/normal/coversOn': false,
+      'arcFlash/normal/maintained': true,
+    },
+    [],
+  ],
   ['W', 'below 50 V', { ...BELOW_FIFTY, [TASK]: 'operate device' }, []],
+  ['W', 'lighting control at line voltage', { ...CONTROL, 'supply/workVolts': 120 }, OPEN],
+  ['W', 'lighting control at 24 V, higher exposed', { ...CONTROL, [EXPOSED]: true }, OPEN],
+  ['W', 'lighting control at 24 V, nothing higher exposed', CONTROL, []],
 ]);
 
 describe('the floor counts while the chosen task does not fit (task table)', () => {
@@ -441,6 +485,8 @@ describe('the floor counts while the chosen task does not fit (task table)', () 
     ['W', { [TASK]: 'read panel meter' }],
     ['O', { [TASK]: 'read panel meter' }],
     ['O', {}],
+    // Switched off, the absence test is what is done, whatever the job.
+    ['O', FAR],
     ['T', { [TASK]: undefined }],
     ['W', { [TASK]: undefined }],
     ['T', { ...FAR, 'crew/0/closest': 'restricted' }],

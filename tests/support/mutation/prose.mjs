@@ -13,6 +13,7 @@ const PROSE_PROPERTIES = new Set([
 const PROSE_CALLS = new Set(['RangeError', 'Error', 'refuse', 'citation', 'clause']);
 
 function isProse(node) {
+  if (node.isFunctionDeclaration()) return node.node.id?.name === 'refuse';
   if (node.isObjectProperty()) return PROSE_PROPERTIES.has(node.node.key.name);
   if (node.isCallExpression() || node.isNewExpression()) {
     return PROSE_CALLS.has(node.node.callee.name);
@@ -23,6 +24,9 @@ function isProse(node) {
 export const strykerPlugins = [
   declareValuePlugin(PluginKind.Ignore, 'prose', {
     shouldIgnore(node) {
+      if (node.findParent((parent) => parent.isFunctionDeclaration() && isProse(parent)) !== null) {
+        return 'How an error is worded.';
+      }
       const isText = node.isStringLiteral() || node.isTemplateLiteral();
       const isNamed = isText || node.isArrayExpression();
       return isNamed && node.findParent(isProse) !== null
