@@ -1,11 +1,10 @@
 import { describe, expect, it } from 'vitest';
-import { assess } from '@/hazard';
+import { assess, REQUIRED_ITEM_IDS } from '@/hazard';
 import type { Assessment, CloseOut, Proof, Stage, WorksheetContent } from '@/hazard';
 import {
   soundEnergizedWorksheet,
   soundTestingWorksheet,
   soundWorksheet,
-  withEverythingAtHand,
   withPath,
 } from './soundWorksheet';
 
@@ -67,7 +66,7 @@ export function withEdits(base: Base, edits: Edits = {}): Whole {
   return { content, on, stage, proof, closeOut } as Whole;
 }
 
-/** The base with the edits made; what is required is at hand unless an edit says what is. */
+/** The base with the edits made; whatever may be required is at hand unless an edit says what is. */
 export function edited(base: Base, edits: Edits = {}): Whole {
   const whole = withEdits(base, edits);
   const saysWhatIsAtHand = Object.keys(edits).some((pointer) =>
@@ -75,7 +74,10 @@ export function edited(base: Base, edits: Edits = {}): Whole {
   );
   return saysWhatIsAtHand
     ? whole
-    : { ...whole, content: withEverythingAtHand(whole.content, whole) };
+    : {
+        ...whole,
+        content: withPath(whole.content, '/protectiveEquipment/ready', [...REQUIRED_ITEM_IDS]),
+      };
 }
 
 function frozen<T>(value: T): T {

@@ -1,6 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import type { Conductor, VoltageReading } from '@/hazard';
 import { HELD_BY_LEAD, READ_AT } from '../../../support/ruleEdits';
+import { sampled } from '../../../support/propertyRuns';
 import type { Edits } from '../../../support/ruleTable';
 import { assessBase, found, gone, unsettled } from '../../../support/ruleTable';
 import { zeroReadings } from '../../../support/soundWorksheet';
@@ -83,7 +84,7 @@ describe('the conductors of the test (convention 8)', () => {
     };
     const complete = zeroReadings(['A1', 'A2'], set);
     expect(unsettled(assessBase('O work', { ...given, 'proof/readings': complete }))).toEqual([]);
-    complete.forEach((_reading, index) => {
+    sampled([...complete.keys()]).forEach((index) => {
       const short = complete.filter((_other, other) => other !== index);
       expect(unsettled(assessBase('O work', { ...given, 'proof/readings': short }))).toEqual([
         'open absence.pairs-missing /proof/readings',
