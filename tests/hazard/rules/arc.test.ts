@@ -262,6 +262,24 @@ describe('arc.study-needed names both figures of a near transformer estimate', (
   });
 });
 
+const HALF_READ: Edits = { 'arcFlash/transformer': { kilovoltAmperes: 75 } };
+const GAPS = ['secondaryVolts', 'impedancePercent', 'phases'].map(
+  (name) => `open /arcFlash/transformer/${name}`,
+);
+describeRule('arc.study-needed', 'a nameplate read by half (own policy)', [
+  ...onEach(['O'], 'beside a fault current', HALF_READ, GAPS),
+  ...onEach(['O'], 'beside the label of this equipment', labelled(LABEL, HALF_READ), []),
+  ...onEach(
+    ['O'],
+    'beside the label of other equipment',
+    labelled({ ...LABEL, ofThisEquipment: false }, HALF_READ),
+    GAPS,
+    ['*'],
+  ),
+  ...onEach(['T'], 'where nothing is likely', { ...FAR, ...HALF_READ }, []),
+  ...onEach(['W'], 'below 50 V', { ...BELOW_FIFTY, ...HALF_READ }, []),
+]);
+
 describe('the estimate from a nameplate (I = S / (√3 V Z), an infinite bus)', () => {
   it('is 30.0703 kA for 500 kVA, 480 V, 2 %, three phases', () => {
     const nameplate = { kilovoltAmperes: 500, secondaryVolts: 480, impedancePercent: 2, phases: 3 };

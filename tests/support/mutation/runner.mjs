@@ -54,6 +54,8 @@ class InProcessRunner {
   constructor() {
     this.require = createRequire(path.resolve('package.json'));
     this.stryker = globalThis.__stryker__ ??= {};
+    /** Tests that noticed a mutant, the latest last: its neighbour is mostly noticed by the same. */
+    this.killers = new Set();
   }
 
   capabilities() {
@@ -94,9 +96,23 @@ class InProcessRunner {
     this.stryker.activeMutant = activeMutant.id;
     const wanted = testFilter && new Set(testFilter);
     const chosen = this.tests.filter(({ id }) => wanted?.has(id) ?? true);
-    const result = await this.run(chosen, { bail: true });
+    const result = await this.run(this.likelyKillersFirst(chosen), { bail: true });
+    this.remember(result.tests.find(({ status }) => status === TestStatus.Failed)?.id);
     const timedOut = determineHitLimitReached(this.stryker.hitCount, hitLimit);
     return toMutantRunResult(timedOut ?? result);
+  }
+
+  likelyKillersFirst(tests) {
+    const order = [...this.killers].reverse();
+    const byId = new Map(tests.map((test) => [test.id, test]));
+    const first = order.flatMap((id) => byId.get(id) ?? []);
+    return [...first, ...tests.filter(({ id }) => !this.killers.has(id))];
+  }
+
+  remember(id) {
+    if (id === undefined) return;
+    this.killers.delete(id);
+    this.killers.add(id);
   }
 
   async run(tests, { bail }) {

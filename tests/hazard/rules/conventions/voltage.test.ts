@@ -55,6 +55,13 @@ describe('which voltage enters the table (convention 12, hazard.md)', () => {
     }
   });
 
+  it.each([
+    [1000, 1000],
+    [1001, undefined],
+  ])('touch at %s V ends where the body impedances do (IEC 60479-1)', (volts, expected) => {
+    expect(assessBase('O', supply('208Y/120', volts)).touch?.volts).toBe(expected);
+  });
+
   it('touch takes the highest voltage that can be touched', () => {
     expect(assessBase('O').touch).toMatchObject({ volts: 120 });
     expect(assessBase('O', WHOLE).touch).toMatchObject({ volts: 208 });
