@@ -31,7 +31,7 @@ const problem = (status: number, name: string) =>
 function serve(stop: () => Response, read = () => answer(200, record)) {
   vi.stubGlobal('fetch', (path: string, init?: RequestInit) => {
     if (init?.method !== 'POST') return Promise.resolve(read());
-    sent.push({ path, body: JSON.parse(String(init.body)) as unknown });
+    sent.push({ path, body: JSON.parse(init.body as string) as unknown });
     return Promise.resolve(stop());
   });
 }
