@@ -8,6 +8,8 @@ process.env.TZ = 'America/Chicago';
 
 export default defineConfig({
   test: {
+    // One worker for each core: left to itself, vitest keeps one core free.
+    maxWorkers: '100%',
     projects: [
       {
         resolve: { alias },
@@ -74,7 +76,9 @@ export default defineConfig({
           setupFiles: ['tests/support/serverSetup.ts'],
           testTimeout: 300_000,
           hookTimeout: 300_000,
+          // After the others and one at a time: each has a server and a browser beside it.
           fileParallelism: false,
+          sequence: { groupOrder: 1 },
         },
       },
     ],
