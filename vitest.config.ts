@@ -76,8 +76,7 @@ export default defineConfig({
           setupFiles: ['tests/support/serverSetup.ts'],
           testTimeout: 300_000,
           hookTimeout: 300_000,
-          // After the others and one at a time: each has a server and a browser beside it.
-          fileParallelism: false,
+          // After the others: each has a server and a browser beside it.
           sequence: { groupOrder: 1 },
         },
       },
