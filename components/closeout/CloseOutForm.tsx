@@ -190,7 +190,7 @@ function Close({ record, kept, left }: Props & { left: readonly Finding[] }) {
         {isProblem(error, 'not-ready') && (
           <>
             <Notice live title={said.notReadyTitle}>
-              {words.problems['not-ready'].todo}
+              {words.problems['not-ready'].remedy}
             </Notice>
             <FindingPanels findings={findingsOf(error)} />
           </>

@@ -50,7 +50,7 @@ export function Ways({ state }: Props) {
               note={at === undefined ? where : said.tried(where, timeText(at, record.timeZone))}
               reason={source.id === undefined ? said.noId : undefined}
               checked={at !== undefined}
-              todo={at === undefined}
+              unanswered={at === undefined}
               onChange={() =>
                 change((before) => ({
                   ...before,
@@ -160,7 +160,7 @@ export function TesterProved({ state, when }: Props & { when: 'before' | 'after'
         label={said[when].check}
         note={at === undefined ? undefined : said.before.at(timeText(at, record.timeZone))}
         checked={at !== undefined}
-        todo={at === undefined}
+        unanswered={at === undefined}
         onChange={(checked) =>
           change((before) => ({ ...before, [field]: checked ? stamp() : undefined }))
         }

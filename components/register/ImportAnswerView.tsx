@@ -81,8 +81,8 @@ function Faults({ errors }: { errors: readonly Fault[] }) {
           cell: ({ value }) => (value === '' ? words.nothing : value),
         },
         {
-          key: 'todo',
-          label: words.todo,
+          key: 'whatToMend',
+          label: words.whatToMend,
           share: 2,
           cell: ({ code }) => <Text variant="answer">{faultWord(code)}</Text>,
         },

@@ -13,7 +13,7 @@ export interface CheckRowProps {
   onChange: (checked: boolean) => void;
   id?: string;
   /** Still to be done: an ink bar at the left and a toned ground. */
-  todo?: boolean;
+  unanswered?: boolean;
   /** Why it cannot be ticked now. */
   reason?: string;
   /** A switch turns something on at once; a check box records something done. */
@@ -24,7 +24,7 @@ export interface CheckRowProps {
 
 /** One line to tick: the box at the left, its meaning and a note beside it. */
 export function CheckRow(props: CheckRowProps) {
-  const { label, note, checked, onChange, todo, reason, role = 'checkbox', children } = props;
+  const { label, note, checked, onChange, unanswered, reason, role = 'checkbox', children } = props;
   const generated = useId();
   const id = props.id ?? generated;
   const { colors } = useTheme();
@@ -36,8 +36,8 @@ export function CheckRow(props: CheckRowProps) {
       style={[
         styles.row,
         { borderTopColor: colors.hair },
-        todo === true && [
-          styles.todo,
+        unanswered === true && [
+          styles.unanswered,
           { borderLeftColor: colors.ink, backgroundColor: colors.tone },
         ],
       ]}
@@ -84,13 +84,13 @@ export function CheckRow(props: CheckRowProps) {
 }
 
 /** Something that is on or off at once, such as the sunlight theme. */
-export function Toggle(props: Omit<CheckRowProps, 'role' | 'todo'>) {
+export function Toggle(props: Omit<CheckRowProps, 'role' | 'unanswered'>) {
   return <CheckRow {...props} role="switch" />;
 }
 
 const styles = StyleSheet.create({
   row: { borderTopWidth: 1 },
-  todo: { borderLeftWidth: 4, paddingLeft: 10, paddingRight: space.xs },
+  unanswered: { borderLeftWidth: 4, paddingLeft: 10, paddingRight: space.xs },
   press: {
     flexDirection: 'row',
     alignItems: 'flex-start',

@@ -11,7 +11,7 @@ export interface FieldProps {
   hint?: string;
   error?: string;
   /** Still to be answered: an ink bar at the left. */
-  todo?: boolean;
+  unanswered?: boolean;
 }
 
 /** The ids by which a control names its label, hint and error. */
@@ -31,11 +31,11 @@ export function Field({
   strongLabel,
   hint,
   error,
-  todo,
+  unanswered,
   children,
 }: FieldProps & { id: string; children: ReactNode }) {
   const { colors } = useTheme();
-  const marked = todo === true || error !== undefined;
+  const marked = unanswered === true || error !== undefined;
   return (
     <View
       style={[

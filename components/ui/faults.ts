@@ -9,7 +9,7 @@ export function describeFault(error: unknown, { problems }: Messages): string {
       : error instanceof TypeError
         ? problems.offline
         : problems.unexpected;
-  return `${words.title} ${words.todo}`;
+  return `${words.title} ${words.remedy}`;
 }
 
 /** The number to read out when something went wrong on the server. */

@@ -1,5 +1,3 @@
-import { execFile } from 'node:child_process';
-import { once } from 'node:events';
 import type { Browser, Locator, Page } from 'playwright-core';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import {
@@ -13,6 +11,7 @@ import {
   tick,
   type,
 } from '../support/browser';
+import { textOfPdf } from '../support/pdfText';
 import { startWebServer, type WebServer } from '../support/webServer';
 
 /** A loaded machine takes its time to draw what was typed. */
@@ -23,16 +22,6 @@ const HELPER = { pin: '135792', name: 'Teo Barrancas' };
 const SUPERVISOR = { email: 'supervisor@wideberth.example', pin: '864209' };
 
 const CLOSE = /^Close as lead/;
-
-/** The words of a PDF, by poppler's reader; every white space is one space. */
-async function textOfPdf(bytes: Buffer): Promise<string> {
-  const child = execFile('pdftotext', ['-layout', '-', '-'], { maxBuffer: 16_000_000 });
-  let text = '';
-  child.stdout?.on('data', (chunk: string) => (text += chunk));
-  child.stdin?.end(bytes);
-  await once(child, 'close');
-  return text.replace(/\s+/g, ' ');
-}
 
 let server: WebServer;
 let browser: Browser;

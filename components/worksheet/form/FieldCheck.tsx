@@ -26,7 +26,7 @@ export function FieldCheck({ name, label, note, children }: Props) {
         note={note ?? hintOf(words, name)}
         checked={field.value === true}
         onChange={field.onChange}
-        todo={findings.some(({ severity }) => severity !== 'caution')}
+        unanswered={findings.some(({ severity }) => severity !== 'caution')}
       >
         {children}
       </CheckRow>

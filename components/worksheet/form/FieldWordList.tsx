@@ -25,7 +25,7 @@ export function FieldWordList({ name }: { name: string }) {
         id={fieldId(name)}
         label={labelOf(words, name)}
         hint={hintOf(words, name)}
-        todo={findings.some(({ severity }) => severity === 'open')}
+        unanswered={findings.some(({ severity }) => severity === 'open')}
         exact
         maxLength={400}
         value={typed}

@@ -41,7 +41,7 @@ function useBound({ name, label, hint }: Named) {
       id: fieldId(name),
       label: label ?? labelOf(words, name),
       hint: hint ?? hintOf(words, name),
-      todo: isOpen,
+      unanswered: isOpen,
       error: fault === undefined ? undefined : faultWord(words, fault.code),
     },
   };

@@ -145,7 +145,7 @@ function Topics() {
             label={name}
             note={say}
             checked={covered.includes(topic)}
-            todo={!covered.includes(topic)}
+            unanswered={!covered.includes(topic)}
             onChange={(now) => change((list) => toggled(list, topic, now))}
           />
         );

@@ -125,7 +125,7 @@ function ItemRow({ item }: { item: RequiredItem }) {
       <CheckRow
         label={itemWords(locale, item)}
         checked={checked}
-        todo={!checked}
+        unanswered={!checked}
         onChange={(now) => change((list) => toggled(list, item.id, now))}
       />
       <FindingPanels findings={others} />

@@ -135,7 +135,7 @@ function GroundedSurfaces() {
         <CheckRow
           label={words.worksheet.lookedNone}
           checked={surfaces !== undefined}
-          todo={surfaces === undefined}
+          unanswered={surfaces === undefined}
           onChange={(now) => set(now ? [] : undefined)}
         />
       )}

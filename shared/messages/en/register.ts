@@ -251,7 +251,7 @@ export const register = {
     lineNumber: (line: number) => `Line ${line}`,
     where: 'Column',
     stands: 'What stands there',
-    todo: 'What to mend',
+    whatToMend: 'What to mend',
     nothing: 'nothing',
     importPeople: (count: number) =>
       count === 1 ? 'Import and invite 1 person' : `Import and invite ${count} people`,

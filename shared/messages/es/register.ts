@@ -263,7 +263,7 @@ export const register: Words<typeof en> = {
     lineNumber: (line) => `Renglón ${line}`,
     where: 'Columna',
     stands: 'Qué dice',
-    todo: 'Qué corregir',
+    whatToMend: 'Qué corregir',
     nothing: 'nada',
     importPeople: (count) =>
       count === 1 ? 'Importar e invitar a 1 persona' : `Importar e invitar a ${count} personas`,

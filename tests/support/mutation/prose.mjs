@@ -1,6 +1,10 @@
 import { declareValuePlugin, PluginKind } from '@stryker-mutator/api/plugin';
 
-/** What a clause is called and what an error says are words: no test holds them letter by letter. */
+/**
+ * What a clause is called and what an error says are words: no test holds them
+ * letter by letter. Texts are left out by the configuration; this leaves out the
+ * lists of clauses, and how an error is put together.
+ */
 const PROSE_PROPERTIES = new Set([
   'citation',
   'useCitation',
@@ -27,10 +31,8 @@ export const strykerPlugins = [
       if (node.findParent((parent) => parent.isFunctionDeclaration() && isProse(parent)) !== null) {
         return 'How an error is worded.';
       }
-      const isText = node.isStringLiteral() || node.isTemplateLiteral();
-      const isNamed = isText || node.isArrayExpression();
-      return isNamed && node.findParent(isProse) !== null
-        ? 'Prose or the name of a clause.'
+      return node.isArrayExpression() && node.findParent(isProse) !== null
+        ? 'The names of clauses.'
         : undefined;
     },
   }),
