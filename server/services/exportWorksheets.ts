@@ -26,7 +26,7 @@ async function* batches(
   filters: WorksheetFilters,
 ): AsyncGenerator<Worksheet[]> {
   await expireWorksheets();
-  const conditions = worksheetConditions(actor, filters);
+  const conditions = await worksheetConditions(actor, filters);
   let position: WhereOptions<Worksheet> = {};
   for (;;) {
     const rows: Worksheet[] = await Worksheet.findAll({

@@ -9,6 +9,7 @@ import { sequelize } from '../db';
 import { Worksheet } from '../models/Worksheet';
 import { invalidField } from '../problem';
 import { expireWorksheets } from './expireWorksheets';
+import { searchWorksheets } from './searchWorksheets';
 
 /** Query parameters may come once or several times; several mean "any of these". */
 function several<T extends z.ZodType>(item: T) {
@@ -86,16 +87,23 @@ function createdWithin(from: string | undefined, to: string | undefined) {
   ];
 }
 
-/** All conditions of a list, for the list itself, the exports and the counts. */
-export function worksheetConditions(
+async function matching(q: string): Promise<unknown> {
+  const ids = await searchWorksheets(q);
+  return ids === undefined
+    ? literal(`"Worksheet"."search" @@ search_query(${sequelize.escape(q)})`)
+    : { id: ids };
+}
+
+/** All conditions of a list, for the list itself and the exports. */
+export async function worksheetConditions(
   actor: CurrentUser,
   filters: WorksheetFilters,
-): WhereOptions<Worksheet> {
+): Promise<WhereOptions<Worksheet>> {
   const { q, state, siteId, system, circuitVolts, mode, person, rubberGoods, finding } = filters;
   const { from, to } = filters;
   const conditions: unknown[] = [...visibleTo(actor), ...createdWithin(from, to)];
   if (q !== undefined && q.trim() !== '') {
-    conditions.push(literal(`"Worksheet"."search" @@ search_query(${sequelize.escape(q)})`));
+    conditions.push(await matching(q));
   }
   const equal = { state, siteId, system, circuitVolts, mode };
   for (const [column, values] of Object.entries(equal)) {
@@ -167,7 +175,7 @@ export async function listWorksheets(
   const position = cursor === undefined ? null : readCursor(cursor, sort);
   const where = {
     [Op.and]: [
-      worksheetConditions(actor, rest),
+      await worksheetConditions(actor, rest),
       ...(position === null ? [] : [after(position, sorting)]),
     ],
   } as WhereOptions<Worksheet>;

@@ -8,12 +8,11 @@ import type { WorksheetRecord } from '@/shared/record';
 import type { Locale } from '@/shared/user';
 import { BROKEN_PLANS } from '../support/brokenWorksheets';
 import { keepPicture, launchBrowser, newScreen, signInAs } from '../support/browser';
+import { DEMO_ACCOUNTS, DEMO_PASSWORD } from '../support/demoAccounts';
 import { withEdits } from '../support/ruleTable';
 import { soundWorksheet } from '../support/soundWorksheet';
 import { startWebServer, type WebServer } from '../support/webServer';
 
-const PASSWORD = 'wide-berth-demo';
-const EMAIL = (who: string) => `${who}@wideberth.example`;
 const STROKES = [
   [
     [10, 12],
@@ -34,13 +33,17 @@ afterAll(async () => {
 });
 
 /** A person at a screen, signed in through the interface and then set to a language. */
-async function personAt(who: string, locale: Locale, width: number): Promise<Page> {
+async function personAt(
+  who: keyof typeof DEMO_ACCOUNTS,
+  locale: Locale,
+  width: number,
+): Promise<Page> {
   const { page } = await newScreen(browser, server.base, {
     width,
     height: width < 600 ? 844 : 900,
     locale,
   });
-  await signInAs(page, EMAIL(who), PASSWORD);
+  await signInAs(page, DEMO_ACCOUNTS[who].email, DEMO_PASSWORD);
   await page.request.patch('/api/session', { data: { locale, units: 'feet', theme: 'system' } });
   return page;
 }

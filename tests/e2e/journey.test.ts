@@ -11,15 +11,13 @@ import {
   tick,
   type,
 } from '../support/browser';
+import { DEMO_ACCOUNTS, DEMO_PASSWORD } from '../support/demoAccounts';
 import { textOfPdf } from '../support/pdfText';
 import { startWebServer, type WebServer } from '../support/webServer';
 
 /** A loaded machine takes its time to draw what was typed. */
 const SETTLED = { timeout: 10_000 };
-const PASSWORD = 'wide-berth-demo';
-const LEAD = { email: 'lead@wideberth.example', pin: '246810', name: 'Renata Quillfeather' };
-const HELPER = { pin: '135792', name: 'Teo Barrancas' };
-const SUPERVISOR = { email: 'supervisor@wideberth.example', pin: '864209' };
+const { lead: LEAD, helper: HELPER, supervisor: SUPERVISOR } = DEMO_ACCOUNTS;
 
 const CLOSE = /^Close as lead/;
 
@@ -298,7 +296,7 @@ async function closeOut(page: Page): Promise<void> {
 describe('four LED drivers in a level 2 corridor, 480Y/277, LP-2/14', () => {
   it('goes from sign-in to a closed record and its PDF through the interface alone', async () => {
     const { page, faults } = await newScreen(browser, server.base);
-    await signInAs(page, LEAD.email, PASSWORD);
+    await signInAs(page, LEAD.email, DEMO_PASSWORD);
     await page.getByRole('link', { name: 'New worksheet' }).click();
     await page.getByText('Ways it can be live').first().waitFor();
     await fillJob(page);
@@ -354,7 +352,7 @@ describe('four LED drivers in a level 2 corridor, 480Y/277, LP-2/14', () => {
       .waitFor();
 
     const tablet = await newScreen(browser, server.base, { width: 820, height: 1180 });
-    await signInAs(tablet.page, SUPERVISOR.email, PASSWORD);
+    await signInAs(tablet.page, SUPERVISOR.email, DEMO_PASSWORD);
     await tablet.page.goto(`${address}/sign/countersigned`);
     await signWith(tablet.page, SUPERVISOR.pin, /^Countersign/);
     await tablet.page

@@ -11,10 +11,10 @@ import {
   type,
 } from '../support/browser';
 import type { Watched } from '../support/browser';
+import { DEMO_ACCOUNTS, DEMO_PASSWORD } from '../support/demoAccounts';
 import { receivedMails } from '../support/server';
 import { startWebServer, type WebServer } from '../support/webServer';
 
-const PASSWORD = 'wide-berth-demo';
 const SITE = 'Ashgrove Commons';
 const HELPER = {
   name: 'Ingrid Castellane',
@@ -58,7 +58,7 @@ beforeAll(async () => {
   server = await startWebServer();
   browser = await launchBrowser();
   desk = await newScreen(browser, server.base, { width: 1280, height: 800 });
-  await signInAs(desk.page, 'safety@wideberth.example', PASSWORD);
+  await signInAs(desk.page, DEMO_ACCOUNTS.safety.email, DEMO_PASSWORD);
 });
 afterAll(async () => {
   await browser?.close();
@@ -201,7 +201,7 @@ describe('the register, from an invitation to the next worksheet', () => {
 
   it('offers the lead the new people and the good pair, and answers of the site to confirm', async () => {
     const { page, faults } = await newScreen(browser, server.base);
-    await signInAs(page, 'lead@wideberth.example', PASSWORD);
+    await signInAs(page, DEMO_ACCOUNTS.lead.email, DEMO_PASSWORD);
     await page.getByRole('link', { name: 'New worksheet' }).click();
     await page.getByText('Ways it can be live').first().waitFor();
     const job = await section(page, 'Job');
