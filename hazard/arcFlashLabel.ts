@@ -1,6 +1,7 @@
 import type { ArcFlashQuestion } from './arcFlashEvaluation';
 import { arcFinding, LABEL_PATH } from './arcFlashFindings';
 import type { ArcFlashPart } from './arcFlashFindings';
+import { isFiniteNumber } from './arguments';
 import { citation } from './citations';
 import type { EquipmentLabel } from './content';
 import { addCalendarMonths, isCalendarDate } from './dates';
@@ -13,7 +14,7 @@ const OWN_LIMIT_CAL_PER_CM2 = 40;
 
 /** A figure of a label is above 0, else it is not answered. */
 const figure = (value: number | undefined): number | undefined =>
-  typeof value === 'number' && Number.isFinite(value) && value > 0 ? value : undefined;
+  isFiniteNumber(value) && value > 0 ? value : undefined;
 
 const isCategory = (value: number | undefined): value is PpeCategory =>
   value === 1 || value === 2 || value === 3 || value === 4;
@@ -37,18 +38,14 @@ export function labelAboveForty(label: EquipmentLabel, edition: Edition): Findin
 }
 
 function reviewFindings({ reviewedOn }: EquipmentLabel, day: string | undefined, edition: Edition) {
-  const caution = () =>
-    arcFinding(
-      'caution',
-      `${LABEL_PATH}/reviewedOn`,
-      { limit: 'label-review', years: edition.labelReviewMonths / 12 },
-      edition,
-      'nfpa70e.labelReview',
-    );
-  if (!isCalendarDate(reviewedOn)) return [caution()];
-  if (day === undefined) return [];
-  const isOld = addCalendarMonths(reviewedOn, edition.labelReviewMonths) < day;
-  return isOld || reviewedOn > day ? [caution()] : [];
+  const months = edition.labelReviewMonths;
+  const isReviewed =
+    isCalendarDate(reviewedOn) &&
+    (day === undefined || (reviewedOn <= day && day <= addCalendarMonths(reviewedOn, months)));
+  if (isReviewed) return [];
+  const path = `${LABEL_PATH}/reviewedOn`;
+  const params = { limit: 'label-review', years: months / 12 } as const;
+  return [arcFinding('caution', path, params, edition, 'nfpa70e.labelReview')];
 }
 
 function voltageFindings(label: EquipmentLabel, volts: number | undefined, edition: Edition) {

@@ -9,9 +9,12 @@ function refuse(name: string, expected: string, value: unknown): never {
   throw new RangeError(`${name} must be ${expected}, not ${given}`);
 }
 
+/** A number, and neither NaN nor infinite. */
+export const isFiniteNumber = (value: unknown): value is number => Number.isFinite(value);
+
 /** A finite number that is not negative. */
 export function requireNumber(name: string, value: unknown): number {
-  if (typeof value !== 'number' || !Number.isFinite(value) || value < 0) {
+  if (!isFiniteNumber(value) || value < 0) {
     refuse(name, 'a finite number that is not negative', value);
   }
   return value;
@@ -19,7 +22,7 @@ export function requireNumber(name: string, value: unknown): number {
 
 /** A finite number above zero: one that is divided by. */
 export function requirePositive(name: string, value: unknown): number {
-  if (typeof value !== 'number' || !Number.isFinite(value) || value <= 0) {
+  if (!isFiniteNumber(value) || value <= 0) {
     refuse(name, 'a finite number above 0', value);
   }
   return value;

@@ -12,7 +12,7 @@ function requireRepresentable(name: string, amperes: number): number {
   return amperes;
 }
 
-interface TransformerQuestion {
+export interface TransformerQuestion {
   kilovoltAmperes: number;
   secondaryVolts: number;
   impedancePercent: number;

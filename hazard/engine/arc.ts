@@ -1,6 +1,8 @@
 import { evaluateArcFlash } from '../arcFlashEvaluation';
 import { boltedFaultAmperes } from '../currents';
+import type { TransformerQuestion } from '../currents';
 import type { Edition } from '../editions/types';
+import { EQUIPMENT_CONDITIONS } from '../enumerations';
 import type { ArcFlashTask, EquipmentCondition } from '../enumerations';
 import { arcFlashLikelihood } from '../likelihood';
 import type { JobTaskFacts } from '../tasks';
@@ -61,8 +63,8 @@ function countsAs(chosen: ArcFlashTask, { answers, people }: Question): ArcFlash
 /** Under some condition the floor is likely and the chosen task is not. */
 function isMilder(chosen: ArcFlashTask, floor: ArcFlashTask, edition: Edition): boolean {
   const { [chosen]: one, [floor]: other } = edition.likelihood;
-  return (
-    (other.likely.normal && !one.likely.normal) || (other.likely.abnormal && !one.likely.abnormal)
+  return EQUIPMENT_CONDITIONS.some(
+    (condition) => other.likely[condition] && !one.likely[condition],
   );
 }
 
@@ -76,21 +78,15 @@ function transformerOf({ arcFlash }: Answers): { kiloamperes?: number; gaps: rea
   const { kilovoltAmperes, secondaryVolts, impedancePercent, phases } = arcFlash.transformer;
   const fields = { kilovoltAmperes, secondaryVolts, impedancePercent, phases };
   if (Object.values(fields).every((value) => value === undefined)) return { gaps: [] };
-  if (kilovoltAmperes && secondaryVolts && impedancePercent && phases) {
-    try {
-      const amperes = boltedFaultAmperes({
-        kilovoltAmperes,
-        secondaryVolts,
-        impedancePercent,
-        phases,
-      });
-      return { kiloamperes: amperes / 1000, gaps: [] };
-    } catch {
-      // Figures past any number: no estimate can be made of them.
-      return { gaps: ['kilovoltAmperes'] };
-    }
+  const gaps = Object.entries(fields).flatMap(([name, value]) => (value ? [] : [name]));
+  if (gaps.length > 0) return { gaps };
+  try {
+    const amperes = boltedFaultAmperes(fields as TransformerQuestion);
+    return { kiloamperes: amperes / 1000, gaps };
+  } catch {
+    // Figures past any number: no estimate can be made of them.
+    return { gaps: ['kilovoltAmperes'] };
   }
-  return { gaps: Object.entries(fields).flatMap(([name, value]) => (value ? [] : [name])) };
 }
 
 function isLabelled({ arcFlash }: Answers): boolean {

@@ -127,17 +127,18 @@ function aroundTheWork({ answers, path }: Facts): Wanted[] {
   return wanted;
 }
 
-/** All that must be at hand before the work begins. */
+/** All that must be at hand before the work begins, in the order of `REQUIRED_ITEM_IDS`. */
 export function requiredItemsOf(facts: Facts): RequiredItem[] {
-  const wanted = [
+  const wanted: Wanted[] = [
     ...againstShock(facts),
-    ['nonmelting-clothing', {}, 'nfpa70e.nonmeltingClothing'] satisfies Wanted,
+    ['nonmelting-clothing', {}, 'nfpa70e.nonmeltingClothing'],
     ...againstArcFlash(facts),
     ...forTheTest(facts),
     ...aroundTheWork(facts),
   ];
-  const order = (id: RequiredItemId) => REQUIRED_ITEM_IDS.indexOf(id);
-  return wanted
-    .sort(([one], [other]) => order(one) - order(other))
-    .map(([id, params, basis]) => ({ id, params, citation: citation(basis, facts.edition) }));
+  return wanted.map(([id, params, basis]) => ({
+    id,
+    params,
+    citation: citation(basis, facts.edition),
+  }));
 }

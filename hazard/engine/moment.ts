@@ -14,7 +14,7 @@ const MINUTE = 60_000;
 
 /** Midnight UTC of a calendar date. */
 function midnight(date: string): number {
-  const [year = 0, month = 1, day = 1] = date.split('-').map(Number);
+  const [year, month, day] = date.split('-').map(Number) as [number, number, number];
   // `setUTCFullYear` takes the years 0 to 99 as they are written; `Date.UTC` does not.
   return new Date(0).setUTCFullYear(year, month - 1, day);
 }

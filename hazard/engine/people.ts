@@ -56,8 +56,7 @@ function entrantsOf(question: Question): ReadonlySet<CrewAnswers> {
       if (closest === 'restricted') return true;
       if (testerEnters(question) && tester !== undefined && id === tester) return true;
       if (lead !== true || path === 'off') return false;
-      const isRepairersLead =
-        path === 'energized' && task.kind === 'repair' && !isSomeoneRestricted;
+      const isRepairersLead = task.kind === 'repair' && !isSomeoneRestricted;
       return isRepairersLead || closest === undefined;
     }),
   );
@@ -65,7 +64,7 @@ function entrantsOf(question: Question): ReadonlySet<CrewAnswers> {
 
 /** Who does the work, how near they come and who of them is qualified. */
 export function peopleOf(question: Question): People {
-  const { answers, path, task, day, isBelowFiftyVolts } = question;
+  const { answers, task, day, isBelowFiftyVolts } = question;
   const entering = entrantsOf(question);
   const crew = answers.crew.values.map((member, index): Person => {
     const enters = entering.has(member);
@@ -78,7 +77,7 @@ export function peopleOf(question: Question): People {
     };
   });
   const entrants = crew.filter(({ enters }) => enters);
-  const mustEnter = testerEnters(question) || (path === 'energized' && task.kind === 'repair');
+  const mustEnter = testerEnters(question) || task.kind === 'repair';
   return {
     crew,
     entrants,

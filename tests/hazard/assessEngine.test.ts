@@ -24,12 +24,38 @@ describe('pathOf', () => {
       },
       'testing',
     ],
+    [
+      'T',
+      {
+        'decision/reason': 'below 50 V',
+        'decision/infeasibleBecause': 'can only be tested energized',
+      },
+      'energized',
+    ],
   ])('%s with %j: %s', (base, edits, path) => {
     expect(pathOf(contentOf(base, edits))).toBe(path);
   });
 
   it.each([undefined, null, 'x', [], {}])('of %j: off', (content) => {
     expect(pathOf(content)).toBe('off');
+  });
+});
+
+describe('the exception of parts below 50 V (29 CFR 1910.303(g)(2), 1910.333(a)(1))', () => {
+  const LOW = { 'supply/workVolts': 24, 'supply/higherVoltsExposed': false };
+  it.each<[string, Base, Edits, number]>([
+    ['energized for that reason', 'W', { ...LOW, 'decision/reason': 'below 50 V' }, 24],
+    ['energized for another reason', 'W', { ...LOW, 'decision/reason': 'infeasible' }, 120],
+    ['off, the reason left from before', 'O', { ...LOW, 'decision/reason': 'below 50 V' }, 120],
+    [
+      'something higher is exposed',
+      'W',
+      { ...LOW, 'decision/reason': 'below 50 V', 'supply/higherVoltsExposed': true },
+      120,
+    ],
+    ['at 50 V', 'W', { ...LOW, 'decision/reason': 'below 50 V', 'supply/workVolts': 50 }, 120],
+  ])('%s', (_, base, edits, volts) => {
+    expect(assessBase(base, edits).boundaries?.volts).toBe(volts);
   });
 });
 

@@ -235,6 +235,10 @@ describe('calendar months', () => {
   it('are refused for what is no date', () => {
     expect(() => addCalendarMonths('2026-02-29', 1)).toThrow(RangeError);
     expect(isCalendarDate(20_260_101)).toBe(false);
+    expect(isCalendarDate(['2026-01-01'])).toBe(false);
+    expect(isCalendarDate('2026-01-31')).toBe(true);
+    expect(isCalendarDate('2026-01-32')).toBe(false);
+    expect(isCalendarDate('2026-04-31')).toBe(false);
     expect(isCalendarDate('2024-02-29')).toBe(true);
   });
 });

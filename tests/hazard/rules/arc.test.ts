@@ -276,6 +276,13 @@ describeRule('arc.study-needed', 'a nameplate read by half (own policy)', [
     GAPS,
     ['*'],
   ),
+  ...onEach(
+    ['O'],
+    'without a fault current, which alone is asked for',
+    { ...HALF_READ, 'arcFlash/availableFaultKiloamperes': gone },
+    ['open /arcFlash/availableFaultKiloamperes'],
+    ['arc.rating-low'],
+  ),
   ...onEach(['T'], 'where nothing is likely', { ...FAR, ...HALF_READ }, []),
   ...onEach(['W'], 'below 50 V', { ...BELOW_FIFTY, ...HALF_READ }, []),
 ]);
@@ -496,59 +503,6 @@ describeRule('arc.task-does-not-fit', '70E Table 130.5(C)', [
   ['W', 'lighting control at 24 V, higher exposed', { ...CONTROL, [EXPOSED]: true }, OPEN],
   ['W', 'lighting control at 24 V, nothing higher exposed', CONTROL, []],
 ]);
-
-describe('the floor counts while the chosen task does not fit (task table)', () => {
-  it.each([
-    ['T', { [TASK]: 'read panel meter' }],
-    ['W', { [TASK]: 'read panel meter' }],
-    ['O', { [TASK]: 'read panel meter' }],
-    ['O', {}],
-    // Switched off, the absence test is what is done, whatever the job.
-    ['O', FAR],
-    ['T', { [TASK]: undefined }],
-    ['W', { [TASK]: undefined }],
-    ['T', { ...FAR, 'crew/0/closest': 'restricted' }],
-    ['T', { ...FAR, [TASK]: 'control circuit up to 125 V' }],
-  ] as const)('%s %o: likely, category 1', (base, edits) => {
-    const { likely, ppeCategory } = assessBase(base, edits).arcFlash;
-    expect({ likely, ppeCategory }).toEqual({ likely: true, ppeCategory: 1 });
-  });
-
-  it('nothing is likely in an inspection from outside with covers on', () => {
-    expect(assessBase('T', FAR).arcFlash).toMatchObject({
-      likely: false,
-      method: 'not likely',
-      ppeCategory: null,
-      requiredArcRatingCalPerCm2: null,
-      arcFlashBoundary: null,
-    });
-  });
-
-  it.each([
-    'installed',
-    'maintained',
-    'ratedForFault',
-    'usedAsListed',
-    'doorsClosed',
-    'coversOn',
-    'noSignOfFailure',
-  ])('the condition is abnormal without %s', (part) => {
-    const edits = { ...FAR, [TASK]: 'operate device' };
-    expect(assessBase('T', edits).arcFlash.likely).toBe(false);
-    expect(assessBase('T', { ...edits, [`arcFlash/normal/${part}`]: false }).arcFlash.likely).toBe(
-      true,
-    );
-    expect(assessBase('T', { ...edits, [`arcFlash/normal/${part}`]: gone }).arcFlash.likely).toBe(
-      true,
-    );
-  });
-
-  it('damage makes the condition abnormal', () => {
-    expect(
-      assessBase('T', { ...FAR, [TASK]: 'operate device', 'supply/damage': true }).arcFlash.likely,
-    ).toBe(true);
-  });
-});
 
 const CLOSEST = 'crew/1/closest';
 const WIDE: Edits = labelled({ ...LABEL, arcFlashBoundaryInches: 60 });

@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { JOB_TASKS } from '@/hazard';
+import { JOB_TASKS, REQUIRED_ITEM_IDS } from '@/hazard';
 import { BELOW_FIFTY, CIRCUIT_277, FAR } from '../../support/ruleEdits';
 import type { Base, Edits } from '../../support/ruleTable';
 import { assessBase, gone } from '../../support/ruleTable';
@@ -186,6 +186,23 @@ describe('what must be at hand (1910.335; 70E Tables 130.5(G), 130.7(C)(15)(c))'
       expect(/dc/i.test(known)).toBe(isDirect);
     },
   );
+
+  it('asks the tester for direct current where one of several sources is a battery', () => {
+    const batteries = { 'sources/2/kind': 'battery unit' };
+    expect(param('O', 'contact-tester', batteries)).toContain('ac and dc');
+  });
+
+  it('lists them from what is worn to what stands around the work', () => {
+    for (const [base, edits] of [
+      ['O', energy(30)],
+      ['O', { ...CIRCUIT_277, [SURFACE]: true, 'surroundings/peopleMayApproach': true }],
+      ['T', {}],
+      ['W', category(4)],
+    ] as const) {
+      const listed = ids(base, edits);
+      expect(listed).toEqual(REQUIRED_ITEM_IDS.filter((id) => listed.includes(id)));
+    }
+  });
 
   it('cites where each item comes from', () => {
     for (const base of ['O', 'T', 'W'] as const) {
