@@ -1,3 +1,5 @@
+import { isFiniteNumber } from '../arguments';
+
 /**
  * Reads one answer of untrusted content. What is absent, empty, of the wrong
  * type, not finite, negative or outside its enumeration comes out as
@@ -39,7 +41,7 @@ export function readFlag(value: unknown): boolean | undefined {
 
 /** Finite and not negative. */
 export function readFigure(value: unknown): number | undefined {
-  return typeof value === 'number' && Number.isFinite(value) && value >= 0 ? value : undefined;
+  return isFiniteNumber(value) && value >= 0 ? value : undefined;
 }
 
 /** Finite and above 0. */
@@ -50,7 +52,7 @@ export function readPositive(value: unknown): number | undefined {
 
 /** Finite, of either sign: a reading of voltage. */
 export function readSigned(value: unknown): number | undefined {
-  return typeof value === 'number' && Number.isFinite(value) ? value : undefined;
+  return isFiniteNumber(value) ? value : undefined;
 }
 
 /** A whole number within bounds, both included. */

@@ -27,6 +27,30 @@ const ROWS: Row[] = [
   ['T', 'inspecting from outside, covers on', FAR, { required: false, exemption: SECOND }],
   [
     'T',
+    'tracing from outside, covers on',
+    { ...FAR, 'job/task': 'trace circuit' },
+    { required: false, exemption: FIRST, because: 'testing' },
+  ],
+  [
+    'W',
+    'nobody is named yet',
+    { ...FAR_W, crew: [] },
+    { required: true, exemption: null, because: 'inside restricted' },
+  ],
+  [
+    'W',
+    'the helper’s place is not answered',
+    { ...FAR_W, 'crew/1/closest': gone },
+    { required: true, exemption: null, because: 'inside restricted' },
+  ],
+  [
+    'W',
+    'one alone, outside',
+    { ...FAR_W, 'crew/1': gone },
+    { required: false, exemption: null, because: 'nobody inside' },
+  ],
+  [
+    'T',
     'thermography from outside, covers on',
     { ...FAR, 'job/task': 'thermography' },
     { required: false, exemption: SECOND },

@@ -1,7 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import { pathOf } from '@/hazard';
 import { readAnswers } from '@/hazard/engine/answers';
-import { peopleOf } from '@/hazard/engine/people';
+import { peopleOf, personParams } from '@/hazard/engine/people';
 import { answeredTaskFacts } from '@/hazard/tasks';
 import { FAR, SECOND_QUALIFIED } from '../../support/ruleEdits';
 import type { Base, Edits } from '../../support/ruleTable';
@@ -97,5 +97,10 @@ describe('who enters the restricted boundary', () => {
     for (const { name, nearest } of people.crew) {
       if (entrants.includes(name ?? '')) expect(nearest).toBe('restricted');
     }
+  });
+
+  it('is named in the words where a name was given', () => {
+    const params = peopleIn('O', { 'crew/1/name': gone }).crew.map(personParams);
+    expect(params).toStrictEqual([{ index: 0, name: 'Lead' }, { index: 1 }]);
   });
 });
