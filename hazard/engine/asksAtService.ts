@@ -1,5 +1,6 @@
 import type { ArcFlashEquipment } from '../enumerations';
 import type { Answers } from './answers';
+import { isAmong } from './isAmong';
 
 const MAY_BE_SERVICE: readonly ArcFlashEquipment[] = [
   'panelboard',
@@ -10,5 +11,5 @@ const MAY_BE_SERVICE: readonly ArcFlashEquipment[] = [
 
 /** Equipment that may stand at the service, where more energy is available. */
 export function asksAtService({ arcFlash }: Answers): boolean {
-  return arcFlash.equipment !== undefined && MAY_BE_SERVICE.includes(arcFlash.equipment);
+  return isAmong(arcFlash.equipment, MAY_BE_SERVICE);
 }

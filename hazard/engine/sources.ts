@@ -1,5 +1,6 @@
 import type { SourceKind } from '../enumerations';
 import type { Answers, SourceAnswers } from './answers';
+import { isAmong } from './isAmong';
 
 export interface Source extends SourceAnswers {
   readonly index: number;
@@ -14,8 +15,7 @@ const STANDBY_KINDS: readonly SourceKind[] = ['battery unit', 'generator', 'cent
 /** The kinds whose own conductors may be of another phase than the circuit's. */
 const OTHER_PHASE_KINDS: readonly SourceKind[] = ['generator', 'central inverter', 'backfeed'];
 
-export const isStandby = ({ kind }: SourceAnswers) =>
-  kind !== undefined && STANDBY_KINDS.includes(kind);
+export const isStandby = ({ kind }: SourceAnswers) => isAmong(kind, STANDBY_KINDS);
 
 /** A standby source behind transfer equipment, on the conductors of the normal one. */
 export const isBehindTransfer = ({ kind }: SourceAnswers) =>
@@ -34,10 +34,7 @@ function sharesConductors(source: SourceAnswers, all: readonly SourceAnswers[]):
   const { sameConductorsAs } = source;
   return (
     sameConductorsAs !== undefined &&
-    all.some(
-      (other) =>
-        other !== source && other.id === sameConductorsAs && other.sameConductorsAs === undefined,
-    )
+    all.some((other) => other.id === sameConductorsAs && other.sameConductorsAs === undefined)
   );
 }
 
@@ -56,7 +53,7 @@ export function readSources({ sources }: Answers): readonly Source[] {
 /** A source whose presence exposes more than the one circuit. */
 export function exposesMoreThanOneCircuit({ kind, hasOwnConductors }: Source): boolean {
   if (kind === 'shared neutral') return true;
-  return hasOwnConductors && kind !== undefined && OTHER_PHASE_KINDS.includes(kind);
+  return hasOwnConductors && isAmong(kind, OTHER_PHASE_KINDS);
 }
 
 /** What the words of a finding about a source are filled with. */

@@ -2,6 +2,7 @@ import type { EnergySource } from '../content';
 import type { Answers } from './answers';
 import { asksAtService } from './asksAtService';
 import type { Facts } from './facts';
+import { isAmong } from './isAmong';
 import { personParams } from './people';
 import { notAnswered } from './rule';
 import type { Hit } from './rule';
@@ -56,7 +57,7 @@ function supply({ answers, path, voltage }: Facts): Hit[] {
 
 function source(one: Source, all: readonly Source[]): Hit[] {
   const { index, id, kind, from, system, hasOwnConductors } = one;
-  const asksSystem = hasOwnConductors && kind !== undefined && OF_A_SYSTEM.includes(kind);
+  const asksSystem = hasOwnConductors && isAmong(kind, OF_A_SYSTEM);
   return missing(
     `/sources/${index}`,
     { id: uniqueId(id, index, all), kind, from, ...(asksSystem ? { system } : {}) },

@@ -9,6 +9,7 @@ import {
 } from '../shock';
 import type { JobTaskFacts } from '../tasks';
 import type { Answers } from './answers';
+import { isAmong } from './isAmong';
 import { exposesMoreThanOneCircuit } from './sources';
 import type { Source } from './sources';
 
@@ -53,71 +54,64 @@ interface Question {
   isBelowFiftyVolts: boolean;
 }
 
-function shockOf(
-  { system, circuitVolts }: { system: SystemCode; circuitVolts: number | undefined },
-  isWhole: boolean,
+interface Circuit {
+  circuitVolts: number | undefined;
+  /** The phase-to-phase voltages of the systems that other sources bring. */
+  others: readonly number[];
+  isWhole: boolean;
+  isSeveral: boolean;
+}
+
+/** What enters the shock table, and the highest voltage, of a supply whose system is answered. */
+function supplied(
+  system: SystemCode,
+  { circuitVolts, others, isWhole, isSeveral }: Circuit,
   edition: Edition,
-): { volts: number; because: BoundaryVoltsReason } {
-  const isKnown = circuitVolts !== undefined;
-  return shockTableVolts(
-    {
-      system,
-      circuitVolts: isKnown ? circuitVolts : phaseToPhaseVoltsOf(system, edition),
-      exposure: isWhole ? 'whole equipment' : 'one circuit',
-    },
-    edition,
-  );
+): { phaseToPhaseVolts: number; shock: NonNullable<Voltage['shock']> } {
+  const ownVolts = phaseToPhaseVoltsOf(system, edition);
+  const exposure = isWhole ? 'whole equipment' : 'one circuit';
+  const question = { system, circuitVolts: circuitVolts ?? ownVolts, exposure } as const;
+  const own = shockTableVolts(question, edition);
+  const phaseToPhaseVolts = Math.max(ownVolts, ...others);
+  // Beside a second system, whatever of the two is higher can be reached.
+  const shock =
+    isSeveral && phaseToPhaseVolts > own.volts
+      ? { volts: phaseToPhaseVolts, because: 'several systems' as const }
+      : own;
+  return { phaseToPhaseVolts, shock };
 }
 
 /** Which voltages count, for the tables, the instrument, the gloves and a touch. */
 export function voltageOf(question: Question, edition: Edition): Voltage {
   const { answers, task, sources, isBelowFiftyVolts } = question;
   const { system, circuitVolts, exposure, workVolts } = answers.supply;
-  const ownVolts = system && phaseToPhaseVoltsOf(system, edition);
   const others = sources.flatMap((source) =>
     source.system ? [phaseToPhaseVoltsOf(source.system, edition)] : [],
   );
-  const phaseToPhaseVolts = ownVolts && Math.max(ownVolts, ...others);
-  const lowest = Math.min(...SYSTEMS.map((one) => phaseToPhaseVoltsOf(one, edition)));
-
-  const isOfSystem =
-    system !== undefined &&
-    circuitVolts !== undefined &&
-    circuitVoltsOf(system, edition).includes(circuitVolts);
-  const equipment = answers.arcFlash.equipment;
+  const isOfSystem = system !== undefined && isAmong(circuitVolts, circuitVoltsOf(system, edition));
   const isWholeEquipmentTested =
     exposure !== 'one circuit' ||
     task.alwaysWholeEquipment ||
     !isOfSystem ||
-    (equipment !== undefined && WHOLE_EQUIPMENT.includes(equipment));
+    isAmong(answers.arcFlash.equipment, WHOLE_EQUIPMENT);
   const isWhole = isWholeEquipmentTested || sources.some(exposesMoreThanOneCircuit);
-
-  const shock =
-    system === undefined || phaseToPhaseVolts === undefined
-      ? undefined
-      : shockOf({ system, circuitVolts }, isWhole, edition);
-  // Beside a second system, whatever of the two is higher can be reached.
   const isSeveral = sources.some((source) => source.system && source.system !== system);
-  const highest =
-    shock && phaseToPhaseVolts && isSeveral && phaseToPhaseVolts > shock.volts
-      ? { volts: phaseToPhaseVolts, because: 'several systems' as const }
-      : shock;
+
+  const known = system && supplied(system, { circuitVolts, others, isWhole, isSeveral }, edition);
+  const lowest = Math.min(...SYSTEMS.map((one) => phaseToPhaseVoltsOf(one, edition)));
+  const reachedVolts = known && Math.max(known.phaseToPhaseVolts, circuitVolts ?? 0);
+  const touchVolts = isWhole || isSeveral ? reachedVolts : circuitVolts;
   return {
-    phaseToPhaseVolts,
-    atLeastVolts: Math.max(phaseToPhaseVolts ?? lowest, ...others),
+    phaseToPhaseVolts: known?.phaseToPhaseVolts,
+    atLeastVolts: Math.max(known?.phaseToPhaseVolts ?? lowest, ...others),
     isOfSystem,
-    isPhaseToNeutral: !isOfSystem || circuitVolts !== ownVolts,
+    isPhaseToNeutral: !isOfSystem || circuitVolts !== phaseToPhaseVoltsOf(system, edition),
     isWholeEquipmentTested,
     shock:
-      highest && isBelowFiftyVolts && workVolts !== undefined
+      known && isBelowFiftyVolts && workVolts !== undefined
         ? { volts: workVolts, because: 'below 50 V' }
-        : highest,
-    touchVolts:
-      isBelowFiftyVolts || isWhole || isSeveral
-        ? isBelowFiftyVolts
-          ? workVolts
-          : phaseToPhaseVolts && Math.max(phaseToPhaseVolts, circuitVolts ?? 0)
-        : circuitVolts,
-    gloveVolts: highest ? Math.max(highest.volts, circuitVolts ?? 0) : circuitVolts,
+        : known?.shock,
+    touchVolts: isBelowFiftyVolts ? workVolts : touchVolts,
+    gloveVolts: known ? Math.max(known.shock.volts, circuitVolts ?? 0) : circuitVolts,
   };
 }

@@ -20,7 +20,7 @@ export const energizedWorkHasReason: Rule = {
     // Which reasons are admitted follows from the task.
     if (name === undefined) return [notAnswered('/job/task', { reason })];
     // A repair under the name of testing has a rule of its own.
-    if (reason === 'testing' && task.kind === 'repair') return [];
+    if (reason === 'testing') return [];
     return task.admittedReasons.includes(reason) ? [] : [{ path, params: { task: name, reason } }];
   },
 };

@@ -1,3 +1,4 @@
+import { isAmong } from '../engine/isAmong';
 import { answeredValues } from '../engine/read';
 import { OFF, PLAN_AND_WORK } from '../engine/rule';
 import type { Rule } from '../engine/rule';
@@ -19,7 +20,7 @@ export const everyoneLocks: Rule = {
     return sources.flatMap((source) => {
       if (!isOpened(source) || source.held === 'exclusive control') return [];
       const locked = answeredValues(source.lockedBy);
-      const without = workers.filter(({ id }) => id === undefined || !locked.includes(id));
+      const without = workers.filter(({ id }) => !isAmong(id, locked));
       if (without.length === 0) return [];
       const names = without.map(({ name, id }) => name ?? id ?? '').join(', ');
       return [

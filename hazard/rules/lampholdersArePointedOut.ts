@@ -1,4 +1,5 @@
 import type { JobTask } from '../enumerations';
+import { isAmong } from '../engine/isAmong';
 import { ALL, PLAN_AND_WORK } from '../engine/rule';
 import type { Rule } from '../engine/rule';
 
@@ -20,7 +21,8 @@ export const lampholdersArePointedOut: Rule = {
   citations: ['ulLampholders', 'face87-55'],
   find({ answers }) {
     const { lamps, task } = answers.job;
-    const isAtLampholders = task !== undefined && LAMPHOLDER_TASKS.includes(task);
-    return lamps === 'double-ended' && isAtLampholders ? [{ path: '/job/lamps' }] : [];
+    return lamps === 'double-ended' && isAmong(task, LAMPHOLDER_TASKS)
+      ? [{ path: '/job/lamps' }]
+      : [];
   },
 };

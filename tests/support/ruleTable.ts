@@ -1,6 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import { assess, REQUIRED_ITEM_IDS } from '@/hazard';
 import type { Assessment, CloseOut, Proof, Stage, WorksheetContent } from '@/hazard';
+import { missingParams } from './findingParams';
 import {
   soundEnergizedWorksheet,
   soundTestingWorksheet,
@@ -100,6 +101,7 @@ export function assessed({ content, ...options }: Whole): Assessment {
       citation.standard === '',
   );
   expect(unsourced).toHaveLength(0);
+  expect(result.findings.flatMap(missingParams)).toEqual([]);
   return result;
 }
 

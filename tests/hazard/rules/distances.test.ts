@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import { assess } from '@/hazard';
-import { BELOW_FIFTY } from '../../support/ruleEdits';
+import { BELOW_FIFTY, CIRCUIT_277 } from '../../support/ruleEdits';
 import type { Edits } from '../../support/ruleTable';
 import { assessBase, found, gone } from '../../support/ruleTable';
 import { soundWorksheet } from '../../support/soundWorksheet';
@@ -83,5 +83,38 @@ describe('what a clamp is to read (I = P / V)', () => {
     const { content, on } = soundWorksheet();
     const supply = { ...content.supply, watts: 1e308, circuitVolts: 1e-8 };
     expect(assess({ ...content, supply }, { on }).expected.loadAmperes).toBeNull();
+  });
+});
+
+describe('beside a second system (the higher of the two can be reached)', () => {
+  const other = (system: unknown): Edits => ({ 'sources/1/system': system });
+  it.each<[string, Edits, number, string]>([
+    ['none', {}, 120, 'one circuit'],
+    ['the same one', other('208Y/120'), 120, 'one circuit'],
+    ['a higher one', other('480Y/277'), 480, 'several systems'],
+    ['a lower one', { 'supply/system': '120/240', ...other('208Y/120') }, 240, 'several systems'],
+    [
+      'a lower one, a single-phase load above 250 V to ground',
+      { ...CIRCUIT_277, ...other('208Y/120') },
+      480,
+      'single-phase above 250 V to ground',
+    ],
+    [
+      'a lower one beside whole equipment',
+      { ...CIRCUIT_277, ...other('208Y/120'), 'supply/exposure': 'whole equipment' },
+      480,
+      'whole equipment',
+    ],
+  ])('%s', (_, edits, volts, because) => {
+    expect(assessBase('O', edits).boundaries).toMatchObject({ volts, because });
+  });
+
+  it('asks the instrument for the highest that is known, or the lowest that there is', () => {
+    const tester = (edits: Edits) =>
+      assessBase('O', { 'supply/system': gone, ...edits }).equipment.find(
+        ({ id }) => id === 'contact-tester',
+      )?.params['volts'];
+    expect(tester({})).toBe(208);
+    expect(tester({ ...other('480Y/277'), 'sources/0/system': '208Y/120' })).toBe(480);
   });
 });

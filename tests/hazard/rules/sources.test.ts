@@ -174,6 +174,18 @@ describeRule('sources.not-opened', '1910.333(b)(2)(ii)(B)', [
   ],
   [
     'O',
+    'nobody is asked for a lock on it yet',
+    {
+      'crew/1/worksOnCircuit': true,
+      'sources/0/openedAt': gone,
+      'sources/0/lockedBy': [],
+      'sources/1/lockedBy': ['c1', 'c2'],
+      'sources/2/lockedBy': ['c1', 'c2'],
+    },
+    ['open /sources/0/openedAt'],
+  ],
+  [
+    'O',
     'two of them',
     { 'sources/0/openedAt': 'none', 'sources/2/openedAt': 'none' },
     ['stop /sources/0/openedAt', 'stop /sources/2/openedAt'],
