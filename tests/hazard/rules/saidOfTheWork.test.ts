@@ -1,12 +1,9 @@
-import { describe, expect, it } from 'vitest';
-import type { Finding } from '@/hazard';
+import { describeSaid } from '../../support/describeSaid';
+import type { SaidRow } from '../../support/describeSaid';
 import { FAR, SECOND_QUALIFIED } from '../../support/ruleEdits';
-import type { Base, Edits } from '../../support/ruleTable';
-import { assessBase, gone } from '../../support/ruleTable';
+import type { Edits } from '../../support/ruleTable';
+import { gone } from '../../support/ruleTable';
 import { soundWorksheet } from '../../support/soundWorksheet';
-
-type Said = [finding: string, params: Finding['params']];
-type Row = [code: string, title: string, base: Base, edits: Edits, said: Said[]];
 
 const BATTERY = {
   id: 'b1',
@@ -35,7 +32,7 @@ const LEAD = { index: 0, name: 'Lead' };
 const HELPER = { index: 1, name: 'Helper' };
 const { crew = [] } = soundWorksheet().content;
 
-const rows: Row[] = [
+const rows: SaidRow[] = [
   [
     'arc.task-does-not-fit',
     'a task milder than the job',
@@ -284,11 +281,4 @@ const rows: Row[] = [
   ],
 ];
 
-describe('what a finding says, for its words to be filled with', () => {
-  it.each(rows)('%s: %s', (code, _title, base, edits, said) => {
-    const findings = assessBase(base, edits).findings.filter((finding) => finding.code === code);
-    expect(
-      findings.map(({ severity, path, params }) => [`${severity} ${path}`, params]),
-    ).toStrictEqual(said);
-  });
-});
+describeSaid('the work', rows);
