@@ -8,10 +8,10 @@ export const testingIsNotRepair: Rule = {
   stages: PLAN_AND_WORK,
   appliesTo: ENERGIZED,
   citations: ['nfpa70e.permitExemptions'],
-  find({ answers, task: facts }) {
+  find({ answers }) {
     const { task } = answers.job;
-    const isRepair = task !== undefined && facts.kind === 'repair';
-    if (!isRepair || answers.decision.reason !== 'testing') return [];
+    // Testing for that reason is a path of its own: here every task is a repair.
+    if (task === undefined || answers.decision.reason !== 'testing') return [];
     return [{ path: '/decision/reason', params: { task } }];
   },
 };

@@ -3,11 +3,10 @@ import type { Hit, Rule } from '../engine/rule';
 import { personParams } from '../engine/people';
 import type { Person } from '../engine/people';
 
-/** The best that is known of anyone else: who could escort. */
-function bestOfOthers(person: Person, crew: readonly Person[]) {
-  const others = crew.filter((other) => other !== person);
-  if (others.some(({ qualification }) => qualification === 'yes')) return 'yes';
-  return others.some(({ qualification }) => qualification === 'unknown') ? 'unknown' : 'no';
+/** The best that is known of anyone: who could escort somebody who is not known to be qualified. */
+function bestOf(crew: readonly Person[]) {
+  if (crew.some(({ qualification }) => qualification === 'yes')) return 'yes';
+  return crew.some(({ qualification }) => qualification === 'unknown') ? 'unknown' : 'no';
 }
 
 /**
@@ -28,10 +27,9 @@ export const unqualifiedStayOutside: Rule = {
       const params = { ...personParams(person), ...(nearest && { closest: nearest }) };
       if (qualification === 'yes') return [];
       if (nearest === 'limited with escort') {
-        const escort = bestOfOthers(person, crew);
+        const escort = bestOf(crew);
         if (escort === 'yes') return [];
-        const isSure = escort === 'no' && qualification === 'no';
-        return [{ path, params, severity: isSure ? 'stop' : 'open' }];
+        return [{ path, params, severity: escort === 'no' ? 'stop' : 'open' }];
       }
       if (nearest === undefined) return [notAnswered(path, params)];
       if (nearest !== 'restricted' && nearest !== 'limited') return [];

@@ -1,6 +1,7 @@
 import { minutesBetween } from '../engine/moment';
-import { ALL, notAnswered, PLAN_AND_WORK } from '../engine/rule';
-import type { Hit, Rule } from '../engine/rule';
+import { ALL, PLAN_AND_WORK } from '../engine/rule';
+import type { Rule } from '../engine/rule';
+import { windowHits } from '../engine/window';
 
 const LONGEST_MINUTES = 12 * 60;
 
@@ -11,14 +12,10 @@ export const windowIsShort: Rule = {
   stages: PLAN_AND_WORK,
   appliesTo: ALL,
   citations: ['own.window'],
-  find({ answers }) {
-    const { startsAt, endsAt } = answers.job;
-    if (startsAt === undefined || endsAt === undefined) {
-      const hits: Hit[] = startsAt === undefined ? [notAnswered('/job/startsAt')] : [];
-      return endsAt === undefined ? [...hits, notAnswered('/job/endsAt')] : hits;
-    }
-    const minutes = minutesBetween(startsAt, endsAt);
-    if (minutes <= LONGEST_MINUTES) return [];
-    return [{ path: '/job/endsAt', params: { minutes, limit: LONGEST_MINUTES } }];
-  },
+  find: ({ answers }) =>
+    windowHits(answers.job, (startsAt, endsAt) => {
+      const minutes = minutesBetween(startsAt, endsAt);
+      if (minutes <= LONGEST_MINUTES) return [];
+      return [{ path: '/job/endsAt', params: { minutes, limit: LONGEST_MINUTES } }];
+    }),
 };

@@ -1,5 +1,6 @@
-import { ALL, notAnswered, PLAN_AND_WORK } from '../engine/rule';
-import type { Hit, Rule } from '../engine/rule';
+import { ALL, PLAN_AND_WORK } from '../engine/rule';
+import type { Rule } from '../engine/rule';
+import { windowHits } from '../engine/window';
 
 /** `window.reversed`: the work ends after it begins. */
 export const windowRunsForward: Rule = {
@@ -8,13 +9,10 @@ export const windowRunsForward: Rule = {
   stages: PLAN_AND_WORK,
   appliesTo: ALL,
   citations: ['own.window'],
-  find({ answers }) {
-    const { startsAt, endsAt } = answers.job;
-    if (startsAt === undefined || endsAt === undefined) {
-      const hits: Hit[] = startsAt === undefined ? [notAnswered('/job/startsAt')] : [];
-      return endsAt === undefined ? [...hits, notAnswered('/job/endsAt')] : hits;
-    }
-    if (endsAt.instant > startsAt.instant) return [];
-    return [{ path: '/job/endsAt', params: { startsAt: startsAt.text, endsAt: endsAt.text } }];
-  },
+  find: ({ answers }) =>
+    windowHits(answers.job, (startsAt, endsAt) =>
+      endsAt.instant > startsAt.instant
+        ? []
+        : [{ path: '/job/endsAt', params: { startsAt: startsAt.text, endsAt: endsAt.text } }],
+    ),
 };

@@ -144,26 +144,35 @@ describe('the current of a load', () => {
 
 describe('the current through a body, IEC 60479-1 (from memory)', () => {
   it.each([
-    { volts: 100, p5: 1e5 / 990, p50: 1e5 / 1725, p95: 1e5 / 3125 },
-    { volts: 120, p5: 130.7, p50: 75.7, p95: 43.4 },
-    { volts: 125, p5: 125e3 / 900, p50: 125e3 / 1550, p95: 125e3 / 2675 },
-    { volts: 150, p5: 150e3 / 850, p50: 150e3 / 1400, p95: 150e3 / 2350 },
-    { volts: 175, p5: 175e3 / 825, p50: 175e3 / 1325, p95: 175e3 / 2175 },
-    { volts: 200, p5: 200e3 / 800, p50: 200e3 / 1275, p95: 200e3 / 2050 },
-    { volts: 225, p5: 225e3 / 775, p50: 225e3 / 1225, p95: 225e3 / 1900 },
-    { volts: 277, p5: 368.0, p50: 242.3, p95: 161.6 },
-    { volts: 400, p5: 400e3 / 700, p50: 400e3 / 950, p95: 400e3 / 1275 },
-    { volts: 480, p5: 750.0, p50: 551.7, p95: 408.5 },
-    { volts: 500, p5: 500e3 / 625, p50: 500e3 / 850, p95: 500e3 / 1150 },
-    { volts: 700, p5: 700e3 / 575, p50: 700e3 / 775, p95: 700e3 / 1050 },
-    { volts: 850, p5: 850e3 / 575, p50: 850e3 / 775, p95: 850e3 / 1050 },
-    { volts: 1000, p5: 1e6 / 575, p50: 1e6 / 775, p95: 1e6 / 1050 },
-  ])('at $volts V (from memory)', ({ volts, p5, p50, p95 }) => {
+    [100, 990, 1725, 3125],
+    [125, 900, 1550, 2675],
+    [150, 850, 1400, 2350],
+    [175, 825, 1325, 2175],
+    [200, 800, 1275, 2050],
+    [225, 775, 1225, 1900],
+    [400, 700, 950, 1275],
+    [500, 625, 850, 1150],
+    [700, 575, 775, 1050],
+    [850, 575, 775, 1050],
+    [1000, 575, 775, 1050],
+  ])('at %d V: %d, %d and %d ohms (from memory)', (volts, p5, p50, p95) => {
+    const current = touchMilliamperes({ volts });
+    expect(current.p5).toBeCloseTo((1000 * volts) / p5, 9);
+    expect(current.p50).toBeCloseTo((1000 * volts) / p50, 9);
+    expect(current.p95).toBeCloseTo((1000 * volts) / p95, 9);
+    expect(current.citation).toMatchObject({ standard: 'IEC 60479-1', confidence: 'memory' });
+  });
+
+  // Worked by hand, the impedance on the line between two rows.
+  it.each([
+    [120, 130.7, 75.7, 43.4],
+    [277, 368.0, 242.3, 161.6],
+    [480, 750.0, 551.7, 408.5],
+  ])('at %d V, between two rows: %d, %d and %d mA', (volts, p5, p50, p95) => {
     const current = touchMilliamperes({ volts });
     expect(current.p5).toBeCloseTo(p5, 1);
     expect(current.p50).toBeCloseTo(p50, 1);
     expect(current.p95).toBeCloseTo(p95, 1);
-    expect(current.citation).toMatchObject({ standard: 'IEC 60479-1', confidence: 'memory' });
   });
 
   it('never falls as the voltage rises, and is largest at the 5th percentile', () => {
