@@ -33,7 +33,6 @@ export const PROOF: readonly Stage[] = ['work'];
 export const CLOSE_OUT: readonly Stage[] = ['close-out'];
 
 export const OFF: readonly Path[] = ['off'];
-export const TESTING: readonly Path[] = ['testing'];
 export const ENERGIZED: readonly Path[] = ['energized'];
 export const OFF_AND_TESTING: readonly Path[] = ['off', 'testing'];
 export const OFF_AND_ENERGIZED: readonly Path[] = ['off', 'energized'];

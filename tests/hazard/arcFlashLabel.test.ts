@@ -34,6 +34,7 @@ describe('what a label says, NFPA 70E-2024 130.5(H)', () => {
     [{ incidentEnergyCalPerCm2: 1.2 }, 'incident energy', null, 1.2],
     [{ incidentEnergyCalPerCm2: 1.19 }, 'incident energy', null, null],
     [{ minimumArcRatingCalPerCm2: 8 }, 'incident energy', null, 8],
+    [{ minimumArcRatingCalPerCm2: 0.5 }, 'incident energy', null, 0.5],
     // Table 130.7(C)(15)(c).
     [{ ppeCategory: 1 }, 'ppe category', 1, 4],
     [{ ppeCategory: 2 }, 'ppe category', 2, 8],
@@ -321,6 +322,12 @@ describe('a transformer estimate', () => {
     [27.6, [stop]],
   ])('of %d kA at a limit of 25 kA', (estimate, expected) => {
     expect(severities(evaluate(estimate))).toEqual(expected);
+  });
+
+  it('gives way to a fault current that is given and as large', () => {
+    const given = { availableFaultKiloamperes: 30 };
+    expect(severities(evaluate(30, given))).toEqual(['stop /arcFlash/availableFaultKiloamperes']);
+    expect(severities(evaluate(30.1, given))).toEqual([stop]);
   });
 
   it('gives both figures with the caution, and keeps the category', () => {

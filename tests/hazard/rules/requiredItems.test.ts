@@ -96,6 +96,7 @@ const TESTER: Row[] = ['contact-tester', 'known-source'].flatMap((id): Row[] => 
   [id, 'T', {}, true],
   [id, 'T', FAR, false],
   [id, 'W', {}, false],
+  [id, 'W', { 'job/task': 'test or troubleshoot' }, false],
 ]);
 const OFF_ONLY: Row[] = [
   'lock-and-tag',
@@ -202,6 +203,14 @@ describe('what must be at hand (1910.335; 70E Tables 130.5(G), 130.7(C)(15)(c))'
       const listed = ids(base, edits);
       expect(listed).toEqual(REQUIRED_ITEM_IDS.filter((id) => listed.includes(id)));
     }
+  });
+
+  it('cites the table that the rating comes from', () => {
+    const table = (edits: Edits) =>
+      assessBase('O', edits).equipment.find(({ id }) => id === 'hearing-protection')?.citation
+        .table;
+    expect(table(category(2))).toBe('Table 130.7(C)(15)(c)');
+    expect(table(energy(8))).toBe('Table 130.5(G)');
   });
 
   it('cites where each item comes from', () => {

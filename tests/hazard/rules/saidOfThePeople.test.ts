@@ -159,6 +159,38 @@ const escorts: SaidRow[] = [
 
 const decisions: SaidRow[] = [
   [
+    'decision.below-fifty-not-so',
+    '50 V (29 CFR 1910.333(a)(1))',
+    'W',
+    {
+      'decision/reason': 'below 50 V',
+      'supply/workVolts': 50,
+      'supply/higherVoltsExposed': false,
+    },
+    [['stop /supply/workVolts', { volts: 50 }]],
+  ],
+  [
+    'sources.egress-unknown',
+    'none, beside a supply',
+    'O',
+    { egressSupply: ['none after checking', 'generator'] },
+    [['open /egressSupply', { supply: 'none after checking' }]],
+  ],
+  [
+    'sources.egress-unknown',
+    'nobody knows',
+    'O',
+    { egressSupply: ['unknown'] },
+    [['stop /egressSupply', { supply: 'unknown' }]],
+  ],
+  [
+    'sources.control-unlisted',
+    'an automatic control that is not listed',
+    'O',
+    { 'supply/switching': ['automatic'] },
+    [['open /sources', { kind: 'control' }]],
+  ],
+  [
     'decision.testing-is-not-repair',
     'a repair under the name of testing',
     'W',

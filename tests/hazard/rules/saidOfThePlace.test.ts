@@ -14,6 +14,27 @@ const noStart: SaidRow[4][number] = ['open /job/startsAt', { field: 'job.startsA
 const noEnd: SaidRow[4][number] = ['open /job/endsAt', { field: 'job.endsAt' }];
 
 const ladders: SaidRow[] = [
+  [
+    'supply.high-leg',
+    'a high-leg delta (NEC 110.15)',
+    'O',
+    { 'supply/system': '240/120 high-leg' },
+    [['caution /supply/system', { system: '240/120 high-leg' }]],
+  ],
+  [
+    'supply.high-leg',
+    'a phase that reads as one',
+    'O',
+    { 'supply/readings/phaseToNeutral': [120, 208, 121] },
+    [['caution /supply/readings/phaseToNeutral', { volts: 208 }]],
+  ],
+  [
+    'shock.grounded-surface',
+    'live work from a lift that is grounded',
+    'W',
+    { 'surroundings/access': 'lift', 'surroundings/lift': { fallProtection: true } },
+    [['stop /surroundings/access', { kind: 'lift' }]],
+  ],
   // Work at 10 ft, 1 ft above the ceiling: 4 ft of a 6 ft ladder and a reach of 6 ft (common practice).
   [
     'surroundings.ladder-short',

@@ -55,6 +55,28 @@ const locks: SaidRow[] = [
 
 const proofs: SaidRow[] = [
   [
+    'absence.voltage-present',
+    'a reading that does not say where',
+    'O work',
+    {
+      'proof/readings/6': {
+        from: 'B',
+        to: 'G',
+        volts: 120,
+        current: 'ac',
+        at: '2026-12-01T08:50:00-06:00',
+      },
+    },
+    [['stop /proof/readings/6', { index: 6, volts: 120, current: 'ac', from: 'B', to: 'G' }]],
+  ],
+  [
+    'closeout.locks-left',
+    'no word of the locks',
+    'O close',
+    { 'closeOut/locksRemoved': gone },
+    [['open /closeOut/locksRemoved', { field: 'closeOut.locksRemoved' }]],
+  ],
+  [
     'absence.not-proved',
     'not before, and no word of after',
     'O work',

@@ -178,6 +178,13 @@ describeRule('surroundings.egress-dark', '1910.37(a)(4), (b)(1), (d)(2); NFPA 10
   ],
   [
     'O',
+    'none, beside a supply: one of them is true',
+    { ...OCCUPIED, egress: gone, egressSupply: ['none after checking', 'generator'] },
+    ['open', '?open'],
+    ['sources.egress-unknown'],
+  ],
+  [
+    'O',
     'egressReaches is not answered',
     { ...OCCUPIED, egress: gone, egressReaches: gone },
     ['open', '?open'],

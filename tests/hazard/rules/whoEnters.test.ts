@@ -86,6 +86,13 @@ const rows: Row[] = [
     [],
     true,
   ],
+  [
+    'a test under the name of another reason, from outside',
+    'W',
+    { ...LEAD_OUTSIDE, 'job/task': 'test or troubleshoot' },
+    [],
+    false,
+  ],
   ['both', 'W', HELPER_INSIDE, ['Lead', 'Helper'], true],
 ];
 
