@@ -14,7 +14,7 @@ import { ArchiveList } from './ArchiveList';
 import { archiveQuery } from './archiveQueries';
 import { clearFilters, Filters } from './Filters';
 import { filterCount, queryOf, type ArchiveFilters } from './filters';
-import { keepListPlace, useListPlace, useTopOf } from './listPlace';
+import { keepListPlace, useListPlace, useTopOf } from '../shell/listPlace';
 import { RecordPanel } from './RecordPanel';
 import { SearchBox } from './SearchBox';
 import { useArchiveAddress, type ArchiveAddress } from './useArchiveAddress';

@@ -1,5 +1,7 @@
+import { usePathname } from 'expo-router';
 import type { ReactNode } from 'react';
 import { Pressable, StyleSheet, View } from 'react-native';
+import { useListPlace, useTopOf } from '../shell/listPlace';
 import { layout, space, touch } from '../theme/tokens';
 import { useBreakpoint } from '../theme/useBreakpoint';
 import { useMessages } from '../i18n/useMessages';
@@ -45,6 +47,20 @@ function Words({ over, title, under, level }: RecordHead & { level?: 2 }) {
   );
 }
 
+/** A record in place of the list, from its top. */
+function RecordOver({
+  head,
+  body,
+  back,
+}: NonNullable<Props['record']> & { back: { label: string; onPress: () => void } }) {
+  useTopOf(head.title);
+  return (
+    <Screen title={head.title} back={back} head={<Words {...head} />}>
+      <View style={styles.body}>{body}</View>
+    </Screen>
+  );
+}
+
 /** A list with the open record beside it; where there is no room beside, the record covers the list. */
 export function RegisterFrame({
   place,
@@ -58,16 +74,10 @@ export function RegisterFrame({
 }: Props) {
   const { register } = useMessages();
   const { isWide, isPhone } = useBreakpoint();
-  if (record !== undefined && !isWide) {
-    return (
-      <Screen
-        title={record.head.title}
-        back={{ label: title, onPress: onClose }}
-        head={<Words {...record.head} />}
-      >
-        <View style={styles.body}>{record.body}</View>
-      </Screen>
-    );
+  const isCovered = record !== undefined && !isWide;
+  useListPlace(usePathname(), !isCovered);
+  if (isCovered) {
+    return <RecordOver {...record} back={{ label: title, onPress: onClose }} />;
   }
   return (
     <Screen

@@ -7,6 +7,7 @@ import { MultiChoice, Select, Text, TextField } from '../ui';
 import { circuitsOf, PanelFields, panelFormSchema } from './PanelFields';
 import { RegisterFormFrame } from './RegisterFormFrame';
 import { useRegisterForm } from './useRegisterForm';
+import { zoneWord } from './zoneWord';
 
 const PLAN = ['contact', 'rescue', 'firstAid', 'aedAt'] as const;
 
@@ -156,7 +157,7 @@ export function SiteForm({ site, people, onDone, onCancel }: Props) {
         hint={words.timeZoneHint}
         options={offeredZones.map((zone) => ({
           value: zone,
-          label: zones[zone] ?? zone,
+          label: zoneWord(zones, zone),
           note: zone,
         }))}
         value={value.timeZone}

@@ -17,6 +17,7 @@ import {
 import { useSaveRecord } from './registerMutations';
 import { RetireForm } from './RetireForm';
 import type { RegisterViewControl } from './useRegisterView';
+import { zoneWord } from './zoneWord';
 
 function Buttons({ site, view }: { site: Site; view: RegisterViewControl }) {
   const messages = useMessages();
@@ -155,7 +156,7 @@ export function SitePanel({ site, people, view }: Props) {
         facts={[
           {
             label: words.timeZone,
-            value: zones[site.timeZone] ?? site.timeZone,
+            value: zoneWord(zones, site.timeZone),
             note: site.timeZone,
           },
           {

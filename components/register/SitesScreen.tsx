@@ -22,6 +22,7 @@ import { SiteForm } from './SiteForm';
 import { SitePanel } from './SitePanel';
 import { TwoLines } from './TwoLines';
 import { useRegisterView, type RegisterViewControl } from './useRegisterView';
+import { zoneWord } from './zoneWord';
 
 const RECORD = 440;
 const KEYS = { name: (site: Site) => site.name, address: (site: Site) => site.address };
@@ -52,7 +53,7 @@ function useColumns(view: RegisterViewControl, sort: string): Column<Site>[] {
       label: words.timeZone,
       width: 112,
       from: 1000,
-      cell: ({ timeZone }) => zones[timeZone]?.split(', ')[0] ?? timeZone,
+      cell: ({ timeZone }) => zoneWord(zones, timeZone).split(', ')[0],
     },
     {
       key: 'systems',

@@ -1,5 +1,6 @@
 import { router, useLocalSearchParams, type Href } from 'expo-router';
 import { z } from 'zod';
+import { keepListPlace } from '../shell/listPlace';
 import { useBreakpoint } from '../theme/useBreakpoint';
 
 const ACTS = ['edit', 'retire', 'test', 'import'] as const;
@@ -44,8 +45,12 @@ export function useRegisterView(pathname: '/people' | '/sites' | '/rubber-goods'
     set: (change) => router.replace(at({ ...view, ...change })),
     open: ({ id, act, done }) => {
       const next = at({ ...view, id, act, done });
-      if (isWide || view.id !== undefined || view.act !== undefined) router.replace(next);
-      else router.push(next);
+      if (isWide || view.id !== undefined || view.act !== undefined) {
+        router.replace(next);
+        return;
+      }
+      keepListPlace(pathname);
+      router.push(next);
     },
     close: () => router.replace(at({ ...view, id: undefined, act: undefined, done: undefined })),
   };

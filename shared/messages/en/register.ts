@@ -36,7 +36,7 @@ export const register = {
     loading: 'Loading worksheets',
     older: 'Show older ones',
   },
-  and: (first: string, rest: number) => `${first} and ${rest} more`,
+  and: (first: string, rest: number) => `${first} and ${rest}\u00A0more`,
 
   people: {
     title: 'People',

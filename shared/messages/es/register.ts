@@ -46,7 +46,7 @@ export const register: Words<typeof en> = {
     loading: 'Cargando hojas',
     older: 'Mostrar más antiguas',
   },
-  and: (first, rest) => `${first} y ${rest} más`,
+  and: (first, rest) => `${first} y ${rest}\u00A0más`,
 
   people: {
     title: 'Personas',
