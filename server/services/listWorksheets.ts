@@ -77,13 +77,31 @@ function wornOn(rubberGoods: string) {
     WHERE content #>> '{protectiveEquipment,rubberGoodsId}' = ${sequelize.escape(rubberGoods)})`);
 }
 
-/** `from` and `to` are whole days, both included, on the calendar of the worksheet's site. */
+/** Midnight UTC so many days after a day, and none before 1970: nothing is older. */
+const dayAfter = (day: string, days: number) =>
+  new Date(Math.max(0, Date.parse(day) + days * 86_400_000));
+
+/**
+ * `from` and `to` are whole days, both included, on the calendar of the
+ * worksheet's site. Wherever that is, its day lies within a day of the one in
+ * UTC: that bound is one that an index can find.
+ */
 function createdWithin(from: string | undefined, to: string | undefined) {
   const zone = `coalesce((SELECT time_zone FROM sites WHERE sites.id = "Worksheet"."site_id"), 'UTC')`;
   const day = `("Worksheet"."created_at" AT TIME ZONE ${zone})::date`;
   return [
-    ...(from === undefined ? [] : [literal(`${day} >= ${sequelize.escape(from)}`)]),
-    ...(to === undefined ? [] : [literal(`${day} <= ${sequelize.escape(to)}`)]),
+    ...(from === undefined
+      ? []
+      : [
+          { createdAt: { [Op.gte]: dayAfter(from, -1) } },
+          literal(`${day} >= ${sequelize.escape(from)}`),
+        ]),
+    ...(to === undefined
+      ? []
+      : [
+          { createdAt: { [Op.lt]: dayAfter(to, 2) } },
+          literal(`${day} <= ${sequelize.escape(to)}`),
+        ]),
   ];
 }
 

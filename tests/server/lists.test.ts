@@ -156,6 +156,9 @@ describe('filters', () => {
     ]);
     expect(await ids(company.safety, { finding: 'absence.voltage-present' })).toEqual([stopped.id]);
     expect(await ids(company.safety, { from: '2026-12-02' })).toEqual([]);
+    const all = await ids(company.safety);
+    expect(await ids(company.safety, { from: '0001-01-01', to: '9999-12-31' })).toEqual(all);
+    expect(await ids(company.safety, { to: '0001-01-01' })).toEqual([]);
     expect(
       await ids(company.safety, { from: '2026-12-01', to: '2026-12-01', state: 'stopped' }),
     ).toEqual([stopped.id]);
