@@ -3,6 +3,7 @@ import type { Locale, Units } from './user';
 import * as format from './format';
 import { itemWords, messages, type Messages } from './messages/index';
 import { sectionOf, type SectionId } from './sections';
+import { date, dateTime } from './text';
 import { closeOutSchema, worksheetContentSchema } from './worksheet';
 
 /** One answered field in words. */
@@ -103,18 +104,24 @@ const UNIT_OF: Readonly<Record<string, (locale: Locale, value: number, units: Un
   'closeOut.egressTestedSeconds': format.seconds,
 };
 
-interface Content {
-  sources?: readonly { id?: string; kind?: string; from?: string }[];
+/** The rows that other answers name. */
+interface Rows {
+  sources?: readonly { id?: string; kind?: string }[];
   crew?: readonly { id?: string; name?: string }[];
 }
 
 class Teller {
   private readonly words: Messages;
+  private readonly sources: NonNullable<Rows['sources']>;
+  private readonly crew: NonNullable<Rows['crew']>;
+
   constructor(
-    private readonly content: Content,
+    { sources = [], crew = [] }: Rows,
     private readonly options: Options,
   ) {
     this.words = messages(options.locale);
+    this.sources = sources;
+    this.crew = crew;
   }
 
   private enumWord(group: Group, value: string): string {
@@ -135,19 +142,24 @@ class Teller {
     }
     const text = String(value);
     if (key === 'job.siteId') return siteName ?? text;
-    if (CREW_IDS.has(key)) return this.content.crew?.find(({ id }) => id === text)?.name ?? text;
+    if (CREW_IDS.has(key)) return this.crew.find(({ id }) => id === text)?.name ?? text;
     if (key === 'sources.sameConductorsAs') return this.sourceName(text);
     if (key === 'protectiveEquipment.ready') return this.itemName(text);
     if (key === 'briefing.topics') return this.topicName(text);
-    if (/(At|validUntil)$/.test(key) && !Number.isNaN(Date.parse(text))) {
+    // Never `Date.parse`: it takes an AED on "Floor 2" for a day in February.
+    if (/(At|validUntil)$/.test(key) && dateTime.safeParse(text).success) {
       return format.dateTimeText(locale, text, timeZone);
     }
-    if (/(On|Through)$/.test(key)) return format.dateText(locale, text);
+    if (/(On|Through)$/.test(key) && date.safeParse(text).success) {
+      return format.dateText(locale, text);
+    }
     const group = GROUP_OF[key];
     return group === undefined ? text : this.enumWord(group, text);
   }
 
   private itemName(id: string): string {
+    // The list is free text to a client: only what has a name of ours is filled in like one.
+    if (!Object.hasOwn(this.words.items, id)) return id;
     return itemWords(this.options.locale, { id, params: {} });
   }
 
@@ -157,18 +169,22 @@ class Teller {
   }
 
   private sourceName(id: string): string {
-    const index = this.content.sources?.findIndex((source) => source.id === id) ?? -1;
-    return index < 0 ? id : this.rowHeading('sources', index);
+    const index = this.sources.findIndex((source) => source.id === id);
+    return index < 0 ? id : this.sourceHeading(index);
   }
 
-  rowHeading(list: string, index: number): string {
-    if (list === 'sources') {
-      const source = this.content.sources?.[index];
-      const kind = source?.kind === undefined ? '' : this.enumWord('sourceKind', source.kind);
-      return `3.${index + 1} ${kind}`.trim();
-    }
-    if (list === 'crew') return this.content.crew?.[index]?.name ?? `${index + 1}`;
-    return `${index + 1}`;
+  private sourceHeading(index: number): string {
+    const kind = this.sources[index]?.kind;
+    return kind === undefined
+      ? `3.${index + 1}`
+      : `3.${index + 1} ${this.enumWord('sourceKind', kind)}`;
+  }
+
+  /** What stands over a row of its own; undefined where the rows stay with what is around them. */
+  rowHeading(key: string, index: number): string | undefined {
+    if (key === 'sources') return this.sourceHeading(index);
+    if (key === 'crew') return this.crew[index]?.name ?? `${index + 1}`;
+    return undefined;
   }
 
   label(key: string): string {
@@ -219,8 +235,7 @@ function collect(place: Place, group: FactGroup, groups: FactGroup[], teller: Te
     if (value.length === 0)
       group.facts.push({ path, label: teller.label(key), value: teller.value(key, value) });
     value.forEach((row: unknown, index) => {
-      const list = key.split('.').at(-1) ?? key;
-      const heading = list === 'groundedSurfaces' ? undefined : teller.rowHeading(list, index);
+      const heading = teller.rowHeading(key, index);
       const own: FactGroup =
         heading === undefined ? group : { section: group.section, heading, facts: [] };
       collect({ schema: element, value: row, key, path: `${path}/${index}` }, own, groups, teller);
@@ -236,7 +251,7 @@ function collect(place: Place, group: FactGroup, groups: FactGroup[], teller: Te
  * A field of the schema can never be missing here: the walk follows the schema.
  */
 export function contentFacts(content: unknown, options: Options): FactGroup[] {
-  const teller = new Teller(content as Content, options);
+  const teller = new Teller(content as Rows, options);
   const groups: FactGroup[] = [];
   for (const [key, schema] of Object.entries(worksheetContentSchema.shape)) {
     const group: FactGroup = { section: sectionOf({ code: '', path: `/${key}` }), facts: [] };
