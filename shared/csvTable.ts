@@ -62,8 +62,12 @@ export const MOST_CSV_ROWS = 1000;
 /** A heading and a value count whatever their case, spaces and dashes. */
 const plain = (value: string) => value.toLowerCase().replace(/[\s_-]+/g, '');
 
-/** An export writes `'` before a cell that a spreadsheet would take for a formula; it is no part of the value. */
-const withoutGuard = (cell: string) => (/^'[=+\-@\t\r]/.test(cell) ? cell.slice(1) : cell);
+/**
+ * An export writes `'` before a cell that a spreadsheet would take for a formula, wide signs
+ * included; it is no part of the value.
+ */
+const withoutGuard = (cell: string) =>
+  /^'[=+\-@\t\r\uFF1D\uFF0B\uFF0D\uFF20]/.test(cell) ? cell.slice(1) : cell;
 
 export interface Columns<C extends string> {
   all: readonly C[];
@@ -79,14 +83,14 @@ export interface Cells<C extends string> {
 
 /** The heading line as positions; every fault of it is named. */
 function readHeading<C extends string>(
-  heading: CsvLine | undefined,
+  heading: CsvLine,
   { all, needed, passedOver }: Columns<C>,
 ): { positions: Map<C, number>; faults: CsvFault[] } {
   const positions = new Map<C, number>();
   const faults: CsvFault[] = [];
-  const line = heading?.line ?? 1;
+  const { line } = heading;
   const ignored = new Set(passedOver.map(plain));
-  heading?.cells.forEach((cell, position) => {
+  heading.cells.forEach((cell, position) => {
     const column = all.find((each) => plain(each) === plain(cell));
     if (column === undefined) {
       if (cell.trim() === '' || ignored.has(plain(cell))) return;
@@ -106,21 +110,22 @@ export function readTable<C extends string>(
   lines: readonly CsvLine[],
   columns: Columns<C>,
 ): { table: Cells<C>[]; faults: CsvFault[] } {
-  const [heading, ...body] = lines;
+  const [heading = { line: 1, cells: [] }, ...body] = lines;
   const { positions, faults } = readHeading(heading, columns);
   // Without its columns no cell means anything: naming a thousand lines would hide the one that is wrong.
   if (faults.length > 0) return { table: [], faults };
   const filled = body.filter(({ cells }) => cells.some((cell) => cell.trim() !== ''));
   if (filled.length === 0) {
-    const line = heading?.line ?? 1;
+    const { line } = heading;
     return { table: [], faults: [{ line, column: null, code: 'no-rows', value: '' }] };
   }
-  if (filled.length > MOST_CSV_ROWS) {
-    const line = filled[MOST_CSV_ROWS]?.line ?? 1;
+  const firstTooMany = filled[MOST_CSV_ROWS];
+  if (firstTooMany !== undefined) {
+    const { line } = firstTooMany;
     const value = String(filled.length);
     return { table: [], faults: [{ line, column: null, code: 'too-many-rows', value }] };
   }
-  const width = heading?.cells.length ?? 0;
+  const width = heading.cells.length;
   const table = filled.map(({ line, cells }) => {
     const extra = cells.slice(width).find((cell) => cell.trim() !== '');
     if (extra !== undefined) {

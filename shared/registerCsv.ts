@@ -68,11 +68,14 @@ export interface CsvPerson {
   units: Units;
 }
 
-const LANGUAGE_NAMES: Readonly<Record<string, Locale>> = { en: 'en-US', es: 'es-MX' };
+const LANGUAGE_NAMES: ReadonlyMap<string, Locale> = new Map([
+  ['en', 'en-US'],
+  ['es', 'es-MX'],
+]);
 
 function localeOf(value: string): Locale | undefined {
   const name = value.toLowerCase();
-  return LOCALES.find((locale) => locale.toLowerCase() === name) ?? LANGUAGE_NAMES[name];
+  return LOCALES.find((locale) => locale.toLowerCase() === name) ?? LANGUAGE_NAMES.get(name);
 }
 
 /** Names of several sites stand in one cell, between `;` or `|`. */
@@ -111,8 +114,7 @@ export function readPeople(
     const locale = language === '' ? 'en-US' : localeOf(language);
     if (locale === undefined) read.fault('language', 'language');
     const units = read.oneOf('units', UNITS, 'units') ?? 'feet';
-    if (faults.length > before) return [];
-    if (!name || !email || !role || !locale) return [];
+    if (faults.length > before || !name || !email || !role || !locale) return [];
     const value = { name, email, role, siteIds, qualifiedThrough, locale, units };
     return [{ line: cells.line, value }];
   });
@@ -179,8 +181,8 @@ export function readRubberGoods(
     if (testedOn && site && testedOn > site.today) read.fault('testedOn', 'after-today');
     read.need('result', read.oneOf('result', ['passed'], 'result'));
     const laboratory = read.text('laboratory') ?? '';
-    if (faults.length > before) return [];
-    if (!site || !kind || !gloveClass || gloveClass === 'zero' || !serial || !testedOn) return [];
+    const whole = site && kind && gloveClass && gloveClass !== 'zero' && serial && testedOn;
+    if (faults.length > before || !whole) return [];
     const test = { testedOn, passed: true, ...(laboratory === '' ? {} : { laboratory }) };
     const value = { siteId: site.id, kind, gloveClass, serial, size, issuedOn, tests: [test] };
     return [{ line: cells.line, value }];
