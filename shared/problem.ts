@@ -49,5 +49,5 @@ export type ProblemDocument = z.infer<typeof problemSchema>;
 /** The name behind `/problems/…`, or `unexpected` for a type this client does not know. */
 export function problemName(type: string): ProblemName {
   const name = type.replace(/^.*\/problems\//, '');
-  return name in PROBLEMS ? (name as ProblemName) : 'unexpected';
+  return Object.hasOwn(PROBLEMS, name) ? (name as ProblemName) : 'unexpected';
 }
