@@ -5,6 +5,8 @@ import { cite, medium, PAGE, sectionHead } from './style';
 import { printable, text } from './text';
 
 const PHOTO = { width: 262, height: 230 };
+/** A photo with what stands below it: number, caption of two lines, hash. */
+const ROW = PHOTO.height + 60;
 
 /** The pictures that the document may draw, by keys of our own: never by a name that a person gave. */
 export function photoImages({ attachments }: PdfContext): Record<string, string> {
@@ -70,7 +72,7 @@ export function photos(context: PdfContext): Content[] {
       margin: [0, 0, 0, 12],
     });
   }
-  return [sectionHead({ title: words.title, width: PAGE.textWidth }), ...pairs];
+  return [sectionHead({ title: words.title, width: PAGE.textWidth, room: ROW }), ...pairs];
 }
 
 function withAlt(image: ContentImage, words: string): Content {

@@ -99,9 +99,9 @@ function columnsOf(body: readonly (readonly unknown[])[]): number {
 const KEPT = 44;
 
 /** A head that moves to the next page unless something can follow it on this one. */
-function keptWithNext(head: Content[]): Content {
-  const spacer: Content = { canvas: [], margin: [0, KEPT, 0, 0] };
-  const back: Content = { canvas: [], margin: [0, -KEPT, 0, 0] };
+function keptWithNext(head: Content[], room = KEPT): Content {
+  const spacer: Content = { canvas: [], margin: [0, room, 0, 0] };
+  const back: Content = { canvas: [], margin: [0, -room, 0, 0] };
   return { stack: [{ stack: [...head, spacer], unbreakable: true }, back] };
 }
 
@@ -112,14 +112,17 @@ export function sectionHead({
   note,
   width,
   gap = 10,
+  room,
 }: {
   number?: number;
   title: string;
   note?: ContentText;
   width: number;
   gap?: number;
+  /** What must fit below it on its page, in pt, where that is more than a line or two. */
+  room?: number;
 }): Content {
-  return keptWithNext([
+  const head: Content[] = [
     rule(width, 1.5, [gap, 3]),
     {
       columns: [
@@ -132,7 +135,8 @@ export function sectionHead({
       columnGap: 0,
       margin: [0, 0, 0, 3],
     },
-  ]);
+  ];
+  return keptWithNext(head, room);
 }
 
 /** A head inside a section. */

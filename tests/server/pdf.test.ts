@@ -404,6 +404,22 @@ describe('photos', () => {
     expect(pdf.text).toContain('This photo cannot be printed.');
     expect(pdf.text).toContain('The photo is not at hand.');
   });
+
+  it('stand on the page of their heading, wherever that falls', async () => {
+    const jpeg = await sharp({
+      create: { width: 320, height: 240, channels: 3, background: '#888' },
+    })
+      .jpeg()
+      .toBuffer();
+    const photo = { id: '1', section: 'sources', sha256: 'e'.repeat(64), caption: 'Lock', jpeg };
+    const [event] = buildPdfInput().events;
+    // So many that the heading would still fit at the foot of a page, and no photo.
+    const events = Array.from({ length: 12 }, () => event).filter((one) => one !== undefined);
+    const pdf = await printed(buildPdfInput({ input: { events, attachments: [photo] } }));
+    const { stdout } = await run('pdftotext', [pdf.file, '-']);
+    const page = stdout.split('\f').find((words) => words.includes('Photo 1,'));
+    expect(page).toMatch(/^Photos$/m);
+  });
 });
 
 describe('the largest record', () => {

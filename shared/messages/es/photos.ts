@@ -14,7 +14,7 @@ export const photos: Words<typeof en> = {
   hint: 'JPEG, PNG o WebP, 15 MB a lo más. No se guarda el lugar donde se tomó.',
   caption: 'Pie de foto',
   captionHint: 'Qué muestra, por ejemplo: tapa de LP-2, circuito 14.',
-  editCaption: 'Editar el pie de foto',
+  editCaption: 'Editar el pie',
   editCaptionOf: (caption) => `Editar el pie de foto: ${caption}`,
   saveCaption: 'Guardar el pie de foto',
   cancel: 'Cancelar',
