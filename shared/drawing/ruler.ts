@@ -4,9 +4,10 @@ import { textWidth } from './textWidth';
 import { metreNumeral } from './zones';
 
 const METRES_PER_FOOT = 0.3048;
-const TICK_HEIGHTS = [15, 10, 7, 4] as const;
 /** Numerals stand at least this far apart, from middle to middle. */
 const LEAST_NUMERAL_STEP = 24;
+/** Each digit past the third needs as much more. */
+const MORE_DIGIT = 10;
 /** Ticks that are closer than this run together. */
 const LEAST_TICK_STEP = 3.5;
 
@@ -23,8 +24,7 @@ function feetDivision(pixelsPerFoot: number): Division {
     step: inches / 12,
     heightAt: (tick) => {
       const at = tick * inches;
-      const size = [12, 6, 3].findIndex((whole) => at % whole === 0);
-      return TICK_HEIGHTS[size === -1 ? 3 : size] ?? 4;
+      return at % 12 === 0 ? 15 : at % 6 === 0 ? 10 : at % 3 === 0 ? 7 : 4;
     },
   };
 }
@@ -36,9 +36,17 @@ function metreDivision(): Division {
   };
 }
 
+/** The first of the steps, or of their tens, hundreds and so on, that is wide enough to be read. */
+function leastStep(steps: readonly number[], pixelsPerUnit: number, least: number): number {
+  for (let power = 1; ; power *= 10) {
+    const step = steps.find((units) => units * power * pixelsPerUnit >= least);
+    if (step !== undefined) return step * power;
+  }
+}
+
 /** Coarser steps for distances beyond what the scales of the strip were made for. */
 function coarseDivision(pixelsPerUnit: number): Division {
-  const step = [1, 5, 10, 50, 100].find((units) => units * pixelsPerUnit >= LEAST_TICK_STEP) ?? 500;
+  const step = leastStep([1, 5], pixelsPerUnit, LEAST_TICK_STEP);
   return { step, heightAt: (tick) => (tick % 5 === 0 ? 15 : 7) };
 }
 
@@ -82,8 +90,10 @@ function numerals(input: {
   const unit = metric ? 'm' : 'ft';
   const texts: TextPrimitive[] = [{ ...common, x: right, text: unit, anchor: 'end' }];
   const end = right - textWidth(unit, 14, 500) - 8;
-  const steps = metric ? [0.5, 1, 2, 5, 10, 20, 50, 100] : [1, 2, 5, 10, 20, 50, 100, 200];
-  const step = steps.find((units) => units * pixelsPerUnit >= LEAST_NUMERAL_STEP) ?? 500;
+  const steps = metric ? [0.5, 1, 2] : [1, 2, 5];
+  const digits = String(Math.floor((right - x) / pixelsPerUnit)).length;
+  const least = LEAST_NUMERAL_STEP + Math.max(0, digits - 3) * MORE_DIGIT;
+  const step = leastStep(steps, pixelsPerUnit, least);
   for (let count = 0; ; count += 1) {
     const text = metric ? metreNumeral(count * step) : String(count * step);
     const at = x + count * step * pixelsPerUnit;

@@ -35,7 +35,7 @@ function swatch(role: Row['role'], left: number, top: number): Primitive[] {
   return [ground, ...barricadeStripes(post), frame];
 }
 
-/** The figure beside the end of its line, or on the line where there is no room beside it. */
+/** The figure beside the end of its line, or on what is seen of the line where there is no room beside it. */
 function figureText(row: Row, frame: Frame, y: number): TextPrimitive {
   const common = {
     kind: 'text',
@@ -51,7 +51,7 @@ function figureText(row: Row, frame: Frame, y: number): TextPrimitive {
   if (beside + textWidth(row.figure, FIGURE_SIZE, 700) <= frame.width) {
     return { ...common, x: beside, anchor: 'start' };
   }
-  return { ...common, x: (frame.part.x + end) / 2, anchor: 'middle' };
+  return { ...common, x: (frame.part.x + Math.min(end, frame.width)) / 2, anchor: 'middle' };
 }
 
 function dimension(row: Row, frame: Frame, y: number): Primitive[] {

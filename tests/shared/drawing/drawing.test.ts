@@ -1,33 +1,26 @@
 import path from 'node:path';
 import { createRequire } from 'node:module';
 import { describe, expect, it } from 'vitest';
-import type { WorksheetContent } from '@/hazard/content';
-import type { ArcFlashMethod, Assessment, Distance, Restricted } from '@/hazard/types';
+import type { ArcFlashMethod, Distance, Restricted } from '@/hazard/types';
 import { BARLOW_WIDTHS, FIRST_CHARACTER } from '@/shared/drawing/barlowWidths';
-import {
-  overlaps,
-  textBox,
-  type Drawing,
-  type Primitive,
-  type TextPrimitive,
-} from '@/shared/drawing/primitives';
+import type { Primitive } from '@/shared/drawing/primitives';
 import { sectionGeometry } from '@/shared/drawing/section';
 import { stripGeometry } from '@/shared/drawing/strip';
 import { textWidth } from '@/shared/drawing/textWidth';
 import { distanceLines, sectionInputOf, zonesOfWorksheet } from '@/shared/drawing/worksheetDrawing';
 import { messages } from '@/shared/messages';
 import type { Locale, Units } from '@/shared/user';
-
-const at = (inches: number, metres: number): Distance => ({ inches, metres });
-const citation = { standard: '', edition: '', table: '', confidence: 'memory' } as const;
-
-interface Situation {
-  name: string;
-  restricted: Restricted;
-  movable: boolean;
-  arcFlash: Distance | null;
-  method: ArcFlashMethod;
-}
+import {
+  assessmentOf,
+  at,
+  content,
+  expectInside,
+  expectReadable,
+  fixed277,
+  subjectOf,
+  textsOf,
+  type Situation,
+} from '../../support/drawings';
 
 const SYSTEMS: readonly [string, Restricted][] = [
   ['208Y/120', 'avoid contact'],
@@ -63,57 +56,6 @@ const situations: Situation[] = SYSTEMS.flatMap(([system, restricted]) =>
   ),
 );
 
-function assess({ restricted, movable, arcFlash, method }: Situation) {
-  const limited = movable ? at(120, 3) : at(42, 1);
-  const barricade = arcFlash && arcFlash.inches > limited.inches ? arcFlash : limited;
-  return {
-    boundaries: {
-      inTable: true,
-      row: '',
-      volts: 480,
-      because: '',
-      movable,
-      limitedMovable: at(120, 3),
-      limitedFixed: at(42, 1),
-      restricted,
-      citation,
-    },
-    arcFlash: {
-      likely: method !== 'not likely',
-      method,
-      ppeCategory: null,
-      requiredArcRatingCalPerCm2: null,
-      arcFlashBoundary: arcFlash,
-      findings: [],
-      citations: [],
-    },
-    barricade: { ...barricade, citation },
-  } satisfies Pick<Assessment, 'boundaries' | 'arcFlash' | 'barricade'>;
-}
-
-const content: WorksheetContent = {
-  job: { task: 'replace driver or ballast' },
-  supply: { circuitVolts: 277 },
-  decision: { mode: 'off' },
-  absenceTest: { byCrewId: 'a' },
-  surroundings: {
-    ceilingHeightFeet: 9,
-    access: 'stepladder',
-    ladder: { material: 'fiberglass', sizeFeet: 6, standingLevelFeet: 3 },
-    groundedSurfaces: [
-      { kind: 'ceiling grid', inReach: true },
-      { kind: 'duct', inReach: true },
-      { kind: 'structural steel' },
-    ],
-  },
-  crew: [
-    { id: 'a', lead: true, closest: 'restricted' },
-    { id: 'b', closest: 'outside all boundaries' },
-    { id: 'c', closest: 'limited with escort' },
-    { id: 'd', closest: 'outside limited' },
-  ],
-};
-
 const LANGUAGES: readonly [Locale, Units][] = [
   ['en-US', 'feet'],
   ['es-MX', 'feet'],
@@ -121,40 +63,9 @@ const LANGUAGES: readonly [Locale, Units][] = [
   ['es-MX', 'metric'],
 ];
 
-const textsOf = (drawing: Drawing): TextPrimitive[] =>
-  drawing.primitives.filter((primitive) => primitive.kind === 'text');
-
-function expectReadable(drawing: Drawing): void {
-  const boxes = textsOf(drawing).map((text) => ({ text: text.text, ...textBox(text) }));
-  const leaving = boxes.filter(
-    ({ left, top, right, bottom }) =>
-      left < -0.01 || top < 0 || right > drawing.width + 0.01 || bottom > drawing.height + 3.2,
-  );
-  expect(leaving).toEqual([]);
-  const covered = boxes.flatMap((box, index) =>
-    boxes
-      .slice(index + 1)
-      .filter((other) => overlaps(box, other))
-      .map((other) => `"${box.text}" over "${other.text}"`),
-  );
-  expect(covered).toEqual([]);
-}
-
-function expectInside(drawing: Drawing): void {
-  const inside = (x: number, y: number) =>
-    x >= -0.5 && x <= drawing.width + 0.5 && y >= -0.5 && y <= drawing.height + 0.5;
-  const outside = drawing.primitives.filter((primitive) => {
-    if (primitive.kind === 'hatch') {
-      return !primitive.segments.every(([x1, y1, x2, y2]) => inside(x1, y1) && inside(x2, y2));
-    }
-    return primitive.kind === 'dots' && !primitive.points.every(([x, y]) => inside(x, y));
-  });
-  expect(outside).toEqual([]);
-}
-
 describe.each(situations)('$name', (situation) => {
   it.each(LANGUAGES)('is readable on strip and drawing, %s, %s', (locale, units) => {
-    const assessment = assess(situation);
+    const assessment = assessmentOf(situation);
     const subject = { content, assessment, messages: messages(locale), locale, units };
     for (const width of [358, 424, 700]) {
       const zones = zonesOfWorksheet(subject);
@@ -176,30 +87,15 @@ describe.each(situations)('$name', (situation) => {
   });
 });
 
-const fixed277: Situation = {
-  name: '',
-  restricted: at(12, 0.3),
-  movable: false,
-  arcFlash: at(60, 1.5),
-  method: 'ppe category',
-};
-const subjectOf = (assessment: Pick<Assessment, 'boundaries' | 'arcFlash' | 'barricade'>) => ({
-  content,
-  assessment,
-  messages: messages('en-US'),
-  locale: 'en-US' as const,
-  units: 'feet' as const,
-});
-
 describe('the distance strip', () => {
   it('stands at the largest scale that leaves room for the last label', () => {
-    const zones = zonesOfWorksheet(subjectOf(assess(fixed277)));
+    const zones = zonesOfWorksheet(subjectOf(assessmentOf(fixed277)));
     expect(stripGeometry({ zones, units: 'feet', width: 358 }).pixelsPerFoot).toBe(46);
     expect(stripGeometry({ zones, units: 'feet', width: 700 }).pixelsPerFoot).toBe(64);
   });
 
   it('has a tick every inch at 46 px to the foot, of four heights', () => {
-    const zones = zonesOfWorksheet(subjectOf(assess(fixed277)));
+    const zones = zonesOfWorksheet(subjectOf(assessmentOf(fixed277)));
     const { primitives } = stripGeometry({ zones, units: 'feet', width: 358 });
     const ticks = primitives.find(
       (primitive): primitive is Extract<Primitive, { kind: 'path' }> =>
@@ -210,7 +106,7 @@ describe('the distance strip', () => {
   });
 
   it('shows no zone and says why while the voltage is not known', () => {
-    const assessment = { ...assess(fixed277), boundaries: null, barricade: null };
+    const assessment = { ...assessmentOf(fixed277), boundaries: null, barricade: null };
     const zones = zonesOfWorksheet(subjectOf(assessment));
     const strip = stripGeometry({ zones, units: 'feet', width: 358 });
     expect(strip.primitives.some(({ kind }) => kind === 'hatch' || kind === 'dots')).toBe(false);
@@ -226,7 +122,7 @@ describe('the distance strip', () => {
   });
 
   it('says that the arc flash boundary is not known where a study is needed', () => {
-    const assessment = assess({ ...fixed277, arcFlash: null, method: 'study needed' });
+    const assessment = assessmentOf({ ...fixed277, arcFlash: null, method: 'study needed' });
     const zones = zonesOfWorksheet(subjectOf(assessment));
     expect(zones.arcFlashNote).toBe('Arc flash: not known');
     expect(distanceLines(subjectOf(assessment))).toContain('Arc flash: not known.');
@@ -237,7 +133,7 @@ describe('the drawing', () => {
   it('keeps the asked scale where everything fits and takes the next smaller one where not', () => {
     const scaleOf = (situation: Situation) =>
       sectionGeometry(
-        sectionInputOf(subjectOf(assess(situation)), {
+        sectionInputOf(subjectOf(assessmentOf(situation)), {
           width: 389,
           pixelsPerFoot: 36,
           medium: 'print',
@@ -248,7 +144,7 @@ describe('the drawing', () => {
   });
 
   it('draws each boundary at its distance to scale', () => {
-    const input = sectionInputOf(subjectOf(assess(fixed277)), {
+    const input = sectionInputOf(subjectOf(assessmentOf(fixed277)), {
       width: 389,
       pixelsPerFoot: 36,
       medium: 'print',
@@ -277,7 +173,7 @@ describe('the drawing', () => {
         for (const task of ['replace lamp', 'replace breaker'] as const) {
           const surroundings = { ...content.surroundings, ceilingHeightFeet, access };
           const subject = {
-            ...subjectOf(assess(fixed277)),
+            ...subjectOf(assessmentOf(fixed277)),
             content: { ...content, job: { task }, surroundings },
           };
           const drawing = sectionGeometry(
@@ -293,7 +189,7 @@ describe('the drawing', () => {
 
 describe('in words', () => {
   it('gives each boundary with both published figures', () => {
-    expect(distanceLines(subjectOf(assess(fixed277)))).toEqual([
+    expect(distanceLines(subjectOf(assessmentOf(fixed277)))).toEqual([
       'Restricted approach boundary: 1\u00a0ft\u00a00\u00a0in (0.3\u00a0m).',
       'Limited approach boundary, fixed: 3\u00a0ft\u00a06\u00a0in (1.0\u00a0m).',
       'Arc flash boundary: 5\u00a0ft\u00a00\u00a0in (1.5\u00a0m).',
