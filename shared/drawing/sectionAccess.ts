@@ -17,22 +17,35 @@ export interface Standing {
   hand: Point;
 }
 
-/** How high the feet are above the floor, in feet; null while that is not known. */
-function standingFeet(input: SectionInput, partFeet: number): number | null {
+interface Support {
+  /** How high the feet are above the floor, in feet. */
+  level: number;
+  draw: (frame: Frame, feet: Point) => Primitive[];
+}
+
+/** What carries the person who works; null while it is not known. */
+function supportOf(input: SectionInput, partFeet: number): Support | null {
+  const { access, ladderSizeFeet, standingLevelFeet } = input;
   const comfortable = Math.max(0, partFeet - SHOULDER_FEET - COMFORTABLE_FEET);
-  switch (input.access) {
+  switch (access) {
     case 'floor':
-      return 0;
+      return { level: 0, draw: () => [] };
     case 'stepladder': {
-      if (input.ladderSizeFeet === null || input.ladderSizeFeet <= 0) return null;
-      const level = input.standingLevelFeet ?? Math.max(0, input.ladderSizeFeet - 2);
-      return Math.min(level, input.ladderSizeFeet);
+      if (ladderSizeFeet === null || ladderSizeFeet <= 0) return null;
+      const level = standingLevelFeet ?? Math.max(0, ladderSizeFeet - 2);
+      return {
+        level: Math.min(level, ladderSizeFeet),
+        draw: (frame, feet) => stepladder(frame, feet, ladderSizeFeet),
+      };
     }
     case 'extension ladder':
-      return input.standingLevelFeet ?? comfortable;
+      return { level: standingLevelFeet ?? comfortable, draw: extensionLadder };
     case 'platform':
     case 'lift':
-      return comfortable;
+      return {
+        level: comfortable,
+        draw: (frame, feet) => platform(frame, feet, access === 'lift'),
+      };
     case null:
       return null;
   }
@@ -42,8 +55,9 @@ function standingFeet(input: SectionInput, partFeet: number): number | null {
 export function standingAt(input: SectionInput, frame: Frame): Standing | null {
   const { part, floor, scale } = frame;
   const partFeet = (floor - part.y) / scale;
-  const level = standingFeet(input, partFeet);
-  if (level === null || level > partFeet) return null;
+  const support = supportOf(input, partFeet);
+  if (support === null || support.level > partFeet) return null;
+  const { level } = support;
   // As far aside as the arm reaches at this height, but not so far that nobody would work so.
   const up = partFeet - level - SHOULDER_FEET;
   const arm = ARM_FEET + TOOL_FEET - 0.25;
@@ -56,22 +70,7 @@ export function standingAt(input: SectionInput, frame: Frame): Standing | null {
     part.x + ((shoulder[0] - part.x) / distance) * tool,
     part.y + ((shoulder[1] - part.y) / distance) * tool,
   ];
-  return { primitives: support(input, frame, feet), feet, hand };
-}
-
-function support(input: SectionInput, frame: Frame, feet: Point): Primitive[] {
-  switch (input.access) {
-    case 'stepladder':
-      return stepladder(frame, feet, input.ladderSizeFeet ?? 0);
-    case 'extension ladder':
-      return extensionLadder(frame, feet);
-    case 'platform':
-      return platform(frame, feet, false);
-    case 'lift':
-      return platform(frame, feet, true);
-    default:
-      return [];
-  }
+  return { primitives: support.draw(frame, feet), feet, hand };
 }
 
 /** A stepladder from the side; the feet stand on its steps, at the right. */

@@ -150,21 +150,22 @@ function barricade(set: ZoneSet, at: (feet: number) => number): Primitive[] {
 
 /** What stands in place of the labels while the distances are not known: one or two lines. */
 function message(words: string, width: number): TextPrimitive[] {
-  for (const size of [15, 14, 13, 12]) {
-    const lines = wrapText(words, { size, weight: 600, width });
-    const widest = Math.max(...lines.map((line) => textWidth(line, size, 600)));
-    if ((lines.length > 2 || widest > width) && size > 12) continue;
-    return lines.map((line, index) => ({
-      kind: 'text',
-      x: 0,
-      y: (lines.length === 1 ? 30 : 17) + index * 19,
-      text: line,
-      size,
-      weight: 600,
-      anchor: 'start',
-      role: 'ink',
-      halo: 0,
-    }));
-  }
-  return [];
+  const linesAt = (size: number) => wrapText(words, { size, weight: 600, width });
+  const fits = (size: number): boolean => {
+    const lines = linesAt(size);
+    return lines.length <= 2 && lines.every((line) => textWidth(line, size, 600) <= width);
+  };
+  const size = [15, 14, 13].find(fits) ?? 12;
+  const lines = linesAt(size);
+  return lines.map((line, index) => ({
+    kind: 'text',
+    x: 0,
+    y: (lines.length === 1 ? 30 : 17) + index * 19,
+    text: line,
+    size,
+    weight: 600,
+    anchor: 'start',
+    role: 'ink',
+    halo: 0,
+  }));
 }

@@ -110,9 +110,10 @@ function finish(spots: readonly Spot[], sizes: Sizes): PlacedLabel[] {
  */
 export function placeLabels(labels: readonly StripLabel[], width: number): PlacedLabel[] {
   let spots: Spot[] = [];
-  for (const sizes of SIZES) {
+  let sizes: Sizes = SIZES[0];
+  for (sizes of SIZES) {
     spots = spotsFromLeft(labels, sizes);
-    if (pushFromRight(spots, width)) return finish(spots, sizes);
+    if (pushFromRight(spots, width)) break;
   }
-  return finish(spots, SIZES[SIZES.length - 1] ?? SIZES[0]);
+  return finish(spots, sizes);
 }

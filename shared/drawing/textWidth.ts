@@ -13,7 +13,8 @@ export function textWidth(text: string, size: number, weight: Weight): number {
   const widths = BARLOW_WIDTHS[weight];
   let thousandths = 0;
   for (const character of text) {
-    const index = (character.codePointAt(0) ?? 0) - FIRST_CHARACTER;
+    // Half of a pair tells nothing, but no character of the table needs a pair.
+    const index = character.charCodeAt(0) - FIRST_CHARACTER;
     thousandths += widths[index] || UNKNOWN;
   }
   return (thousandths * size) / 1000;

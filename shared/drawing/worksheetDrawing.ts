@@ -4,7 +4,7 @@ import { distancePair, typedFeet, volts } from '../format';
 import type { Messages } from '../messages';
 import type { Locale, Units } from '../user';
 import type { SectionInput, SectionPeople } from './sectionTypes';
-import { zonesOf, type ZoneSet } from './zones';
+import { boundariesOrMessage, zonesOf, type ZoneSet } from './zones';
 
 export interface DrawingSubject {
   content: WorksheetContent;
@@ -152,10 +152,10 @@ export function voltageLine({ assessment, content, messages, locale }: DrawingSu
 export function distanceLines(subject: DrawingSubject): string[] {
   const { assessment, messages, units } = subject;
   const words = messages.drawing;
-  const set = zonesOfWorksheet(subject);
-  const { boundaries, arcFlash, barricade } = assessment;
-  if (set.message !== null || !boundaries?.inTable)
-    return [`${set.message ?? words.zones.outsideTable}.`];
+  const boundaries = boundariesOrMessage({ assessment, words: words.zones });
+  if (typeof boundaries === 'string') return [`${boundaries}.`];
+  const { arcFlashNote } = zonesOfWorksheet(subject);
+  const { arcFlash, barricade } = assessment;
   const lines: string[] = [];
   const { restricted } = boundaries;
   if (restricted !== null) {
@@ -171,7 +171,7 @@ export function distanceLines(subject: DrawingSubject): string[] {
   if (arcFlash.arcFlashBoundary) {
     lines.push(words.line(words.arcFlashFull, distancePair(arcFlash.arcFlashBoundary, units)));
   } else {
-    lines.push(set.arcFlashNote === null ? words.arcFlashNone : `${set.arcFlashNote}.`);
+    lines.push(arcFlashNote === null ? words.arcFlashNone : `${arcFlashNote}.`);
   }
   if (barricade && barricade.inches > 0) {
     lines.push(words.line(words.barricadeFull, distancePair(barricade, units)));

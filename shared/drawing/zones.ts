@@ -49,9 +49,9 @@ function feetOf(pair: Distance, units: Units): number {
   return units === 'metric' ? pair.metres / METRES_PER_FOOT : pair.inches / 12;
 }
 
-function shockZones({ assessment, units, words }: ZoneInput): Zone[] {
-  const boundaries = assessment.boundaries;
-  if (!boundaries?.inTable) return [];
+type KnownBoundaries = Extract<NonNullable<Assessment['boundaries']>, { inTable: true }>;
+
+function shockZones(boundaries: KnownBoundaries, { units, words }: ZoneInput): Zone[] {
   const zones: Zone[] = [];
   const { restricted } = boundaries;
   if (restricted === 'avoid contact') {
@@ -78,14 +78,18 @@ function shockZones({ assessment, units, words }: ZoneInput): Zone[] {
   return zones;
 }
 
-function messageOf({ assessment, words }: ZoneInput): string | null {
+/** The boundaries of the shock table, or what is said where there is no distance to give. */
+export function boundariesOrMessage({
+  assessment,
+  words,
+}: Pick<ZoneInput, 'assessment' | 'words'>): KnownBoundaries | string {
   const { boundaries } = assessment;
   if (!boundaries) return words.distancesNotKnown;
   if (!boundaries.inTable) return words.outsideTable;
   const specified = boundaries.limitedFixed ?? boundaries.limitedMovable ?? boundaries.restricted;
   return specified === null && !assessment.arcFlash.arcFlashBoundary
     ? words.distancesNotSpecified
-    : null;
+    : boundaries;
 }
 
 /**
@@ -95,10 +99,12 @@ function messageOf({ assessment, words }: ZoneInput): string | null {
  */
 export function zonesOf(input: ZoneInput): ZoneSet {
   const { assessment, units, words } = input;
-  const message = messageOf(input);
-  if (message !== null) return { zones: [], barricade: null, message, arcFlashNote: null };
+  const boundaries = boundariesOrMessage(input);
+  if (typeof boundaries === 'string') {
+    return { zones: [], barricade: null, message: boundaries, arcFlashNote: null };
+  }
 
-  const zones = shockZones(input);
+  const zones = shockZones(boundaries, input);
   const { arcFlashBoundary, method } = assessment.arcFlash;
   if (arcFlashBoundary) {
     zones.push({
@@ -133,9 +139,5 @@ export function farthestFeet({ zones, barricade }: ZoneSet): number {
 
 /** `0`, `0.5`, `1` on a metric ruler. */
 export function metreNumeral(value: number): string {
-  return (
-    metresText(value)
-      .replace(/\.0(?=\u00a0)/, '')
-      .split('\u00a0')[0] ?? ''
-  );
+  return metresText(value).replace(/(\.0)?\u00a0m$/, '');
 }
