@@ -87,6 +87,7 @@ export default defineConfig({
       exclude: ['**/types.ts', '**/content.ts'],
       reporter: ['text-summary', 'json-summary'],
       reportsDirectory: 'coverage',
+      thresholds: { branches: 100 },
     },
   },
 });
