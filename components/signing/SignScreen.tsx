@@ -55,13 +55,13 @@ function AfterIt({ record, meaning }: { record: WorksheetRecord; meaning: OwnMea
   return <Text color="ink2">{text}</Text>;
 }
 
-/** After signing: where it stands now and whose turn it is. */
 interface SignedProps {
   record: WorksheetRecord;
   meaning: OwnMeaning;
   signedAt: string;
 }
 
+/** After signing: where it stands now and whose turn it is. */
 function Signed({ record, meaning, signedAt }: SignedProps) {
   const words = useMessages();
   const locale = useLocale();

@@ -1,10 +1,9 @@
 import type { Finding } from '@/hazard';
 
 /**
- * What a finding always carries for its words, by code and severity (and, where
- * one code has several, the limit): the names in the sentences of
- * `shared/messages/en/findings.ts` that are not in square brackets, and what
- * tells two findings of a kind apart.
+ * What every finding of a code and severity (and, where one code has several,
+ * of a limit) carries: the figures and names that its sentence in
+ * `shared/messages/` is filled with, and what tells two of a kind apart.
  */
 const ALWAYS: Readonly<Record<string, readonly string[]>> = {
   '*.unanswered open': ['field'],

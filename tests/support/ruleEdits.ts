@@ -40,3 +40,45 @@ export const HELD_BY_LEAD = {
   lockedBy: ['c1'],
   byCrewId: 'c1',
 };
+
+/** A set of gloves in test. */
+export const GLOVE_SET = {
+  gloveClass: '0',
+  lastTestedOn: '2026-09-01',
+  issuedOn: '2026-08-01',
+  airTested: true,
+  leatherProtectors: true,
+};
+
+export const BATTERY_UNIT = {
+  id: 'b1',
+  kind: 'battery unit',
+  from: 'Unit over door 1',
+  openedAt: 'battery connector',
+  held: 'exclusive control',
+  byCrewId: 'c1',
+};
+
+/** A second circuit at the first point of work, on conductors of its own. */
+export const UNSWITCHED_HOT = {
+  id: 'h1',
+  kind: 'unswitched hot',
+  from: 'LA-1 ckt 9',
+  points: ['A1'],
+  openedAt: 'breaker',
+  held: 'lock and tag',
+  lockNumber: '13',
+  lockedBy: ['c1'],
+  byCrewId: 'c1',
+};
+
+/** A reading of a pair that the sound worksheet has read at 0 V already. */
+export const readingOf = (volts: unknown, others: object = {}) => ({
+  point: 'A1',
+  from: 'B',
+  to: 'G',
+  volts,
+  current: 'ac',
+  at: READ_AT,
+  ...others,
+});

@@ -1,38 +1,10 @@
-import { READ_AT } from '../../support/ruleEdits';
+import { BATTERY_UNIT, READ_AT, UNSWITCHED_HOT, readingOf } from '../../support/ruleEdits';
 import type { Edits, RuleRow } from '../../support/ruleTable';
 import { describeRule, eachValue, gone, onEach } from '../../support/ruleTable';
 import { zeroReadings } from '../../support/soundWorksheet';
 
 /** A seventh reading, of a pair that is complete without it. */
 const SEVENTH = 'proof/readings/6';
-const reading = (volts: unknown, others: object = {}) => ({
-  point: 'A1',
-  from: 'B',
-  to: 'G',
-  volts,
-  current: 'ac',
-  at: READ_AT,
-  ...others,
-});
-const BATTERY = {
-  id: 'b1',
-  kind: 'battery unit',
-  from: 'Unit over door 1',
-  openedAt: 'battery connector',
-  held: 'exclusive control',
-  byCrewId: 'c1',
-};
-const HOT = {
-  id: 'h1',
-  kind: 'unswitched hot',
-  from: 'LA-1 ckt 9',
-  points: ['A1'],
-  openedAt: 'breaker',
-  held: 'lock and tag',
-  lockNumber: '13',
-  lockedBy: ['c1'],
-  byCrewId: 'c1',
-};
 const OPENED = { 'proof/openedSources': ['s1', 's2', 's3', 'h1', 'b1'] };
 const ofSource = (sourceId: string, point: string, to: string, others: object = {}) => ({
   point,
@@ -155,7 +127,7 @@ describeRule('absence.pairs-missing', '70E 120.6(7); FACE 86-35', [
   [
     'O work',
     'a third point that is not complete',
-    { [SEVENTH]: reading(0, { point: 'A3' }) },
+    { [SEVENTH]: readingOf(0, { point: 'A3' }) },
     ['open /proof/readings'],
   ],
   [
@@ -174,7 +146,7 @@ describeRule('absence.pairs-missing', '70E 120.6(7); FACE 86-35', [
 ]);
 
 const governing = (volts: unknown, others: object = {}): Edits => ({
-  [SEVENTH]: reading(volts, others),
+  [SEVENTH]: readingOf(volts, others),
 });
 describeRule('absence.voltage-present', '70E 120.6', [
   ['O', 'not at the plan', {}, []],
@@ -203,7 +175,7 @@ describeRule('absence.voltage-present', '70E 120.6', [
   [
     'O work',
     'two pairs',
-    { ...governing(120), 'proof/readings/7': reading(120, { point: 'A2' }) },
+    { ...governing(120), 'proof/readings/7': readingOf(120, { point: 'A2' }) },
     ['stop', 'stop'],
   ],
 ]);
@@ -230,7 +202,7 @@ describeRule('absence.controls-not-operated', '1910.333(b)(2)(iv)(A); FACE 04WA0
 
 const withHot = (points: unknown, ...readings: object[]): Edits => ({
   ...OPENED,
-  'sources/3': { ...HOT, points },
+  'sources/3': { ...UNSWITCHED_HOT, points },
   ...Object.fromEntries(readings.map((entry, index) => [`proof/readings/${6 + index}`, entry])),
 });
 describeRule('absence.source-not-tested', '1910.333(b)(2)(iv)(B); 70E 120.6(7)', [
@@ -294,7 +266,7 @@ describeRule('absence.source-not-tested', '1910.333(b)(2)(iv)(B); 70E 120.6(7)',
   [
     'O work',
     'the same conductors',
-    { ...OPENED, 'sources/3': { ...HOT, sameConductorsAs: 's1' } },
+    { ...OPENED, 'sources/3': { ...UNSWITCHED_HOT, sameConductorsAs: 's1' } },
     [],
   ],
   [
@@ -308,7 +280,7 @@ describeRule('absence.source-not-tested', '1910.333(b)(2)(iv)(B); 70E 120.6(7)',
 
 const withBattery = (...readings: object[]): Edits => ({
   ...OPENED,
-  'sources/3': { ...BATTERY, points: ['A1'] },
+  'sources/3': { ...BATTERY_UNIT, points: ['A1'] },
   'proof/readings/6': ofSource('b1', 'A1', 'G'),
   'proof/readings/7': ofSource('b1', 'A1', 'B'),
   ...Object.fromEntries(readings.map((entry, index) => [`proof/readings/${8 + index}`, entry])),
@@ -336,7 +308,12 @@ describeRule('absence.dc-not-tested', 'common practice; 1910.333(b)(2)(iv)(B)', 
     'a central inverter',
     {
       'proof/openedSources/3': 'i1',
-      'sources/3': { ...HOT, id: 'i1', kind: 'central inverter', sameConductorsAs: 's1' },
+      'sources/3': {
+        ...UNSWITCHED_HOT,
+        id: 'i1',
+        kind: 'central inverter',
+        sameConductorsAs: 's1',
+      },
     },
     ['open'],
   ],
@@ -345,7 +322,12 @@ describeRule('absence.dc-not-tested', 'common practice; 1910.333(b)(2)(iv)(B)', 
     'a central inverter, read',
     {
       'proof/openedSources/3': 'i1',
-      'sources/3': { ...HOT, id: 'i1', kind: 'central inverter', sameConductorsAs: 's1' },
+      'sources/3': {
+        ...UNSWITCHED_HOT,
+        id: 'i1',
+        kind: 'central inverter',
+        sameConductorsAs: 's1',
+      },
       'proof/readings/6': ofSource('i1', 'A1', 'G', { current: 'dc', from: 'B' }),
     },
     [],

@@ -1,17 +1,8 @@
-import { READ_AT } from '../../support/ruleEdits';
+import { BATTERY_UNIT, UNSWITCHED_HOT, readingOf } from '../../support/ruleEdits';
 import type { Edits, RuleRow } from '../../support/ruleTable';
 import { describeRule, gone } from '../../support/ruleTable';
 import { soundWorksheet, zeroReadings } from '../../support/soundWorksheet';
 
-const reading = (volts: unknown, others: object = {}) => ({
-  point: 'A1',
-  from: 'B',
-  to: 'G',
-  volts,
-  current: 'ac',
-  at: READ_AT,
-  ...others,
-});
 /** Beside the six of the sound worksheet, all at 0 V. */
 const added = (...readings: object[]): Edits =>
   Object.fromEntries(readings.map((entry, index) => [`proof/readings/${6 + index}`, entry]));
@@ -24,25 +15,25 @@ const live = (title: string, readings: object[], indexes: number[], also?: strin
 ];
 
 describeRule('absence.voltage-present', 'what was read stays on record, however incomplete', [
-  live('the same pair twice: the first of the highest', [reading(120), reading(120)], [6]),
-  live('the same pair twice: the higher', [reading(120), reading(-121)], [7]),
-  live('a reading without a voltage hides none', [reading(gone), reading(120)], [7]),
+  live('the same pair twice: the first of the highest', [readingOf(120), readingOf(120)], [6]),
+  live('the same pair twice: the higher', [readingOf(120), readingOf(-121)], [7]),
+  live('a reading without a voltage hides none', [readingOf(gone), readingOf(120)], [7]),
   live(
     'two that do not say where',
-    [reading(120, { point: gone }), reading(60, { point: gone })],
+    [readingOf(120, { point: gone }), readingOf(60, { point: gone })],
     [6, 7],
   ),
   live(
     'two that do not say to what',
-    [reading(120, { to: gone }), reading(60, { to: gone })],
+    [readingOf(120, { to: gone }), readingOf(60, { to: gone })],
     [6, 7],
   ),
   live(
     'two that do not say from what',
-    [reading(120, { from: gone }), reading(60, { from: gone })],
+    [readingOf(120, { from: gone }), readingOf(60, { from: gone })],
     [6, 7],
   ),
-  live('in the order of the record', [reading(60, { point: gone }), reading(120)], [6, 7]),
+  live('in the order of the record', [readingOf(60, { point: gone }), readingOf(120)], [6, 7]),
 ]);
 
 const spaced = zeroReadings([' A1', 'A2 '], ['B', 'N', 'G']);
@@ -50,23 +41,12 @@ describeRule('absence.pairs-missing', 'a point has one name, spaces or not', [
   ['O work', 'spaces around the names', { 'proof/readings': spaced }, []],
 ]);
 
-const HOT = {
-  id: 'h1',
-  kind: 'unswitched hot',
-  from: 'LA-1 ckt 9',
-  points: ['A1'],
-  openedAt: 'breaker',
-  held: 'lock and tag',
-  lockNumber: '13',
-  lockedBy: ['c1'],
-  byCrewId: 'c1',
-};
 const own = (to: string, others: object = {}) => ({
-  ...reading(0, { from: gone, sourceId: 'h1', to }),
+  ...readingOf(0, { from: gone, sourceId: 'h1', to }),
   ...others,
 });
 const withHot = (source: object, ...readings: object[]): Edits => ({
-  'sources/3': { ...HOT, ...source },
+  'sources/3': { ...UNSWITCHED_HOT, ...source },
   'proof/openedSources': ['s1', 's2', 's3', 'h1'],
   ...added(...readings),
 });
@@ -81,19 +61,14 @@ describeRule('absence.source-not-tested', "a source's own conductor is one end",
   ['O work', 'a source without an id is read nowhere', withHot({ id: gone }), ['open'], ['*']],
 ]);
 
-const BATTERY = {
-  kind: 'battery unit',
-  from: 'Unit over door 1',
-  points: ['A1'],
-  openedAt: 'battery connector',
-  held: 'exclusive control',
-  byCrewId: 'c1',
-};
 describeRule('absence.dc-not-tested', 'common practice; 1910.333(b)(2)(iv)(B)', [
   [
     'O work',
     'a battery without an id is read nowhere',
-    { 'sources/3': BATTERY, ...added(reading(0, { current: 'dc' })) },
+    {
+      'sources/3': { ...BATTERY_UNIT, id: gone, points: ['A1'] },
+      ...added(readingOf(0, { current: 'dc' })),
+    },
     ['open'],
     ['*'],
   ],

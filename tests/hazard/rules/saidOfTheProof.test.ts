@@ -1,7 +1,9 @@
 import { describeSaid } from '../../support/describeSaid';
 import type { SaidRow } from '../../support/describeSaid';
+import { UNSWITCHED_HOT } from '../../support/ruleEdits';
 import type { Edits } from '../../support/ruleTable';
 import { gone } from '../../support/ruleTable';
+import { zeroReadings } from '../../support/soundWorksheet';
 
 const LIVE_PARTS = 'proof/otherLiveParts';
 const PANEL: Edits = {
@@ -12,16 +14,6 @@ const PANEL: Edits = {
 const CATEGORY = 'absenceTest/category';
 const RATED = 'absenceTest/ratedVolts';
 const LEADS = 'absenceTest/leadsInspected';
-const HOT = {
-  id: 'h1',
-  kind: 'unswitched hot',
-  from: 'LA-1 ckt 9',
-  openedAt: 'breaker',
-  held: 'lock and tag',
-  lockNumber: '13',
-  lockedBy: ['c1'],
-  byCrewId: 'c1',
-};
 
 const held = { index: 0, kind: 'normal', from: 'LA-1 ckt 7', held: 'exclusive control' };
 const locks: SaidRow[] = [
@@ -95,6 +87,13 @@ const proofs: SaidRow[] = [
   ],
   [
     'absence.leads-not-inspected',
+    'no meter is used where the work is not a test',
+    'W',
+    { 'job/task': 'trace circuit', [LEADS]: gone },
+    [],
+  ],
+  [
+    'absence.leads-not-inspected',
     'no word of it',
     'O',
     { [LEADS]: gone },
@@ -163,7 +162,7 @@ const proofs: SaidRow[] = [
     'one whose points nobody named, where none was read',
     'O work',
     {
-      'sources/3': HOT,
+      'sources/3': { ...UNSWITCHED_HOT, points: gone },
       'proof/openedSources': ['s1', 's2', 's3', 'h1'],
       'proof/readings': [],
     },
@@ -179,13 +178,32 @@ const proofs: SaidRow[] = [
     'the conductors that it is still to be read to',
     'O work',
     {
-      'sources/3': { ...HOT, points: ['A1'] },
+      'sources/3': UNSWITCHED_HOT,
       'proof/openedSources': ['s1', 's2', 's3', 'h1'],
     },
     [
       [
         'open /proof/readings',
         { index: 3, kind: 'unswitched hot', from: 'LA-1 ckt 9', point: 'A1', to: 'G, B' },
+      ],
+    ],
+  ],
+  [
+    'absence.source-not-tested',
+    'by the letter of the phase at its own point',
+    'O work',
+    {
+      'sources/3': { ...UNSWITCHED_HOT, points: ['A2'] },
+      'proof/openedSources': ['s1', 's2', 's3', 'h1'],
+      'proof/readings': [
+        ...zeroReadings(['A1'], ['B', 'N', 'G']),
+        ...zeroReadings(['A2'], ['A', 'N', 'G']),
+      ],
+    },
+    [
+      [
+        'open /proof/readings',
+        { index: 3, kind: 'unswitched hot', from: 'LA-1 ckt 9', point: 'A2', to: 'G, A' },
       ],
     ],
   ],

@@ -1,20 +1,11 @@
 import { describeSaid } from '../../support/describeSaid';
 import type { SaidRow } from '../../support/describeSaid';
-import { FAR, SECOND_QUALIFIED } from '../../support/ruleEdits';
+import { BATTERY_UNIT, FAR, SECOND_QUALIFIED } from '../../support/ruleEdits';
 import type { Edits } from '../../support/ruleTable';
 import { gone } from '../../support/ruleTable';
 import { soundWorksheet } from '../../support/soundWorksheet';
 
-const BATTERY = {
-  id: 'b1',
-  kind: 'battery unit',
-  from: 'Unit over door 1',
-  points: ['A1'],
-  openedAt: 'battery connector',
-  held: 'exclusive control',
-  byCrewId: 'c1',
-};
-const BY_BATTERY: Edits = { 'sources/3': BATTERY, egressSupply: ['battery units'] };
+const BY_BATTERY: Edits = { 'sources/3': BATTERY_UNIT, egressSupply: ['battery units'] };
 const TWO_WORK: Edits = {
   'crew/1/worksOnCircuit': true,
   'sources/1/lockedBy': ['c1', 'c2'],
@@ -71,6 +62,28 @@ const rows: SaidRow[] = [
       ],
     ],
   ],
+  ...(['kilovoltAmperes', 'secondaryVolts', 'impedancePercent', 'phases'] as const).map(
+    (missing): SaidRow => [
+      'arc.study-needed',
+      `a nameplate without its ${missing}`,
+      'O',
+      {
+        'arcFlash/transformer': {
+          kilovoltAmperes: 75,
+          secondaryVolts: 208,
+          impedancePercent: 4,
+          phases: 3,
+          [missing]: gone,
+        },
+      },
+      [
+        [
+          `open /arcFlash/transformer/${missing}`,
+          { limit: 'not-answered', field: `arcFlash.transformer.${missing}` },
+        ],
+      ],
+    ],
+  ),
   [
     'arc.bystander-inside',
     'a place that is not answered',
@@ -198,6 +211,13 @@ const rows: SaidRow[] = [
     'O work',
     { 'proof/openedSources': ['s1', 's3'] },
     [['stop /proof/openedSources', SECOND]],
+  ],
+  [
+    'sources.traveler-unlisted',
+    'switched from two places, and no traveler listed',
+    'O',
+    { 'sources/2': gone },
+    [['open /sources', { kind: 'traveler' }]],
   ],
   [
     'sources.not-everyone-locked',

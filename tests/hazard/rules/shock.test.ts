@@ -1,15 +1,8 @@
-import { BELOW_FIFTY, FAR, SECOND_QUALIFIED } from '../../support/ruleEdits';
+import { BELOW_FIFTY, FAR, GLOVE_SET, SECOND_QUALIFIED } from '../../support/ruleEdits';
 import type { Edits, RuleRow } from '../../support/ruleTable';
 import { ALL, describeRule, eachValue, ENERGIZED, gone, onEach } from '../../support/ruleTable';
 
 const GLOVES = 'protectiveEquipment/gloves';
-const SET = {
-  gloveClass: '0',
-  lastTestedOn: '2026-09-01',
-  issuedOn: '2026-08-01',
-  airTested: true,
-  leatherProtectors: true,
-};
 
 describeRule('shock.unqualified-inside', '70E 130.4', [
   ...onEach(ALL, 'the helper stays outside', {}, []),
@@ -87,7 +80,7 @@ describeRule('shock.unqualified-inside', '70E 130.4', [
 describeRule('shock.gloves-missing', '1910.137, 1910.335(a)(1)', [
   ...onEach(ALL, 'one set for one person', {}, []),
   ...eachValue(ALL, GLOVES, [gone, 'x'], ['open'], ['shock.gloves-*']),
-  ...onEach(ALL, 'the set in the crew', { [GLOVES]: gone, 'crew/0/gloves': SET }, []),
+  ...onEach(ALL, 'the set in the crew', { [GLOVES]: gone, 'crew/0/gloves': GLOVE_SET }, []),
   ...onEach(
     ALL,
     'two inside, one set',
@@ -102,7 +95,7 @@ describeRule('shock.gloves-missing', '1910.137, 1910.335(a)(1)', [
       ...SECOND_QUALIFIED,
       'crew/1/closest': 'restricted',
       'crew/1/arcRated': true,
-      'crew/1/gloves': SET,
+      'crew/1/gloves': GLOVE_SET,
     },
     [],
     ['crew.rescue-untrained'],
@@ -114,7 +107,7 @@ describeRule('shock.gloves-missing', '1910.137, 1910.335(a)(1)', [
       ...SECOND_QUALIFIED,
       'crew/1/closest': 'restricted',
       'crew/1/arcRated': true,
-      'crew/1/gloves': SET,
+      'crew/1/gloves': GLOVE_SET,
       [GLOVES]: gone,
     },
     ['stop'],
@@ -172,7 +165,7 @@ describeRule('shock.gloves-overdue', '1910.137 Table I-5', [
   [
     'O',
     "the crew's own set",
-    { [GLOVES]: gone, 'crew/0/gloves': { ...SET, lastTestedOn: '2025-10-01' } },
+    { [GLOVES]: gone, 'crew/0/gloves': { ...GLOVE_SET, lastTestedOn: '2025-10-01' } },
     ['stop /crew/0/gloves*'],
   ],
 ]);
@@ -292,7 +285,7 @@ describeRule('shock.escort-is-working', '70E 130.4; own reading', [
   ...onEach(
     ENERGIZED,
     'both qualified are',
-    { ...ESCORTED, 'crew/2': { ...THIRD, closest: 'restricted', gloves: SET } },
+    { ...ESCORTED, 'crew/2': { ...THIRD, closest: 'restricted', gloves: GLOVE_SET } },
     ['stop'],
   ),
   ...onEach(ALL, 'nobody is escorted', {}, []),

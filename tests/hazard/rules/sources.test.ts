@@ -1,17 +1,9 @@
 import { JOB_TASKS } from '@/hazard';
-import { HELD_BY_LEAD } from '../../support/ruleEdits';
+import { BATTERY_UNIT, HELD_BY_LEAD } from '../../support/ruleEdits';
 import type { Base, Edits, RuleRow } from '../../support/ruleTable';
 import { ALL, describeRule, eachValue, ENERGIZED, gone, onEach } from '../../support/ruleTable';
 import { zeroReadings } from '../../support/soundWorksheet';
 
-const BATTERY = {
-  id: 'b1',
-  kind: 'battery unit',
-  from: 'Unit over door 1',
-  openedAt: 'battery connector',
-  held: 'exclusive control',
-  byCrewId: 'c1',
-};
 const INVERTER = {
   id: 'i1',
   kind: 'central inverter',
@@ -101,7 +93,7 @@ describeRule('sources.egress-not-listed', 'common practice; FACE 04WA080', [
   ...onEach(
     ALL,
     'battery unit listed',
-    { egressSupply: ['battery units'], 'sources/3': BATTERY },
+    { egressSupply: ['battery units'], 'sources/3': BATTERY_UNIT },
     [],
     ['surroundings.*'],
   ),
@@ -161,14 +153,14 @@ describeRule('sources.not-opened', '1910.333(b)(2)(ii)(B)', [
   [
     'O',
     'a battery unit never',
-    { 'sources/3': { ...BATTERY, openedAt: 'none' } },
+    { 'sources/3': { ...BATTERY_UNIT, openedAt: 'none' } },
     [],
     ['sources.*'],
   ],
   [
     'O',
     'a battery unit never, unanswered',
-    { 'sources/3': { ...BATTERY, openedAt: gone } },
+    { 'sources/3': { ...BATTERY_UNIT, openedAt: gone } },
     [],
     ['sources.*'],
   ],
@@ -258,7 +250,7 @@ describeRule('sources.not-locked', '1910.333(b)(2)(iii)', [
     ...unlocked,
     'sources/0/held': 'exclusive control',
   }),
-  ['O', 'exclusive control of a battery connector', { 'sources/3': BATTERY }, []],
+  ['O', 'exclusive control of a battery connector', { 'sources/3': BATTERY_UNIT }, []],
   ...eachValue(
     ['O'],
     'sources/0/openedAt',
@@ -276,24 +268,29 @@ describeRule('sources.not-locked', '1910.333(b)(2)(iii)', [
 ]);
 
 describeRule('sources.battery-connected', 'common practice; 1910.333(b)(2)(ii)(B)', [
-  ['O', 'parted', { 'sources/3': BATTERY }, []],
+  ['O', 'parted', { 'sources/3': BATTERY_UNIT }, []],
   ...['breaker', 'disconnect', 'wall switch', 'plug', 'none'].map((openedAt): RuleRow => [
     'O',
     `opened at ${openedAt}`,
-    { 'sources/3': { ...BATTERY, ...HELD_BY_LEAD, openedAt } },
+    { 'sources/3': { ...BATTERY_UNIT, ...HELD_BY_LEAD, openedAt } },
     ['stop /sources/3/openedAt'],
     openedAt === 'wall switch' ? ['sources.switch-only'] : [],
   ]),
   [
     'O',
     'not answered',
-    { 'sources/3': { ...BATTERY, openedAt: gone } },
+    { 'sources/3': { ...BATTERY_UNIT, openedAt: gone } },
     ['open /sources/3/openedAt'],
     ['sources.not-locked', 'sources.switch-only'],
   ],
-  ...onEach(ENERGIZED, 'energized', { 'sources/3': { ...BATTERY, openedAt: 'none' } }, []),
+  ...onEach(ENERGIZED, 'energized', { 'sources/3': { ...BATTERY_UNIT, openedAt: 'none' } }, []),
   ['O', 'replaced, but none listed', { 'job/task': 'replace battery unit' }, ['open /sources']],
-  ['O', 'replaced and listed', { 'job/task': 'replace battery unit', 'sources/3': BATTERY }, []],
+  [
+    'O',
+    'replaced and listed',
+    { 'job/task': 'replace battery unit', 'sources/3': BATTERY_UNIT },
+    [],
+  ],
   [
     'O',
     'replaced, nothing listed',
@@ -508,7 +505,7 @@ describeRule('sources.opened-before-transfer', 'NEC 700.12', [
   [
     'O',
     'a battery unit',
-    { ...ALONE, 'sources/1': BATTERY, 'sources/0/upstreamOfTransfer': gone },
+    { ...ALONE, 'sources/1': BATTERY_UNIT, 'sources/0/upstreamOfTransfer': gone },
     [],
   ],
   ...eachValue(ENERGIZED, 'sources/0/upstreamOfTransfer', [true, gone], []),
@@ -517,7 +514,7 @@ describeRule('sources.opened-before-transfer', 'NEC 700.12', [
 describeRule('sources.transfer-starts', 'NEC 700.12', [
   ['O', 'a generator', {}, ['caution /sources*']],
   ['O', 'none', ALONE, []],
-  ['O', 'a battery unit', { ...ALONE, 'sources/1': BATTERY }, ['caution /sources*']],
+  ['O', 'a battery unit', { ...ALONE, 'sources/1': BATTERY_UNIT }, ['caution /sources*']],
   ['O', 'a central inverter', { ...ALONE, 'sources/1': INVERTER }, ['caution /sources*']],
   ...onEach(ENERGIZED, 'energized', {}, []),
 ]);

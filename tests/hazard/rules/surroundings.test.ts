@@ -185,6 +185,13 @@ describeRule('surroundings.egress-dark', '1910.37(a)(4), (b)(1), (d)(2); NFPA 10
   ],
   [
     'O',
+    'nobody knows: that is to be found first',
+    { ...OCCUPIED, egress: gone, egressSupply: ['unknown'] },
+    [],
+    ['sources.egress-unknown'],
+  ],
+  [
+    'O',
     'egressReaches is not answered',
     { ...OCCUPIED, egress: gone, egressReaches: gone },
     ['open', '?open'],
